@@ -1,0 +1,12 @@
+import node from "@astrojs/node";
+import react from "@astrojs/react";
+import tailwindcss from "@tailwindcss/vite";
+import { defineConfig } from "astro/config";
+
+export default defineConfig({
+  output: "server",
+  adapter: node({ mode: "middleware" }),
+  integrations: [react()],
+  server: { host: "127.0.0.1" },
+  vite: { plugins: [tailwindcss()] },
+});
