@@ -1,0 +1,4 @@
+export type { Actor, Team } from "./actor.ts";
+export { can, decide, type Decision, type Target } from "./can.ts";
+export { actions, matrix, ruleFor, type Action } from "./matrix.ts";
+export { isRole, roles, type Role } from "./roles.ts";
