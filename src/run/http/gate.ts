@@ -1,0 +1,61 @@
+import type { IncomingMessage, RequestListener, ServerResponse } from "node:http";
+import compression from "compression";
+import { attachBody, discardBody, readBody } from "./body.ts";
+import type { FileServer } from "./files.ts";
+import { vouchForHeaders, type Reached } from "./forwarded.ts";
+import { isForgedWrite } from "./origin.ts";
+import { refuse } from "./problem.ts";
+
+export type Application = (request: IncomingMessage, response: ServerResponse) => Promise<void>;
+
+/** Half as much again as the largest body an endpoint reads, so that an endpoint answers for its own limit. */
+export const bodyLimit = 1.5 * 1024 * 1024;
+
+export interface Gate extends Reached {
+  files: FileServer;
+  application: Application;
+}
+
+/** All that a request passes before the application sees it. */
+export function gate({ files, application, ...reached }: Gate): RequestListener {
+  const compress = compression() as unknown as (request: IncomingMessage, response: ServerResponse, next: () => void) => void;
+
+  async function admit(request: IncomingMessage, response: ServerResponse) {
+    if (request.method !== "GET" && request.method !== "HEAD") {
+      const body = await readBody(request, bodyLimit);
+      if (body.kind === "broken-off") return;
+      if (body.kind === "too-large") {
+        response.setHeader("Connection", "close");
+        refuse(request, response, 413, "Too large", "The request is larger than 1 MB. Nothing was changed; send less at once.");
+        discardBody(request);
+        return;
+      }
+      attachBody(request, body.bytes);
+    }
+    await application(request, response);
+  }
+
+  return (request, response) => {
+    vouchForHeaders(request, reached);
+    if (isForgedWrite(request)) {
+      discardBody(request);
+      refuse(
+        request,
+        response,
+        403,
+        "Not from this site",
+        "The request changes something but was sent by a page of another site. Nothing was changed; open the page here and try again.",
+      );
+      return;
+    }
+    compress(request, response, () => {
+      files(request, response, () => {
+        admit(request, response).catch((error: unknown) => {
+          console.error(error);
+          if (response.headersSent) response.destroy();
+          else refuse(request, response, 500, "Something went wrong", "It is our fault, and it was noted. Try again in a moment.");
+        });
+      });
+    });
+  };
+}
