@@ -28,6 +28,12 @@ function stop() {
 }
 for (const signal of ["SIGINT", "SIGTERM", "SIGHUP"]) process.on(signal, stop);
 
+// npm passes signals on, but a killed npm leaves no one at whose terminal Ctrl-C could be pressed.
+if (process.env.npm_lifecycle_event) {
+  const npm = process.ppid;
+  setInterval(() => process.ppid !== npm && stop(), 1000).unref();
+}
+
 function settingsOf(databaseUrl, demo) {
   return {
     ...process.env,
