@@ -2,12 +2,7 @@
 
 declare namespace App {
   interface Locals {
-    actor: {
-      userId: string;
-      name: string;
-      email: string;
-      team: { id: string; name: string; slug: string } | null;
-      role: "owner" | "designer" | "reviewer" | "builder" | "viewer" | null;
-    } | null;
+    /** Who asks; null without a valid session, and at the addresses that need none. */
+    actor: import("#lib/policy/index.ts").Actor | null;
   }
 }

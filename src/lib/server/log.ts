@@ -2,6 +2,6 @@ import { pino } from "pino";
 
 export const log = pino({
   name: "clatterbench",
-  level: process.env.LOG_LEVEL ?? "info",
+  level: "info",
   redact: ["*.password", "*.token", "headers.cookie", "headers.authorization"],
 });

@@ -61,3 +61,10 @@ export async function readJson<Schema extends z.ZodType>(
 export function readQuery<Schema extends z.ZodType>(url: URL, schema: Schema): z.output<Schema> {
   return parseInput(Object.fromEntries(url.searchParams), schema);
 }
+
+/** A variable of the address, which Astro always sets on a route that has it. */
+export function pathParameter(params: Record<string, string | undefined>, name: string): string {
+  const value = params[name];
+  if (value === undefined) throw new Error(`the route has no variable ${name}`);
+  return value;
+}
