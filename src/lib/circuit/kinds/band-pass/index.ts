@@ -1,0 +1,18 @@
+import { defineStageKind } from "../../stage/kind.ts";
+import { reference } from "./reference.ts";
+import { multipleFeedback } from "./topologies/multiple-feedback/index.ts";
+
+export const bandPass = defineStageKind({
+  id: "band-pass",
+  name: "Band-pass",
+  summary: "Gives noise its colour: a centre, a width and a gain, the centre moved a little by one pot.",
+  place: "audio",
+  ports: [
+    { id: "in", label: "audio in", sort: "audio", direction: "in" },
+    { id: "out", label: "audio out", sort: "audio", direction: "out" },
+  ],
+  topologies: [multipleFeedback],
+  telling: ["centreFrequency", "qualityFactor"],
+  reference,
+  version: 1,
+});

@@ -1,0 +1,73 @@
+import { defineTopology } from "../../../../stage/topology.ts";
+import type { Curve } from "../../../../stage/curve.ts";
+import { responseCurves } from "../../curves.ts";
+import { sources } from "../../sources.ts";
+import {
+  analyse,
+  centreAt,
+  design,
+  electricalAngle,
+  networkAt,
+  transferAt,
+  type MultipleFeedbackState,
+} from "./analyse.ts";
+import { conditions, parts, results, targets } from "./fields.ts";
+import { formulas } from "./formulas.ts";
+import { limits } from "./limits.ts";
+import { network } from "./network.ts";
+import { idealCentre } from "./model.ts";
+
+/** A centre to draw about even where the response has no peak to read. */
+const drawnCentre = (state: MultipleFeedbackState) =>
+  centreAt(state) || idealCentre(networkAt(state.parts, state.conditions));
+
+const atRotation = (state: MultipleFeedbackState, rotation: number): MultipleFeedbackState => ({
+  ...state,
+  conditions: { ...state.conditions, rotation },
+});
+
+const retune: Curve<MultipleFeedbackState> = {
+  id: "retune",
+  name: "Centre over rotation",
+  x: { quantity: "Rotation", unit: "", scale: "linear", shown: { unit: "°", factor: electricalAngle } },
+  y: { quantity: "Centre frequency", unit: "Hz", scale: "linear" },
+  domain: () => [0, 1],
+  defined: [0, 1],
+  lines: (state) => [{ id: "now", label: "as set", at: (rotation) => centreAt(state, rotation) }],
+  mark: (state) => ({ x: state.conditions.rotation, label: "as set" }),
+  window: ({ centreFrequency }) => centreFrequency && { y: [centreFrequency.least, centreFrequency.most] },
+};
+
+export const multipleFeedback = defineTopology({
+  id: "multiple-feedback",
+  name: "Multiple feedback",
+  summary: "One op amp, inverting. One resistor moves the centre at constant bandwidth and peak gain.",
+  parts,
+  conditions,
+  targets,
+  results,
+  analyse,
+  design,
+  anchors: [{ part: "c1", least: 470e-12, most: 470e-9, follows: ["c2"] }],
+  curves: [
+    ...responseCurves(transferAt, drawnCentre, (state) =>
+      state.parts.rbPot > 0
+        ? [
+            { id: "pot-out", label: "pot at 0°", state: atRotation(state, 0) },
+            { id: "pot-in", label: `pot at ${electricalAngle}°`, state: atRotation(state, 1) },
+          ]
+        : [],
+    ),
+    retune,
+  ],
+  limits,
+  formulas,
+  sources,
+  network,
+  leavesOut: [
+    "the op amp's second pole, slew rate and input capacitance",
+    "noise of the resistors and the op amp",
+    "losses and voltage dependence of the capacitors",
+    "the pot's end resistance",
+  ],
+});

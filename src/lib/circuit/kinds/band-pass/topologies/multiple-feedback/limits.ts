@@ -1,0 +1,160 @@
+import type { Limit } from "../../../../stage/topology.ts";
+import { networkAt, type C, type P, type R } from "./analyse.ts";
+
+/** Volts that a usual op-amp output stays away from its rail. From memory. */
+const headroomToRail = 1.5;
+/** Noise peaks are planned for at four standard deviations; 63 ppm of a Gaussian lie beyond (trade brief 2.14). */
+const crest = 4;
+
+/** What the trade warns of in this network (trade brief 2.7). */
+export const limits: readonly Limit<P, C, R>[] = [
+  {
+    code: "oscillates",
+    severity: "fault",
+    unit: "Hz",
+    source: "mfb-derivation",
+    template:
+      "No peak with two −3 dB points can be read off this response: the network oscillates, or an op amp of {value} is far too slow for it.",
+    check: ({ conditions, results }) =>
+      results.centreFrequency === undefined ? { value: conditions.gainBandwidth ?? 0, limit: 0 } : undefined,
+  },
+  {
+    code: "gain-near-limit",
+    severity: "caution",
+    unit: "",
+    source: "mfb-derivation",
+    template:
+      "R_B is less than a part of the network and more of a trim: 2Q²/|H0| is {value}, and below {limit} small errors of R_A move the centre. Ask for less gain or a higher Q.",
+    check: ({ parts, conditions }) => {
+      // For any capacitors Q²(C1 + C2)/C1 over |H0| equals 1 + RA/RB.
+      const { ra, rb } = networkAt(parts, conditions);
+      const ratio = 1 + (ra + conditions.sourceResistance) / rb;
+      return ratio <= 1.1 ? { value: ratio, limit: 1.1 } : undefined;
+    },
+  },
+  {
+    code: "slow-op-amp",
+    severity: "caution",
+    unit: "",
+    source: "mfb-derivation",
+    template:
+      "Q·f0/ft is {value}, above {limit}: the op amp lowers the centre and raises the Q by about this share. The figures here include it; another op amp will differ.",
+    check: ({ conditions, results }) => {
+      if (conditions.gainBandwidth === null || results.centreFrequency === undefined) return undefined;
+      const share = (results.qualityFactor! * results.centreFrequency) / conditions.gainBandwidth;
+      return share > 0.01 ? { value: share, limit: 0.01 } : undefined;
+    },
+  },
+  {
+    code: "little-loop-gain",
+    severity: "caution",
+    unit: "",
+    source: "practice",
+    template:
+      "The loop gain at the centre is {value}, below {limit} (26 dB): the response depends on the op amp's own gain-bandwidth.",
+    check: ({ results }) =>
+      results.loopGain !== undefined && results.loopGain < 20 ? { value: results.loopGain, limit: 20 } : undefined,
+  },
+  {
+    code: "small-resistor-to-ground",
+    severity: "caution",
+    unit: "Ω",
+    source: "practice",
+    template: "R_B in circuit is {value}, below {limit}: track and wiper resistance become part of it.",
+    check: ({ parts, conditions }) => {
+      const { rb } = networkAt(parts, conditions);
+      return rb < 100 ? { value: rb, limit: 100 } : undefined;
+    },
+  },
+  {
+    code: "large-feedback-resistor",
+    severity: "caution",
+    unit: "Ω",
+    source: "practice",
+    template:
+      "R_F is {value}, above {limit}: board leakage and bias current become part of it. Take larger capacitors.",
+    check: ({ parts }) => (parts.rf > 1e6 ? { value: parts.rf, limit: 1e6 } : undefined),
+  },
+  {
+    code: "capacitor-near-stray",
+    severity: "caution",
+    unit: "F",
+    source: "practice",
+    template:
+      "The smaller capacitor is {value}, below {limit}: stray capacitance moves the centre. Take larger capacitors and smaller resistors.",
+    check: ({ parts }) => {
+      const least = Math.min(parts.c1, parts.c2);
+      return least < 220e-12 ? { value: least, limit: 220e-12 } : undefined;
+    },
+  },
+  {
+    code: "source-loads-input",
+    severity: "caution",
+    unit: "",
+    source: "mfb-derivation",
+    template:
+      "The source resistance is {value} of R_A, above {limit}: it lowers the gain and moves the centre. The figures here include it; a pot in front changes it as it turns.",
+    check: ({ parts, conditions }) => {
+      const share = conditions.sourceResistance / parts.ra;
+      return share > 0.02 ? { value: share, limit: 0.02 } : undefined;
+    },
+  },
+  {
+    code: "class-2-ceramic",
+    severity: "caution",
+    unit: "",
+    source: "dielectrics",
+    template:
+      "Class 2 ceramic in a filter: its capacitance falls with voltage by {value} and more (at most {limit} is sound here), ages and is microphonic. Take film or class 1.",
+    check: ({ conditions }) => (conditions.dielectric === "class-2" ? { value: 0.2, limit: 0.05 } : undefined),
+  },
+  {
+    code: "retune-misses-target",
+    severity: "caution",
+    unit: "Hz",
+    source: "mfb-derivation",
+    template:
+      "Not every board can be tuned to the centre of {value}: {detail}. The nearest centre that all reach is {limit}.",
+    check: ({ parts, results, windows }) => {
+      const wanted = windows["centreFrequency"]?.target;
+      if (parts.rbPot === 0 || wanted === undefined) return undefined;
+      const { reachLow, reachHigh, centreFrequency } = results;
+      if (reachLow === undefined || reachHigh === undefined) {
+        return centreFrequency === undefined
+          ? undefined
+          : { value: wanted, limit: centreFrequency, detail: "the tolerances are wider than the pot's range" };
+      }
+      if (wanted < reachLow)
+        return { value: wanted, limit: reachLow, detail: "at worst case the low end stays above it" };
+      return wanted > reachHigh
+        ? { value: wanted, limit: reachHigh, detail: "at worst case the high end stays below it" }
+        : undefined;
+    },
+  },
+  {
+    code: "output-clips",
+    severity: "caution",
+    unit: "V",
+    source: "memory",
+    template:
+      "Noise peaks of {value} (four times RMS) pass the {limit} that the op amp can swing. Lower the gain or the noise.",
+    check: ({ conditions, results }) => {
+      if (results.outputRms === undefined) return undefined;
+      const swing = Math.min(conditions.railPositive, -conditions.railNegative) - headroomToRail;
+      const peak = crest * results.outputRms;
+      return peak > swing ? { value: peak, limit: Math.max(0, swing) } : undefined;
+    },
+  },
+  {
+    code: "heavy-load",
+    severity: "caution",
+    unit: "Ω",
+    source: "jfet-op-amp",
+    template:
+      "The load is {value}; output swing is guaranteed into {limit} and more. Expect less swing, and buffer a load of a few kilohms.",
+    check: ({ conditions }) =>
+      conditions.loadResistance !== null && conditions.loadResistance < 10e3
+        ? { value: conditions.loadResistance, limit: 10e3 }
+        : undefined,
+  },
+];

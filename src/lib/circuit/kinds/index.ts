@@ -1,0 +1,5 @@
+import type { StageKind } from "../stage/kind.ts";
+import { bandPass } from "./band-pass/index.ts";
+
+/** Every stage kind, in the order a voice is built. Adding one: its folder and a line here. */
+export const stageKinds: readonly StageKind[] = [bandPass];

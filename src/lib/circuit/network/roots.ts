@@ -1,0 +1,153 @@
+import { trim, type Polynomial } from "./polynomial.ts";
+
+export interface Complex {
+  re: number;
+  im: number;
+}
+
+const maxIterations = 200;
+
+/**
+ * All roots of a real polynomial, by the simultaneous iteration of Aberth (Math. Comp. 27 (1973) 339) started on the
+ * radii of the upper convex hull of log|cᵢ| (Bini, Numer. Algorithms 13 (1996) 179), which keeps it sound when roots
+ * lie many decades apart: a filter's poles at 1 kHz beside an op amp's at 3 MHz.
+ *
+ * @param p constant term first; highest non-zero coefficient decides the degree
+ * @returns as many roots as the degree; those of a real polynomial come in conjugate pairs, imaginary parts below
+ *   rounding are set to zero
+ * @throws RangeError where a coefficient is not finite or the iteration does not settle
+ */
+export function findRoots(p: Polynomial): Complex[] {
+  if (p.some((c) => !Number.isFinite(c))) throw new RangeError("findRoots: every coefficient must be finite");
+  const coefficients = trim(p);
+  const zeros = coefficients.findIndex((c) => c !== 0);
+  if (zeros > 0)
+    return [...Array.from({ length: zeros }, () => ({ re: 0, im: 0 })), ...findRoots(coefficients.slice(zeros))];
+  const degree = coefficients.length - 1;
+  if (degree < 1) return [];
+  if (degree === 1) return [{ re: -coefficients[0]! / coefficients[1]!, im: 0 }];
+  if (degree === 2) return quadraticRoots(coefficients[0]!, coefficients[1]!, coefficients[2]!);
+  return aberth(coefficients).map(snapToReal);
+}
+
+/** Roots of c0 + c1 s + c2 s², without the cancellation of the schoolbook formula. */
+function quadraticRoots(c0: number, c1: number, c2: number): Complex[] {
+  const half = c1 / 2;
+  const discriminant = half * half - c2 * c0;
+  if (discriminant < 0) {
+    const im = Math.sqrt(-discriminant) / Math.abs(c2);
+    return [
+      { re: -half / c2, im },
+      { re: -half / c2, im: -im },
+    ];
+  }
+  const q = -(half + (half < 0 ? -1 : 1) * Math.sqrt(discriminant));
+  if (q === 0)
+    return [
+      { re: 0, im: 0 },
+      { re: 0, im: 0 },
+    ];
+  return [
+    { re: q / c2, im: 0 },
+    { re: c0 / q, im: 0 },
+  ];
+}
+
+function aberth(c: number[]): Complex[] {
+  const roots = startingPoints(c);
+  const settled = roots.map(() => false);
+  for (let iteration = 0; iteration < maxIterations && settled.includes(false); iteration++) {
+    for (const [k, root] of roots.entries()) {
+      if (settled[k]) continue;
+      const ratio = newtonRatio(c, root);
+      if (ratio === undefined) {
+        settled[k] = true;
+        continue;
+      }
+      const sum = roots.reduce((s, other, j) => (j === k ? s : plus(s, reciprocal(minus(root, other)))), {
+        re: 0,
+        im: 0,
+      });
+      const step = times(ratio, reciprocal(minus({ re: 1, im: 0 }, times(ratio, sum))));
+      roots[k] = minus(root, step);
+      if (size(step) <= 4 * Number.EPSILON * size(roots[k])) settled[k] = true;
+    }
+  }
+  // A cluster settles more slowly than a simple root; rounding alone decides its last digits.
+  if (roots.some((r) => !Number.isFinite(r.re) || !Number.isFinite(r.im)))
+    throw new RangeError("findRoots: no convergence");
+  return roots;
+}
+
+/** p(z)/p'(z), or undefined where p(z) is already below its rounding error. Large |z| goes through the reversed polynomial. */
+function newtonRatio(c: number[], z: Complex): Complex | undefined {
+  const n = c.length - 1;
+  const radius = size(z);
+  if (radius <= 1) {
+    const { value, slope, bound } = horner(c, z);
+    if (size(value) <= bound) return undefined;
+    return times(value, reciprocal(slope));
+  }
+  const w = reciprocal(z);
+  const { value, slope, bound } = horner([...c].reverse(), w);
+  if (size(value) <= bound) return undefined;
+  // p(z) = zⁿ r(1/z), so p/p' = z r / (n r − w r').
+  return times(times(z, value), reciprocal(minus({ re: n * value.re, im: n * value.im }, times(w, slope))));
+}
+
+function horner(c: readonly number[], z: Complex) {
+  let value: Complex = { re: c.at(-1)!, im: 0 };
+  let slope: Complex = { re: 0, im: 0 };
+  let bound = Math.abs(c.at(-1)!);
+  const radius = size(z);
+  for (let i = c.length - 2; i >= 0; i--) {
+    slope = plus(times(slope, z), value);
+    value = plus(times(value, z), { re: c[i]!, im: 0 });
+    bound = bound * radius + size(value);
+  }
+  return { value, slope, bound: bound * 4 * Number.EPSILON };
+}
+
+/** Radii from the upper convex hull of the points (i, log|cᵢ|), spread in angle. */
+function startingPoints(c: number[]): Complex[] {
+  const points = c
+    .map((x, i) => ({ i, log: x === 0 ? -Infinity : Math.log(Math.abs(x)) }))
+    .filter((p) => p.log > -Infinity);
+  const hull: typeof points = [];
+  for (const point of points) {
+    while (hull.length > 1) {
+      const [a, b] = [hull.at(-2)!, hull.at(-1)!];
+      if ((b.log - a.log) * (point.i - a.i) > (point.log - a.log) * (b.i - a.i)) break;
+      hull.pop();
+    }
+    hull.push(point);
+  }
+  return hull.slice(1).flatMap((to, k) => {
+    const from = hull[k]!;
+    const count = to.i - from.i;
+    const radius = Math.exp((from.log - to.log) / count);
+    // An irrational offset keeps the start off the real axis, where conjugate symmetry would hold the iteration.
+    return Array.from({ length: count }, (_, j) => {
+      const angle = (2 * Math.PI * j) / count + (2 * Math.PI * k) / (c.length - 1) + 0.7;
+      return { re: radius * Math.cos(angle), im: radius * Math.sin(angle) };
+    });
+  });
+}
+
+function snapToReal(root: Complex): Complex {
+  return Math.abs(root.im) <= 1e-11 * size(root) ? { re: root.re, im: 0 } : root;
+}
+
+const size = (z: Complex) => Math.hypot(z.re, z.im);
+const plus = (a: Complex, b: Complex): Complex => ({ re: a.re + b.re, im: a.im + b.im });
+const minus = (a: Complex, b: Complex): Complex => ({ re: a.re - b.re, im: a.im - b.im });
+const times = (a: Complex, b: Complex): Complex => ({ re: a.re * b.re - a.im * b.im, im: a.re * b.im + a.im * b.re });
+
+function reciprocal(z: Complex): Complex {
+  // Scaled, so that tiny or huge roots neither overflow nor vanish on the way.
+  const scale = Math.max(Math.abs(z.re), Math.abs(z.im));
+  if (scale === 0) return { re: 0, im: 0 };
+  const [re, im] = [z.re / scale, z.im / scale];
+  const squared = (re * re + im * im) * scale;
+  return { re: re / squared, im: -im / squared };
+}

@@ -1,0 +1,105 @@
+import { evaluate, rescale, squaredMagnitude, trim, type Polynomial } from "./polynomial.ts";
+import { findRoots, type Complex } from "./roots.ts";
+
+/** A transfer function H(s) = numerator/denominator with real coefficients, constant term first. */
+export interface Transfer {
+  numerator: Polynomial;
+  denominator: Polynomial;
+}
+
+/** |H(j2πf)|, a plain ratio. `frequency` in Hz, not negative. */
+export function magnitudeAt({ numerator, denominator }: Transfer, frequency: number): number {
+  const omega = 2 * Math.PI * frequency;
+  return sizeAt(numerator, omega) / sizeAt(denominator, omega);
+}
+
+/** |H| in decibels. */
+export function magnitudeDbAt(transfer: Transfer, frequency: number): number {
+  return 20 * Math.log10(magnitudeAt(transfer, frequency));
+}
+
+/** |p(jω)| by its even and odd parts, each a Horner scheme in −ω². */
+function sizeAt(p: Polynomial, omega: number): number {
+  const x = -omega * omega;
+  let even = 0;
+  let odd = 0;
+  for (let i = p.length - 1; i >= 0; i--) {
+    if (i % 2 === 0) even = even * x + p[i]!;
+    else odd = odd * x + p[i]!;
+  }
+  return Math.hypot(even, odd * omega);
+}
+
+/** The poles, in rad/s. */
+export function polesOf({ denominator }: Transfer): Complex[] {
+  return scaledRoots(denominator);
+}
+
+/** The finite zeros, in rad/s. */
+export function zerosOf({ numerator }: Transfer): Complex[] {
+  return scaledRoots(numerator);
+}
+
+function scaledRoots(p: Polynomial): Complex[] {
+  const unit = naturalScale(p);
+  return findRoots(rescale(p, unit)).map(({ re, im }) => ({ re: re * unit, im: im * unit }));
+}
+
+/** The geometric mean of the roots' sizes, or 1 where there is none: the frequency about which coefficients balance. */
+export function naturalScale(p: Polynomial): number {
+  const used = trim(p);
+  const first = used.findIndex((c) => c !== 0);
+  const order = used.length - 1 - first;
+  return order > 0 ? Math.abs(used[first]! / used.at(-1)!) ** (1 / order) : 1;
+}
+
+/** True where every pole has a negative real part: the network settles instead of oscillating. */
+export function isStable(transfer: Transfer): boolean {
+  return polesOf(transfer).every((pole) => pole.re < 0);
+}
+
+/**
+ * Phase of H in degrees as a continuous function of frequency. Each pole and zero contributes the angle of (jω − root),
+ * which never jumps, so no unwrapping is needed. A negative gain counts as −180°.
+ */
+export function phaseDegrees(transfer: Transfer): (frequency: number) => number {
+  const zeros = zerosOf(transfer);
+  const poles = polesOf(transfer);
+  const gain = trim(transfer.numerator).at(-1)! / trim(transfer.denominator).at(-1)!;
+  const sign = gain < 0 ? -180 : 0;
+  // A root in the right half plane turns the other way: its angle is taken from ±180° so that it too is continuous.
+  const angle = (omega: number, { re, im }: Complex) =>
+    re > 0 ? 180 + (Math.atan2(im - omega, re) * 180) / Math.PI : (Math.atan2(omega - im, -re) * 180) / Math.PI;
+  return (frequency) => {
+    const omega = 2 * Math.PI * frequency;
+    const sum = (roots: Complex[]) => roots.reduce((total, root) => total + angle(omega, root), 0);
+    return sign + sum(zeros) - sum(poles);
+  };
+}
+
+/** N(x) and D(x) with |H|² = N/D in x = (ω/unit)², `unit` in rad/s. */
+export function powerGain({ numerator, denominator }: Transfer, unit: number): { top: number[]; bottom: number[] } {
+  return { top: squaredMagnitude(rescale(numerator, unit)), bottom: squaredMagnitude(rescale(denominator, unit)) };
+}
+
+/** Positive real roots of a polynomial, ascending. */
+export function positiveRoots(p: Polynomial): number[] {
+  return findRoots(p)
+    .filter(({ re, im }) => re > 0 && Math.abs(im) <= 1e-6 * re)
+    .map(({ re }) => polish(p, re))
+    .sort((a, b) => a - b);
+}
+
+/** Newton steps on the real line, kept only while they bring the residual down. */
+function polish(p: Polynomial, start: number): number {
+  let x = start;
+  let residual = Math.abs(evaluate(p, x));
+  for (let i = 0; i < 4; i++) {
+    const slope = p.reduce((s, c, k) => (k === 0 ? s : s + k * c * x ** (k - 1)), 0);
+    const next = x - evaluate(p, x) / slope;
+    const nextResidual = Math.abs(evaluate(p, next));
+    if (!(next > 0) || !(nextResidual < residual)) break;
+    [x, residual] = [next, nextResidual];
+  }
+  return x;
+}

@@ -1,0 +1,104 @@
+import { formatQuantity } from "../quantity/format.ts";
+import type { NumberField } from "./fields.ts";
+import { completeConditions, type PlainConditions, type PlainValues } from "./defaults.ts";
+import { targetWindows, targetStates, type TargetState, type Windows } from "./targets.ts";
+import type { AnyTopology, Limit } from "./topology.ts";
+import type { Conditions, Parts, ResultValues, Results } from "./values.ts";
+import type { Warning } from "./warning.ts";
+
+export interface Analysis {
+  results: Record<string, number | readonly number[]>;
+  warnings: Warning[];
+  /** How each given target is met; empty without targets. */
+  state: Record<string, TargetState>;
+}
+
+export interface AnalysisRequest {
+  parts: PlainValues;
+  conditions?: PlainConditions;
+  targets?: PlainValues;
+  /** Relative half-widths that replace the usual windows. */
+  windows?: PlainValues;
+}
+
+/**
+ * Results, warnings and the state of each target for one stage.
+ *
+ * @param request parts complete, every value within what its descriptor accepts (checked at the edge)
+ */
+export function analyseStage(topology: AnyTopology, request: AnalysisRequest): Analysis {
+  const parts = request.parts;
+  const conditions = completeConditions(topology, request.conditions);
+  const raw = topology.analyse({ parts, conditions: conditions as never });
+  const results: Analysis["results"] = {};
+  const warnings: Warning[] = [];
+  for (const [key, value] of Object.entries(raw)) {
+    if (value === undefined) continue;
+    if (isFiniteResult(value)) results[key] = value;
+    else warnings.push(undefinedResult(topology, key));
+  }
+  const windows = targetWindows(topology, request.targets ?? {}, request.windows);
+  warnings.push(...unusualValues(topology, { ...parts, ...numbersOf(conditions) }));
+  warnings.push(...crossedLimits(topology, { parts, conditions, results, windows }));
+  return { results, warnings: bySeverity(warnings), state: targetStates(topology, results, windows) };
+}
+
+function isFiniteResult(value: number | readonly number[]): boolean {
+  return typeof value === "number" ? Number.isFinite(value) : value.every(Number.isFinite);
+}
+
+function undefinedResult(topology: AnyTopology, key: string): Warning {
+  const label = topology.results[key]?.label ?? key;
+  return {
+    code: "no-figure",
+    severity: "fault",
+    message: `${label} has no finite value with these parts.`,
+    value: 0,
+    limit: 0,
+    unit: "",
+  };
+}
+
+function crossedLimits(
+  topology: AnyTopology,
+  context: { parts: PlainValues; conditions: PlainConditions; results: Analysis["results"]; windows: Windows },
+): Warning[] {
+  return topology.limits.flatMap((limit: Limit<Parts, Conditions, Results>) => {
+    const found = limit.check({
+      ...context,
+      conditions: context.conditions as never,
+      results: context.results as ResultValues<Results>,
+    });
+    if (!found) return [];
+    const message = limit.template
+      .replaceAll("{value}", formatQuantity(found.value, limit.unit))
+      .replaceAll("{limit}", formatQuantity(found.limit, limit.unit))
+      .replaceAll("{detail}", found.detail ?? "");
+    return [
+      { code: limit.code, severity: limit.severity, message, value: found.value, limit: found.limit, unit: limit.unit },
+    ];
+  });
+}
+
+/** Values outside what the trade uses are computed all the same, and said. */
+function unusualValues(topology: AnyTopology, values: PlainValues): Warning[] {
+  const fields: Record<string, NumberField> = { ...topology.parts };
+  for (const [key, field] of Object.entries(topology.conditions)) if (field.type === "number") fields[key] = field;
+  return Object.entries(fields).flatMap(([key, field]) => {
+    const value = values[key];
+    if (value === undefined || (value >= field.least * (1 - 1e-9) && value <= field.most * (1 + 1e-9))) return [];
+    const limit = value < field.least ? field.least : field.most;
+    const side = value < field.least ? "below" : "above";
+    const message = `${field.label} of ${formatQuantity(value, field.unit)} is ${side} the usual ${formatQuantity(limit, field.unit)}.`;
+    return [{ code: "outside-usual-range", severity: "note", message, value, limit, unit: field.unit }];
+  });
+}
+
+function numbersOf(conditions: PlainConditions): PlainValues {
+  return Object.fromEntries(
+    Object.entries(conditions).filter((entry): entry is [string, number] => typeof entry[1] === "number"),
+  );
+}
+
+const order = { fault: 0, caution: 1, note: 2 };
+const bySeverity = (warnings: Warning[]) => warnings.sort((a, b) => order[a.severity] - order[b.severity]);
