@@ -51,7 +51,11 @@ export function SignInForm({ next, demoAccounts = [] }: { next: string; demoAcco
           error={errors.password?.message}
         />
         <p className="mt-2 flex flex-wrap items-center gap-x-5 gap-y-2">
-          <SubmitButton label="Sign in" busyLabel="Signing in…" busy={isSubmitting || (isSubmitSuccessful && failure === null)} />
+          <SubmitButton
+            label="Sign in"
+            busyLabel="Signing in…"
+            busy={isSubmitting || (isSubmitSuccessful && failure === null)}
+          />
           <a href="/forgot-password">Set a new password</a>
         </p>
       </form>

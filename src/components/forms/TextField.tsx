@@ -1,7 +1,10 @@
 import type { InputHTMLAttributes } from "react";
 import type { UseFormRegisterReturn } from "react-hook-form";
 
-interface TextFieldProps extends Pick<InputHTMLAttributes<HTMLInputElement>, "type" | "autoComplete" | "inputMode" | "readOnly"> {
+interface TextFieldProps extends Pick<
+  InputHTMLAttributes<HTMLInputElement>,
+  "type" | "autoComplete" | "inputMode" | "readOnly"
+> {
   label: string;
   hint?: string;
   error?: string | undefined;
@@ -11,7 +14,15 @@ interface TextFieldProps extends Pick<InputHTMLAttributes<HTMLInputElement>, "ty
 }
 
 /** Label above, one line always kept free beneath for a hint or an error, so that nothing jumps. */
-export function TextField({ label, hint, error, registration, idPrefix = "field", type = "text", ...input }: TextFieldProps) {
+export function TextField({
+  label,
+  hint,
+  error,
+  registration,
+  idPrefix = "field",
+  type = "text",
+  ...input
+}: TextFieldProps) {
   const id = `${idPrefix}-${registration.name}`;
   return (
     <div className="field">

@@ -13,7 +13,13 @@ interface SortHeaderProps<Column extends string> {
 }
 
 /** A column heading that sorts: a second press turns the order round. */
-export function SortHeader<Column extends string>({ column, label, order, onOrder, numeric = false }: SortHeaderProps<Column>) {
+export function SortHeader<Column extends string>({
+  column,
+  label,
+  order,
+  onOrder,
+  numeric = false,
+}: SortHeaderProps<Column>) {
   const active = order.column === column;
   const opposite = order.direction === "ascending" ? "descending" : "ascending";
   const first = numeric ? "descending" : "ascending";

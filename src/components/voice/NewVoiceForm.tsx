@@ -24,7 +24,10 @@ const entrySchema = z.strictObject({
 
 export function NewVoiceForm() {
   const [failure, setFailure] = useState<string | null>(null);
-  const form = useForm({ resolver: zodResolver(entrySchema), defaultValues: { name: "", template: "empty" } });
+  const form = useForm<z.infer<typeof entrySchema>>({
+    resolver: zodResolver(entrySchema),
+    defaultValues: { name: "", template: "empty" as const },
+  });
   const { errors, isSubmitting } = form.formState;
 
   const send = form.handleSubmit(async (entries) => {

@@ -66,7 +66,8 @@ export function SaveLine({ voiceId, stage, saving, readOnly }: SaveLineProps) {
         )}
         {state.kind === "unreachable" && (
           <p className="caution mt-3">
-            <strong>The server could not be reached.</strong> Your values stay on this page: check the connection and save again.
+            <strong>The server could not be reached.</strong> Your values stay on this page: check the connection and
+            save again.
           </p>
         )}
         {state.kind === "refused" && (

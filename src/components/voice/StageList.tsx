@@ -56,8 +56,8 @@ export function StageList({ voiceId, rows, copy, editable }: StageListProps) {
       {message !== null && <FormMessage kind={message.kind}>{message.text}</FormMessage>}
       {shown.length === 0 ? (
         <p className="prose text-ink-2">
-          No stage yet. Size one in a calculator and save it into this voice: it then stands here with its figures, and its
-          parts carry reference designators.
+          No stage yet. Size one in a calculator and save it into this voice: it then stands here with its figures, and
+          its parts carry reference designators.
         </p>
       ) : (
         <table className="table stage-list">

@@ -1,6 +1,7 @@
 /** What the auth library answers when it refuses. */
 export interface AuthFailure {
   code?: string | undefined;
+  message?: string | undefined;
   status: number;
 }
 
@@ -17,11 +18,14 @@ const byCode: Record<string, string> = {
 };
 
 /** Words for a refused request: what happened and what to do. What was typed stays in the form. */
-export function authProblem({ code, status }: AuthFailure): string {
+export function authProblem({ code, message, status }: AuthFailure): string {
   const known = code === undefined ? undefined : byCode[code];
   if (known !== undefined) return known;
+  // The one code under which our own server writes the words for the reader itself.
+  if (code === "INVALID_INPUT" && message) return message;
   if (status === 429) return "Too many tries in a short time. Wait a minute, then try again; your entries stay here.";
-  if (status === 401) return "You are signed out. Sign in again in another tab, then repeat this; your entries stay here.";
+  if (status === 401)
+    return "You are signed out. Sign in again in another tab, then repeat this; your entries stay here.";
   if (status === 403) return "Your role in the team does not allow this. Ask an owner of the team.";
   if (status === 0 || status >= 500) return unreachable;
   return "This was refused. Check the entries and try again; they stay here.";

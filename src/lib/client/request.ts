@@ -26,7 +26,10 @@ function faultsIn(problem: Record<string, unknown>): Fault[] {
 }
 
 /** One call of our own HTTP interface; every way it can end is a value, so that no screen forgets one. */
-export async function request<Body>(path: string, { method = "GET", body, ifMatch }: Asked = {}): Promise<Answer<Body>> {
+export async function request<Body>(
+  path: string,
+  { method = "GET", body, ifMatch }: Asked = {},
+): Promise<Answer<Body>> {
   const headers = new Headers({ accept: "application/json" });
   if (body !== undefined) headers.set("content-type", "application/json");
   if (ifMatch !== undefined) headers.set("if-match", ifMatch);

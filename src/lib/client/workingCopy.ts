@@ -64,7 +64,9 @@ export async function saveWorkingCopy(voiceId: string, { etag, document }: Worki
 /** The document with this stage in place of its older self, or at the end if it is new. */
 export function withStage(document: WorkingCopyDocument, stage: StoredStage): WorkingCopyDocument {
   const known = document.stages.some(({ id }) => id === stage.id);
-  const stages = known ? document.stages.map((old) => (old.id === stage.id ? stage : old)) : [...document.stages, stage];
+  const stages = known
+    ? document.stages.map((old) => (old.id === stage.id ? stage : old))
+    : [...document.stages, stage];
   return { ...document, stages };
 }
 
