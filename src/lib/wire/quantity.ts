@@ -1,0 +1,38 @@
+import { z } from "zod";
+import { acceptedRange, formatQuantity, parseQuantity, type NumberField } from "#lib/circuit/index.ts";
+
+/** A figure as it may be sent: a number in SI base units, or text in engineering or IEC 60062 notation. */
+const written = z
+  .union([z.number(), z.string().max(40)], { error: "This should be a number, or text such as 4k7 or 100n." })
+  .meta({ description: "A number in SI base units, or text such as 4k7, 100n, 1.5" });
+
+/** Checks and reads one figure of a stage; the answer is a number in SI base units within what can be computed. */
+export function quantitySchema(field: NumberField): z.ZodType<number, number | string> {
+  const [least, most] = acceptedRange(field);
+  return written
+    .transform((sent, context) => {
+      const parsed = typeof sent === "number" ? { ok: true as const, value: sent } : parseQuantity(sent, field.unit);
+      const fault = parsed.ok ? rangeFault(field, parsed.value, least, most) : parsed.reason;
+      if (fault === undefined && parsed.ok) return parsed.value;
+      context.addIssue({ code: "custom", message: fault ?? "", input: sent });
+      return z.NEVER;
+    })
+    .meta({ title: field.label, description: describe(field) });
+}
+
+/** Why a figure cannot be computed with, worded for the person who gave it; undefined where it can. */
+export function rangeFault(field: NumberField, value: number, least: number, most: number): string | undefined {
+  if (value >= least && value <= most) return undefined;
+  const label = capitalised(field.label);
+  if (value <= 0 && least >= 0 && field.scale === "logarithmic") {
+    return field.least > 0 ? `${label} must be more than zero.` : `${label} cannot be negative.`;
+  }
+  return `${label} must lie between ${formatQuantity(least, field.unit)} and ${formatQuantity(most, field.unit)}.`;
+}
+
+function describe(field: NumberField): string {
+  const unit = field.unit === "" ? "a plain ratio" : `in ${field.unit}`;
+  return [field.help, `${field.symbol}, ${unit}; usually ${field.least} to ${field.most}.`].filter(Boolean).join(" ");
+}
+
+const capitalised = (text: string) => text.charAt(0).toUpperCase() + text.slice(1);
