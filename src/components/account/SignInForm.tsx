@@ -3,16 +3,17 @@ import { useState } from "react";
 import { useForm } from "react-hook-form";
 import { auth } from "#lib/client/auth.ts";
 import { refusal } from "#lib/client/authProblem.ts";
+import type { Role } from "#lib/policy/index.ts";
 import { signInInput } from "#lib/wire/account.ts";
 import { FormMessage } from "../forms/FormMessage.tsx";
 import { SubmitButton } from "../forms/SubmitButton.tsx";
 import { TextField } from "../forms/TextField.tsx";
+import { roleWords } from "./roleWords.ts";
 
 export interface DemoAccount {
   email: string;
   password: string;
-  role: string;
-  may: string;
+  role: Role;
 }
 
 export function SignInForm({ next, demoAccounts = [] }: { next: string; demoAccounts?: DemoAccount[] }) {
@@ -76,7 +77,7 @@ export function SignInForm({ next, demoAccounts = [] }: { next: string; demoAcco
                       {account.role}
                     </button>
                   </th>
-                  <td className="text-small text-ink-2">{account.may}</td>
+                  <td className="text-small text-ink-2">{roleWords[account.role]}</td>
                 </tr>
               ))}
             </tbody>

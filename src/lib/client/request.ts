@@ -8,7 +8,14 @@ export type Answer<Body> =
   | { kind: "done"; body: Body; etag: string | null }
   | { kind: "signed-out" }
   | { kind: "unreachable" }
-  | { kind: "refused"; status: number; detail: string; errors: Fault[]; problem: Record<string, unknown> };
+  | {
+      kind: "refused";
+      status: number;
+      detail: string;
+      errors: Fault[];
+      problem: Record<string, unknown>;
+      etag: string | null;
+    };
 
 interface Asked {
   method?: "GET" | "POST" | "PUT" | "PATCH" | "DELETE";
@@ -47,7 +54,14 @@ export async function request<Body>(
   if (response.status === 401) return { kind: "signed-out" };
   const problem = isRecord(content) ? content : {};
   const detail = typeof problem.detail === "string" ? problem.detail : "The server refused this without saying why.";
-  return { kind: "refused", status: response.status, detail, errors: faultsIn(problem), problem };
+  return {
+    kind: "refused",
+    status: response.status,
+    detail,
+    errors: faultsIn(problem),
+    problem,
+    etag: response.headers.get("etag"),
+  };
 }
 
 /** Words for an answer that is not what was hoped for. */

@@ -41,19 +41,19 @@ export type SaveOutcome =
 
 const pathOf = (voiceId: string) => `/api/voices/${encodeURIComponent(voiceId)}/working-copy`;
 
-export async function readWorkingCopy(voiceId: string): Promise<WorkingCopy | null> {
-  const answer = await request<WorkingCopyDocument>(pathOf(voiceId));
-  return answer.kind === "done" && answer.etag !== null ? { etag: answer.etag, document: answer.body } : null;
+/** The newer copy that the server sends along when it refuses a stale one. */
+function copyIn(current: unknown, etag: string | null): WorkingCopy | null {
+  const carried = typeof current === "object" && current !== null && "stages" in current && etag !== null;
+  return carried ? { etag, document: current as WorkingCopyDocument } : null;
 }
 
 export async function saveWorkingCopy(voiceId: string, { etag, document }: WorkingCopy): Promise<SaveOutcome> {
   const answer = await request<WorkingCopyDocument>(pathOf(voiceId), { method: "PUT", body: document, ifMatch: etag });
   switch (answer.kind) {
     case "done":
-      return { kind: "saved", copy: { etag: answer.etag ?? etag, document } };
+      return { kind: "saved", copy: { etag: answer.etag ?? etag, document: answer.body } };
     case "refused":
-      // The newer copy is read anew, so that it comes with the ETag that fits it.
-      if (answer.status === 412) return { kind: "conflict", current: await readWorkingCopy(voiceId) };
+      if (answer.status === 412) return { kind: "conflict", current: copyIn(answer.problem.current, answer.etag) };
       return { kind: "refused", detail: answer.detail, errors: answer.errors };
     case "signed-out":
     case "unreachable":
