@@ -1,5 +1,5 @@
 import { z } from "zod";
-import { acceptedRange, formatQuantity, parseQuantity, type NumberField } from "#lib/circuit/index.ts";
+import { acceptedRange, formatTyped, parseQuantity, type NumberField } from "#lib/circuit/index.ts";
 
 /** A figure as it may be sent: a number in SI base units, or text in engineering or IEC 60062 notation. */
 const written = z
@@ -23,16 +23,14 @@ export function quantitySchema(field: NumberField): z.ZodType<number, number | s
 /** Why a figure cannot be computed with, worded for the person who gave it; undefined where it can. */
 export function rangeFault(field: NumberField, value: number, least: number, most: number): string | undefined {
   if (value >= least && value <= most) return undefined;
-  const label = capitalised(field.label);
   if (value <= 0 && least >= 0 && field.scale === "logarithmic") {
-    return field.least > 0 ? `${label} must be more than zero.` : `${label} cannot be negative.`;
+    return field.least > 0 ? "This must be more than zero." : "This cannot be negative.";
   }
-  return `${label} must lie between ${formatQuantity(least, field.unit)} and ${formatQuantity(most, field.unit)}.`;
+  const bound = (at: number) => `${formatTyped(at, field.unit)}${field.unit}`;
+  return `This must lie between ${bound(least)} and ${bound(most)}.`;
 }
 
 function describe(field: NumberField): string {
   const unit = field.unit === "" ? "a plain ratio" : `in ${field.unit}`;
   return [field.help, `${field.symbol}, ${unit}; usually ${field.least} to ${field.most}.`].filter(Boolean).join(" ");
 }
-
-const capitalised = (text: string) => text.charAt(0).toUpperCase() + text.slice(1);

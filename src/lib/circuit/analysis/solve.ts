@@ -41,8 +41,11 @@ export const meritStatement =
 /** Low enough for noise and stray capacitance, high enough for the op amp to drive: common practice, no source. */
 const comfortableResistance = 20e3;
 const impedanceWeight = 0.02;
-/** Neighbours of each exact value that are tried. */
+/** Neighbours of each exact value that are tried, for the first few undecided parts; the others take the nearest value. */
 const neighbours = 2;
+const variedParts = 5;
+/** Combinations analysed at most; where more exist, those with the most comfortable resistors come first. */
+const mostCombinations = 1200;
 
 /**
  * Exact parts for the targets, and the best combinations of values that exist.
@@ -65,7 +68,9 @@ export function solveStage(topology: AnyTopology, request: SolveRequest): Soluti
   if (designs.length === 0) return refusal!;
   designs.sort((a, b) => impedanceCost(topology, a.parts) - impedanceCost(topology, b.parts));
   const exactParts = designs[0]!.parts;
-  const combinations = designs.flatMap(({ parts, decided }) => snapped(topology, parts, decided, request.series ?? {}));
+  const combinations = designs
+    .flatMap(({ parts, decided }) => snapped(topology, parts, decided, request.series ?? {}))
+    .slice(0, mostCombinations);
   const candidates = combinations.flatMap((parts) => weigh(topology, parts, conditions, request) ?? []);
   candidates.sort((a, b) => a.merit - b.merit);
   return {
@@ -100,11 +105,12 @@ function snapped(
     capacitor: series.capacitor ?? "E12",
     pot: "pots",
   };
+  let varied = 0;
   const choices = Object.entries(topology.parts).map(([key, field]) => {
     const value = exact[key]!;
-    const values =
-      decided.has(key) || value === 0 ? [value] : nearestInSeries(value, usual[field.partClass], neighbours);
-    return values.map((v): [string, number] => [key, v]);
+    if (decided.has(key) || value === 0) return [[key, value] as const];
+    const count = varied++ < variedParts ? neighbours : 1;
+    return nearestInSeries(value, usual[field.partClass], count).map((near) => [key, near] as const);
   });
   return product(choices).map((entries) => Object.fromEntries(entries));
 }

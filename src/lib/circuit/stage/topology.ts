@@ -15,6 +15,17 @@ import type {
 import type { Severity } from "./warning.ts";
 import type { Unit } from "../quantity/units.ts";
 
+/** A generic class of device, never a maker's type. */
+export interface Device {
+  /** Unique in the topology: "u1". */
+  key: string;
+  /** Reference-designator class (IEEE 315). */
+  letter: "D" | "Q" | "U" | "J" | "SW";
+  label: string;
+  /** "JFET-input op amp, one of two", "general-purpose NPN". */
+  deviceClass: string;
+}
+
 /** Why no parts meet the targets, and which target to move to where. */
 export interface DesignRefusal {
   refused: true;
@@ -74,6 +85,10 @@ export interface Topology<
   formulas: readonly Formula[];
   sources: readonly Citation[];
   network: Network;
+  /** Devices on the board besides the parts with values. */
+  devices: readonly Device[];
+  /** One row each in the comparison of a kind's topologies: op amps needed, range, what retunes it. */
+  traits: readonly { label: string; text: string }[];
   /** What the figures leave out, said beside the results. */
   leavesOut: readonly string[];
 }

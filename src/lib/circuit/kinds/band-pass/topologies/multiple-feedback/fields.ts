@@ -1,4 +1,5 @@
-import { capacitor, choice, condition, pot, resistor, type ResultField } from "../../../../stage/fields.ts";
+import { common } from "../../../../stage/commonConditions.ts";
+import { capacitor, condition, pot, resistor, type ResultField } from "../../../../stage/fields.ts";
 import { centreTarget, gainTarget, qualityTarget, responseResults } from "../../fields.ts";
 
 export const parts = {
@@ -48,67 +49,16 @@ export const parts = {
 export const targets = { centreFrequency: centreTarget, qualityFactor: qualityTarget, peakGain: gainTarget } as const;
 
 export const conditions = {
-  rotation: condition({
+  rotation: {
+    ...common.rotation,
     label: "Retune pot, rotation",
-    symbol: "x",
-    unit: "",
-    default: 0.5,
-    least: 0,
-    most: 1,
-    accepts: [0, 1],
-    scale: "linear",
     help: "Share of the electrical travel; at 1 the whole pot is in circuit.",
-  }),
-  potLaw: choice({
-    label: "Pot law",
-    symbol: "a(x)",
-    default: "linear",
-    options: [
-      { value: "linear", label: "linear" },
-      { value: "logarithmic", label: "logarithmic, 15 % at mid-travel" },
-      { value: "reverse-logarithmic", label: "reverse logarithmic" },
-    ],
-  }),
-  gainBandwidth: condition({
-    label: "Op amp gain-bandwidth",
-    symbol: "f_t",
-    unit: "Hz",
-    default: null,
-    least: 0.5e6,
-    most: 20e6,
-    suggestion: 3e6,
-    help: "Left out, the op amp is ideal.",
-  }),
-  outputResistance: condition({
-    label: "Op amp output resistance",
-    symbol: "R_o",
-    unit: "Ω",
-    default: 0,
-    least: 0,
-    most: 1e3,
-    suggestion: 100,
-    help: "Open loop. It matters only with a finite gain-bandwidth.",
-  }),
-  sourceResistance: condition({
-    label: "Source resistance",
-    symbol: "R_s",
-    unit: "Ω",
-    default: 0,
-    least: 0,
-    most: 100e3,
-    suggestion: 12.5e3,
-    help: "Of the stage in front; a 50k pot at mid-travel is 12.5k.",
-  }),
-  loadResistance: condition({
-    label: "Load",
-    symbol: "R_L",
-    unit: "Ω",
-    default: null,
-    least: 1e3,
-    most: 10e6,
-    suggestion: 10e3,
-    help: "What the output drives; left out, nothing.",
-  }),
+  },
+  potLaw: common.potLaw,
+  gainBandwidth: common.gainBandwidth,
+  outputResistance: common.outputResistance,
+  sourceResistance: common.sourceResistance,
+  loadResistance: common.loadResistance,
   sourceRms: condition({
     label: "Noise at the input",
     symbol: "V_n",
@@ -128,62 +78,12 @@ export const conditions = {
     most: 1e6,
     help: "Corner of the one pole that limits the noise.",
   }),
-  railPositive: condition({
-    label: "Positive rail",
-    symbol: "V_+",
-    unit: "V",
-    default: 12,
-    least: 5,
-    most: 18,
-    scale: "linear",
-    accepts: [1, 40],
-  }),
-  railNegative: condition({
-    label: "Negative rail",
-    symbol: "V_-",
-    unit: "V",
-    default: -12,
-    least: -18,
-    most: -5,
-    scale: "linear",
-    accepts: [-40, -1],
-  }),
-  resistorTolerance: condition({
-    label: "Resistor tolerance",
-    symbol: "t_R",
-    unit: "",
-    default: 0.01,
-    least: 0.0005,
-    most: 0.1,
-    accepts: [0, 0.5],
-  }),
-  capacitorTolerance: condition({
-    label: "Capacitor tolerance",
-    symbol: "t_C",
-    unit: "",
-    default: 0.05,
-    least: 0.005,
-    most: 0.2,
-    accepts: [0, 0.8],
-  }),
-  potTolerance: condition({
-    label: "Pot tolerance",
-    symbol: "t_V",
-    unit: "",
-    default: 0.2,
-    least: 0.01,
-    most: 0.3,
-    accepts: [0, 0.8],
-  }),
-  dielectric: choice({
-    label: "Capacitor type",
-    symbol: "",
-    default: "film-or-class-1",
-    options: [
-      { value: "film-or-class-1", label: "film or class 1 ceramic" },
-      { value: "class-2", label: "class 2 ceramic" },
-    ],
-  }),
+  railPositive: common.railPositive,
+  railNegative: common.railNegative,
+  resistorTolerance: common.resistorTolerance,
+  capacitorTolerance: common.capacitorTolerance,
+  potTolerance: common.potTolerance,
+  dielectric: common.dielectric,
 } as const;
 
 export const results = {

@@ -64,6 +64,15 @@ export const multipleFeedback = defineTopology({
   formulas,
   sources,
   network,
+  devices: [{ key: "u1", letter: "U", label: "op amp", deviceClass: "JFET-input op amp, one of two in a package" }],
+  traits: [
+    { label: "Op amps", text: "1" },
+    { label: "Q range", text: "0.5 to 10" },
+    { label: "Single-resistor retune", text: "R_B" },
+    { label: "Constant under retune", text: "bandwidth and peak gain" },
+    { label: "Finite gain-bandwidth", text: "centre down, Q up by Q·f0/ft" },
+    { label: "Inverts", text: "yes" },
+  ],
   leavesOut: [
     "the op amp's second pole, slew rate and input capacitance",
     "noise of the resistors and the op amp",
