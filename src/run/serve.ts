@@ -11,7 +11,7 @@ import { migrateDatabase } from "./migrate.ts";
 
 const starting: RequestListener = (request, response) => {
   response.setHeader("Retry-After", "2");
-  refuse(request, response, 503, "Starting", "The server is still starting. Try again in a moment.");
+  refuse(request, response, "unavailable", "The server is still starting. Try again in a moment.");
 };
 
 async function serve() {

@@ -13,6 +13,7 @@ const common = {
   TRUST_PROXY: count(0, 10),
   RATE_LIMIT_CALCULATORS: count(600, 1_000_000),
   RATE_LIMIT_ACCOUNTS: count(30, 1_000_000),
+  LOG_LEVEL: z.enum(["fatal", "error", "warn", "info", "debug", "trace", "silent"]).default("info"),
   OUT_DIR: z.string().default("dist"),
 };
 

@@ -26,7 +26,7 @@ export function gate({ files, application, ...reached }: Gate): RequestListener 
       if (body.kind === "broken-off") return;
       if (body.kind === "too-large") {
         response.setHeader("Connection", "close");
-        refuse(request, response, 413, "Too large", "The request is larger than 1 MB. Nothing was changed; send less at once.");
+        refuse(request, response, "too-large", "The request is larger than 1 MB. Nothing was changed; send less at once.");
         discardBody(request);
         return;
       }
@@ -42,8 +42,7 @@ export function gate({ files, application, ...reached }: Gate): RequestListener 
       refuse(
         request,
         response,
-        403,
-        "Not from this site",
+        "cross-site",
         "The request changes something but was sent by a page of another site. Nothing was changed; open the page here and try again.",
       );
       return;
@@ -53,7 +52,7 @@ export function gate({ files, application, ...reached }: Gate): RequestListener 
         admit(request, response).catch((error: unknown) => {
           console.error(error);
           if (response.headersSent) response.destroy();
-          else refuse(request, response, 500, "Something went wrong", "It is our fault, and it was noted. Try again in a moment.");
+          else refuse(request, response, "internal", "The server is at fault, and the fault was noted. Try again in a moment.");
         });
       });
     });
