@@ -22,7 +22,9 @@ function remembered(name) {
   } catch (error) {
     if (error.code === "ENOENT") return undefined;
     if (error.code === "EACCES") {
-      throw new Error(`${memory(name)} belongs to another user, who created this database. Start as that user, or as root.`);
+      throw new Error(
+        `${memory(name)} belongs to another user, who created this database. Start as that user, or as root.`,
+      );
     }
     throw error;
   }
@@ -36,7 +38,8 @@ function programsFor(cluster) {
   const version = join(cluster.folder, "data", "PG_VERSION");
   if (programFolders().length === 0) installPackage("postgresql", "PostgreSQL");
   const folders = programFolders();
-  if (folders.length === 0) throw new Error("PostgreSQL is installed, but its programs initdb and pg_ctl were not found.");
+  if (folders.length === 0)
+    throw new Error("PostgreSQL is installed, but its programs initdb and pg_ctl were not found.");
   if (!existsSync(version)) return folders[0];
   const wanted = readFileSync(version, "utf8").trim();
   const matching = folders.find((folder) => {
@@ -178,6 +181,9 @@ function halt(cluster) {
   ]);
   if (stopped.status !== 0) fail("The database did not stop.", cluster, stopped.stderr ?? "");
 }
+
+/** Whether a living process, or a start by hand, wants the named cluster up. */
+export const clusterIsHeld = (name) => holdersOf(name).any();
 
 /** Stops the named cluster, whoever holds it. Returns whether it was running. */
 export async function stopCluster(name) {

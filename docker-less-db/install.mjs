@@ -17,10 +17,14 @@ export function installPackage(name, purpose) {
   const sudo = process.getuid?.() === 0 ? "" : "sudo ";
   const command = `${sudo}apt-get update && ${sudo}apt-get install -y --no-install-recommends ${name}`;
   if (!existsSync("/usr/bin/apt-get")) {
-    throw new MissingPackage(`${purpose} is missing. Install it (Debian's package is called ${name}), then start again.`);
+    throw new MissingPackage(
+      `${purpose} is missing. Install it (Debian's package is called ${name}), then start again.`,
+    );
   }
   if (process.getuid?.() !== 0) {
-    throw new MissingPackage(`${purpose} is missing, and only root may install it. Run this, then start again:\n\n  ${command}\n`);
+    throw new MissingPackage(
+      `${purpose} is missing, and only root may install it. Run this, then start again:\n\n  ${command}\n`,
+    );
   }
   console.log(`${purpose} is missing: installing Debian's ${name} …`);
   // Package lists in fresh containers are empty or old, and an install from them fails.

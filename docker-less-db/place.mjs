@@ -58,5 +58,7 @@ export function programFolders() {
   const versions = existsSync(packaged) ? readdirSync(packaged) : [];
   const folders = versions.sort((a, b) => Number(b) - Number(a)).map((version) => join(packaged, version, "bin"));
   const onPath = (process.env.PATH ?? "").split(":").filter(Boolean);
-  return [...folders, ...onPath].filter((folder) => existsSync(join(folder, "initdb")) && existsSync(join(folder, "pg_ctl")));
+  return [...folders, ...onPath].filter(
+    (folder) => existsSync(join(folder, "initdb")) && existsSync(join(folder, "pg_ctl")),
+  );
 }

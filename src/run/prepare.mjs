@@ -20,14 +20,21 @@ export function checkNode() {
 /** Starts a program in the checkout with its output shown, and waits for it; an abort ends it. */
 export function run(program, args, { signal, env = {}, label } = {}) {
   return new Promise((resolve, reject) => {
-    const child = spawn(program, args, { cwd: checkout, stdio: ["ignore", "inherit", "inherit"], env: { ...process.env, ...env } });
+    const child = spawn(program, args, {
+      cwd: checkout,
+      stdio: ["ignore", "inherit", "inherit"],
+      env: { ...process.env, ...env },
+    });
     const abort = () => child.kill("SIGTERM");
     signal?.addEventListener("abort", abort, { once: true });
     child.once("error", reject);
     child.once("exit", (code, killedBy) => {
       signal?.removeEventListener("abort", abort);
       if (code === 0) resolve();
-      else reject(new CommandFailed(`${label ?? `${program} ${args.join(" ")}`} failed (${killedBy ?? `exit code ${code}`}).`));
+      else
+        reject(
+          new CommandFailed(`${label ?? `${program} ${args.join(" ")}`} failed (${killedBy ?? `exit code ${code}`}).`),
+        );
     });
   });
 }
@@ -53,7 +60,10 @@ export async function ensurePackages(signal) {
     console.log("Installing packages (about a minute) …");
     const npm = process.env.npm_execpath;
     const [program, ...first] = npm?.endsWith(".js") ? [process.execPath, npm] : ["npm"];
-    await run(program, [...first, "ci", "--include=dev", "--no-audit", "--no-fund", "--loglevel=error"], { signal, label: "npm ci" });
+    await run(program, [...first, "ci", "--include=dev", "--no-audit", "--no-fund", "--loglevel=error"], {
+      signal,
+      label: "npm ci",
+    });
   });
 }
 

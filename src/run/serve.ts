@@ -2,7 +2,7 @@
 import type { RequestListener } from "node:http";
 import { join, resolve } from "node:path";
 import { pathToFileURL } from "node:url";
-import { parseSettings } from "#lib/server/env.ts";
+import { parseSettings, SettingsError, type Settings } from "#lib/server/env.ts";
 import { serveFiles } from "./http/files.ts";
 import { gate, type Application } from "./http/gate.ts";
 import { closeGracefully, listen, portOf } from "./http/listen.ts";
@@ -14,10 +14,29 @@ const starting: RequestListener = (request, response) => {
   refuse(request, response, "unavailable", "The server is still starting. Try again in a moment.");
 };
 
+class StartError extends Error {}
+
+async function prepareDatabase({ DATABASE_URL }: Settings) {
+  try {
+    await migrateDatabase(DATABASE_URL);
+  } catch (error) {
+    const { code, message } = error as { code?: string; message?: string };
+    // A refused connection, a wrong password or name: whoever runs the server can mend it, and needs no stack for that.
+    if (!/^(E[A-Z]+|CONNECT_TIMEOUT|28\w{3}|3D000)$/.test(code ?? "")) throw error;
+    const { host } = new URL(DATABASE_URL);
+    throw new StartError(`The database cannot be reached at ${host}: ${message || code}. Check DATABASE_URL.`, {
+      cause: error,
+    });
+  }
+}
+
 async function serve() {
   const wanted = parseSettings(process.env);
   let listener = starting;
-  const server = await listen((request, response) => listener(request, response), { host: wanted.HOST, port: wanted.PORT });
+  const server = await listen((request, response) => listener(request, response), {
+    host: wanted.HOST,
+    port: wanted.PORT,
+  });
 
   let stopping = false;
   async function stop() {
@@ -35,7 +54,7 @@ async function serve() {
   process.env.PORT = String(portOf(server));
   const settings = parseSettings(process.env);
 
-  await migrateDatabase(settings.DATABASE_URL);
+  await prepareDatabase(settings);
 
   const folder = resolve(settings.OUT_DIR);
   const files = serveFiles(join(folder, "client"));
@@ -53,7 +72,6 @@ async function serve() {
 try {
   await serve();
 } catch (error) {
-  const known = error instanceof Error && (error.name === "SettingsError" || "code" in error);
-  console.error(known ? (error as Error).message : error);
+  console.error(error instanceof SettingsError || error instanceof StartError ? error.message : error);
   process.exit(1);
 }

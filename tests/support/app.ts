@@ -17,19 +17,22 @@ const outDir = process.env.OUT_DIR ?? "dist";
 
 /** Starts the built application on a free port, in demo mode against this test file's own database unless told otherwise. */
 export async function startApp(settings: Record<string, string> = {}): Promise<RunningApp> {
-  if (!existsSync(join(outDir, "server", "entry.mjs"))) throw new Error(`There is no build in ${outDir}: npm run build makes one.`);
+  if (!existsSync(join(outDir, "server", "entry.mjs")))
+    throw new Error(`There is no build in ${outDir}: npm run build makes one.`);
   const { PUBLIC_URL: _, ...inherited } = process.env;
   const child = spawn(process.execPath, ["--import", "tsx", "src/run/serve.ts"], {
     env: { ...inherited, HOST: "127.0.0.1", PORT: "0", OUT_DIR: outDir, ...settings },
     stdio: ["ignore", "pipe", "pipe", "ipc"],
   });
   let printed = "";
-  for (const stream of [child.stdout, child.stderr]) stream?.on("data", (chunk: Buffer) => (printed += chunk.toString()));
+  for (const stream of [child.stdout, child.stderr])
+    stream?.on("data", (chunk: Buffer) => (printed += chunk.toString()));
   const exited = once(child, "exit") as Promise<[number | null]>;
 
   const ready = once(child, "message") as Promise<[{ address: string }]>;
   const [first] = await Promise.race([ready, exited]);
-  if (first === null || typeof first === "number") throw new Error(`The application ended with code ${first}:\n${printed}`);
+  if (first === null || typeof first === "number")
+    throw new Error(`The application ended with code ${first}:\n${printed}`);
 
   return {
     url: first.address,

@@ -39,7 +39,11 @@ export async function accessibilityFaults(page: Page): Promise<string[]> {
   await page.evaluate(axe.source);
   const { violations } = await page.evaluate(async () => {
     const { axe: injected } = globalThis as unknown as { axe: typeof axe };
-    return injected.run(document, { runOnly: ["wcag2a", "wcag2aa", "wcag21a", "wcag21aa", "wcag22aa", "best-practice"] });
+    return injected.run(document, {
+      runOnly: ["wcag2a", "wcag2aa", "wcag21a", "wcag21aa", "wcag22aa", "best-practice"],
+    });
   });
-  return violations.flatMap(({ id, help, nodes }) => nodes.map(({ target }) => `${id}: ${help} at ${target.join(" ")}`));
+  return violations.flatMap(({ id, help, nodes }) =>
+    nodes.map(({ target }) => `${id}: ${help} at ${target.join(" ")}`),
+  );
 }

@@ -12,7 +12,10 @@ export function serveFiles(folder: string): FileServer {
     setHeaders(response, pathname) {
       response.setHeader("X-Content-Type-Options", "nosniff");
       // Names under /_astro/ carry a hash of the content: a changed file gets another name.
-      response.setHeader("Cache-Control", pathname.startsWith("/_astro/") ? "public, max-age=31536000, immutable" : "no-cache");
+      response.setHeader(
+        "Cache-Control",
+        pathname.startsWith("/_astro/") ? "public, max-age=31536000, immutable" : "no-cache",
+      );
     },
   });
   return (request, response, next) => {

@@ -1,6 +1,13 @@
 import type { IncomingMessage } from "node:http";
 
-const forwarding = ["x-forwarded-for", "x-forwarded-host", "x-forwarded-port", "x-forwarded-proto", "x-real-ip", "forwarded"];
+const forwarding = [
+  "x-forwarded-for",
+  "x-forwarded-host",
+  "x-forwarded-port",
+  "x-forwarded-proto",
+  "x-real-ip",
+  "forwarded",
+];
 
 export interface Reached {
   /** How many proxies of ours stand before this server. */

@@ -18,7 +18,11 @@ export interface Gate extends Reached {
 
 /** All that a request passes before the application sees it. */
 export function gate({ files, application, ...reached }: Gate): RequestListener {
-  const compress = compression() as unknown as (request: IncomingMessage, response: ServerResponse, next: () => void) => void;
+  const compress = compression() as unknown as (
+    request: IncomingMessage,
+    response: ServerResponse,
+    next: () => void,
+  ) => void;
 
   async function admit(request: IncomingMessage, response: ServerResponse) {
     if (request.method !== "GET" && request.method !== "HEAD") {
@@ -26,7 +30,12 @@ export function gate({ files, application, ...reached }: Gate): RequestListener 
       if (body.kind === "broken-off") return;
       if (body.kind === "too-large") {
         response.setHeader("Connection", "close");
-        refuse(request, response, "too-large", "The request is larger than 1 MB. Nothing was changed; send less at once.");
+        refuse(
+          request,
+          response,
+          "too-large",
+          "The request is larger than 1 MB. Nothing was changed; send less at once.",
+        );
         discardBody(request);
         return;
       }
@@ -52,7 +61,13 @@ export function gate({ files, application, ...reached }: Gate): RequestListener 
         admit(request, response).catch((error: unknown) => {
           console.error(error);
           if (response.headersSent) response.destroy();
-          else refuse(request, response, "internal", "The server is at fault, and the fault was noted. Try again in a moment.");
+          else
+            refuse(
+              request,
+              response,
+              "internal",
+              "The server is at fault, and the fault was noted. Try again in a moment.",
+            );
         });
       });
     });

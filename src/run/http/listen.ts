@@ -4,7 +4,10 @@ import type { AddressInfo } from "node:net";
 const portsTried = 50;
 
 /** Listens on the port asked for, or on the next free one above it; 0 asks for any. */
-export async function listen(listener: RequestListener, { host, port }: { host: string; port: number }): Promise<Server> {
+export async function listen(
+  listener: RequestListener,
+  { host, port }: { host: string; port: number },
+): Promise<Server> {
   const server = createServer(
     // Slow senders give up their place: headers within 10 s, a whole request within 30 s.
     { headersTimeout: 10_000, requestTimeout: 30_000, keepAliveTimeout: 65_000, connectionsCheckingInterval: 5_000 },
