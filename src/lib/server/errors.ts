@@ -3,6 +3,7 @@ export const errorCodes = {
   "malformed-json": { status: 400, title: "The body is not JSON" },
   "no-session": { status: 401, title: "Sign in first" },
   "not-allowed": { status: 403, title: "Your role may not do this" },
+  "cross-site": { status: 403, title: "The request came from another site" },
   "not-found": { status: 404, title: "Nothing here" },
   "method-not-allowed": { status: 405, title: "This address does not take that method" },
   conflict: { status: 409, title: "It clashes with what is there" },

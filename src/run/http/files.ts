@@ -2,9 +2,10 @@ import { existsSync } from "node:fs";
 import type { IncomingMessage, ServerResponse } from "node:http";
 import sirv from "sirv";
 
-export type FileServer = (request: IncomingMessage, response: ServerResponse, next: () => void) => void;
+/** Answers a request for a file; false where there is none of that name. */
+export type FileServer = (request: IncomingMessage, response: ServerResponse) => Promise<boolean>;
 
-/** Serves the files of the client build; whatever is not one of them goes on to `next`. */
+/** Serves the files of the client build. */
 export function serveFiles(folder: string): FileServer {
   if (!existsSync(folder)) throw new Error(`There is nothing to serve in ${folder}. Build first: npm run build`);
   const files = sirv(folder, {
@@ -18,8 +19,10 @@ export function serveFiles(folder: string): FileServer {
       );
     },
   });
-  return (request, response, next) => {
-    if (request.method === "GET" || request.method === "HEAD") files(request, response, next);
-    else next();
-  };
+  return (request, response) =>
+    new Promise((resolve) => {
+      // Of a file and of no file, exactly one is told.
+      response.once("close", () => resolve(true));
+      files(request, response, () => resolve(false));
+    });
 }

@@ -1,5 +1,6 @@
 import type { IncomingMessage, RequestListener, ServerResponse } from "node:http";
 import compression from "compression";
+import { log } from "#lib/server/log.ts";
 import { attachBody, discardBody, readBody } from "./body.ts";
 import type { FileServer } from "./files.ts";
 import { vouchForHeaders, type Reached } from "./forwarded.ts";
@@ -25,7 +26,22 @@ export function gate({ files, application, ...reached }: Gate): RequestListener 
   ) => void;
 
   async function admit(request: IncomingMessage, response: ServerResponse) {
-    if (request.method !== "GET" && request.method !== "HEAD") {
+    vouchForHeaders(request, reached);
+    if (isForgedWrite(request)) {
+      discardBody(request);
+      refuse(
+        request,
+        response,
+        "cross-site",
+        "The request changes something but was sent by a page of another site. Nothing was changed; open the page here and try again.",
+      );
+      return;
+    }
+    await new Promise<void>((next) => compress(request, response, next));
+    if (request.method === "GET" || request.method === "HEAD") {
+      const served = await files(request, response);
+      if (served) return;
+    } else {
       const body = await readBody(request, bodyLimit);
       if (body.kind === "broken-off") return;
       if (body.kind === "too-large") {
@@ -45,31 +61,16 @@ export function gate({ files, application, ...reached }: Gate): RequestListener 
   }
 
   return (request, response) => {
-    vouchForHeaders(request, reached);
-    if (isForgedWrite(request)) {
-      discardBody(request);
-      refuse(
-        request,
-        response,
-        "cross-site",
-        "The request changes something but was sent by a page of another site. Nothing was changed; open the page here and try again.",
-      );
-      return;
-    }
-    compress(request, response, () => {
-      files(request, response, () => {
-        admit(request, response).catch((error: unknown) => {
-          console.error(error);
-          if (response.headersSent) response.destroy();
-          else
-            refuse(
-              request,
-              response,
-              "internal",
-              "The server is at fault, and the fault was noted. Try again in a moment.",
-            );
-        });
-      });
+    admit(request, response).catch((error: unknown) => {
+      log.error({ err: error }, "a request failed before the application");
+      if (response.headersSent) response.destroy();
+      else
+        refuse(
+          request,
+          response,
+          "internal",
+          "The server is at fault, and the fault was noted. Try again in a moment.",
+        );
     });
   };
 }

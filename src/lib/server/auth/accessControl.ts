@@ -1,4 +1,5 @@
-import { actions, ruleFor, type Role } from "#lib/policy/index.ts";
+import type { actions } from "#lib/policy/index.ts";
+import { ruleFor, type Role } from "#lib/policy/index.ts";
 import { createAccessControl } from "better-auth/plugins/access";
 
 // What better-auth's own routes ask for, in its words, and the row of our matrix that decides it.
