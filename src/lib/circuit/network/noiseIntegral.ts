@@ -1,5 +1,7 @@
-import { rescale, trim } from "./polynomial.ts";
-import { magnitudeAt, naturalScale, polesOf, type Transfer } from "./transfer.ts";
+import { arctangent, evaluateAt, reciprocal, times } from "./complex.ts";
+import { differentiate, rescale, trim } from "./polynomial.ts";
+import { findRoots } from "./roots.ts";
+import { magnitudeAt, naturalScale, isStable, routhStep, type Transfer } from "./transfer.ts";
 
 /** Where the integral is cut for a response that never falls to zero: far above what can be heard or is used here. */
 const cutoff = 1e6;
@@ -9,17 +11,16 @@ const cutoff = 1e6;
  *
  * For a strictly proper, stable H it is exact, by the recursion on the denominator's coefficients of Åström, Jury and
  * Agniel (IEEE Trans. Autom. Control 15 (1970) 47). A response that levels off (finite op-amp output resistance) has no
- * finite integral; it is then taken up to 1 MHz by adaptive quadrature.
+ * finite integral; it is then taken up to 1 MHz, in closed form by partial fractions.
  *
  * @throws RangeError where a pole does not lie in the left half plane
  */
 export function noiseIntegral(transfer: Transfer): number {
-  if (polesOf(transfer).some((pole) => pole.re >= 0))
-    throw new RangeError("noiseIntegral: the response must be stable");
+  if (!isStable(transfer)) throw new RangeError("noiseIntegral: the response must be stable");
   const unit = naturalScale(transfer.denominator);
   const a = trim(rescale(transfer.denominator, unit)).reverse();
   const b = trim(rescale(transfer.numerator, unit)).reverse();
-  if (b.length >= a.length) return numericIntegral(transfer);
+  if (b.length >= a.length) return levelledIntegral(transfer, unit) ?? numericIntegral(transfer);
   const padded = [...new Array<number>(a.length - 1 - b.length).fill(0), ...b];
   // The recursion gives ∫|H|² dω/2π over both signs of ω; one sign is half of it.
   return (recursion(a, padded) * unit) / 2;
@@ -30,16 +31,42 @@ function recursion(a: number[], b: number[]): number {
   let [top, side] = [a, b];
   let integral = 0;
   while (top.length > 1) {
-    const row = top;
-    const alpha = row[0]! / row[1]!;
-    const beta = side[0]! / row[1]!;
+    const alpha = top[0]! / top[1]!;
+    const beta = side[0]! / top[1]!;
     integral += (beta * beta) / (2 * alpha);
-    // One step of the Routh table: every second coefficient loses its share of the next, and the degree drops by one.
-    const reduce = (coefficients: number[], share: number) =>
-      coefficients.slice(1).map((c, i) => (i % 2 === 1 ? c - share * (row[i + 2] ?? 0) : c));
-    [top, side] = [reduce(row, alpha), reduce(side, beta)];
+    [top, side] = [routhStep(top, alpha), routhStep(side, beta, top)];
   }
   return integral;
+}
+
+/** Poles nearer than this share of their size make partial fractions cancel; the quadrature takes over. */
+const distinct = 1e-3;
+
+/**
+ * The integral up to `cutoff` where H tends to a constant H∞. H(s)H(−s) − H∞² = Σ rᵢ·2pᵢ/(s² − pᵢ²) over the poles pᵢ of
+ * H with rᵢ = N(pᵢ)/D'(pᵢ)·H(−pᵢ), so that ∫₀^W dω of it is −Σ 2rᵢ·arctan(W/pᵢ).
+ *
+ * @returns undefined where two poles nearly coincide
+ */
+function levelledIntegral(transfer: Transfer, unit: number): number | undefined {
+  const numerator = rescale(transfer.numerator, unit);
+  const denominator = rescale(transfer.denominator, unit);
+  const poles = findRoots(denominator);
+  const close = poles.some((p, i) =>
+    poles.some((q, k) => k < i && Math.hypot(p.re - q.re, p.im - q.im) < distinct * Math.hypot(p.re, p.im)),
+  );
+  if (close) return undefined;
+  const level = trim(numerator).at(-1)! / trim(denominator).at(-1)!;
+  const edge = (2 * Math.PI * cutoff) / unit;
+  const slope = differentiate(denominator);
+  let sum = 0;
+  for (const p of poles) {
+    const minus = { re: -p.re, im: -p.im };
+    const top = times(evaluateAt(numerator, p), evaluateAt(numerator, minus));
+    const residue = times(top, reciprocal(times(evaluateAt(slope, p), evaluateAt(denominator, minus))));
+    sum += times(residue, arctangent(times({ re: edge, im: 0 }, reciprocal(p)))).re;
+  }
+  return level * level * cutoff - (sum / Math.PI) * unit;
 }
 
 function numericIntegral(transfer: Transfer): number {

@@ -20,28 +20,51 @@ export interface Resonance {
 }
 
 /**
- * Reads centre, peak, −3 dB points and noise bandwidth off a band-pass transfer function of any order.
- *
- * |H|² = N(x)/D(x) with x = ω²; the peak is a root of N'D − ND', the −3 dB points are the roots of 2·N·Dₚ − Nₚ·D
- * next to it. No search over a frequency grid, so no grid decides the digits.
+ * Reads centre, peak, −3 dB points and noise bandwidth off a stable band-pass transfer function of any order.
  *
  * @returns undefined where the response has no peak with two −3 dB points
  */
 export function readResonance(transfer: Transfer): Resonance | undefined {
-  const unit = naturalScale(transfer.denominator.slice(0, 3));
-  const { top, bottom } = powerGain(transfer, unit);
-  const slope = add(multiply(differentiate(top), bottom), multiply([-1], top, differentiate(bottom)));
-  const gain = (x: number) => evaluate(top, x) / evaluate(bottom, x);
-  const peaks = positiveRoots(slope);
-  if (peaks.length === 0) return undefined;
-  const peak = peaks.reduce((best, x) => (gain(x) > gain(best) ? x : best));
-  const half = gain(peak) / 2;
+  return secondOrder(transfer) ?? anyOrder(transfer);
+}
+
+/**
+ * H = k·s/(c0 + c1·s + c2·s²), where everything has a closed form: f0 = √(c0/c2)/2π, B = c1/(2π·c2), |H0| = |k|/c1,
+ * the −3 dB points at ∓B/2 + √(f0² + B²/4), and Bₙ = (π/2)·B.
+ */
+function secondOrder({ numerator, denominator }: Transfer): Resonance | undefined {
+  if (denominator.length !== 3 || numerator.length !== 2 || numerator[0] !== 0) return undefined;
+  const [c0, c1, c2] = denominator as readonly [number, number, number];
+  const centreFrequency = Math.sqrt(c0 / c2) / (2 * Math.PI);
+  const bandwidth = c1 / c2 / (2 * Math.PI);
+  const mean = Math.hypot(centreFrequency, bandwidth / 2);
+  return {
+    centreFrequency,
+    peakGain: Math.abs(numerator[1]!) / c1,
+    // The difference of two nearly equal figures where the band is wide is avoided: f1·f2 = f0².
+    lowerEdge: centreFrequency ** 2 / (mean + bandwidth / 2),
+    upperEdge: mean + bandwidth / 2,
+    bandwidth,
+    qualityFactor: centreFrequency / bandwidth,
+    noiseBandwidth: (Math.PI / 2) * bandwidth,
+  };
+}
+
+/**
+ * |H|² = N(x)/D(x) with x = ω²; the peak is a root of N'D − ND', the −3 dB points are the roots of 2·N·Dₚ − Nₚ·D
+ * next to it. No search over a frequency grid, so no grid decides the digits.
+ */
+function anyOrder(transfer: Transfer): Resonance | undefined {
+  const scaled = scaledPower(transfer);
+  const peak = peakOf(scaled);
+  if (peak === undefined) return undefined;
+  const { top, bottom, unit } = scaled;
+  const half = evaluate(top, peak) / evaluate(bottom, peak) / 2;
   const edges = positiveRoots(add(top, multiply([-half], bottom)));
   const lower = edges.filter((x) => x < peak).at(-1);
   const upper = edges.find((x) => x > peak);
   if (lower === undefined || upper === undefined) return undefined;
-  const hertz = (x: number) => (Math.sqrt(x) * unit) / (2 * Math.PI);
-  const [centreFrequency, lowerEdge, upperEdge] = [hertz(peak), hertz(lower), hertz(upper)];
+  const [centreFrequency, lowerEdge, upperEdge] = [hertz(peak, unit), hertz(lower, unit), hertz(upper, unit)];
   const bandwidth = upperEdge - lowerEdge;
   const peakGain = magnitudeAt(transfer, centreFrequency);
   return {
@@ -54,3 +77,27 @@ export function readResonance(transfer: Transfer): Resonance | undefined {
     noiseBandwidth: noiseIntegral(transfer) / peakGain ** 2,
   };
 }
+
+/** Where the magnitude peaks, Hz, without the rest of {@link readResonance}; undefined where it has no peak. */
+export function readCentre(transfer: Transfer): number | undefined {
+  const closed = secondOrder(transfer);
+  if (closed) return closed.centreFrequency;
+  const scaled = scaledPower(transfer);
+  const peak = peakOf(scaled);
+  return peak === undefined ? undefined : hertz(peak, scaled.unit);
+}
+
+function scaledPower(transfer: Transfer) {
+  const unit = naturalScale(transfer.denominator.slice(0, 3));
+  return { ...powerGain(transfer, unit), unit };
+}
+
+function peakOf({ top, bottom }: { top: number[]; bottom: number[] }): number | undefined {
+  const slope = add(multiply(differentiate(top), bottom), multiply([-1], top, differentiate(bottom)));
+  const gain = (x: number) => evaluate(top, x) / evaluate(bottom, x);
+  const peaks = positiveRoots(slope);
+  return peaks.length === 0 ? undefined : peaks.reduce((best, x) => (gain(x) > gain(best) ? x : best));
+}
+
+/** Frequency in Hz of x = (ω/unit)². */
+const hertz = (x: number, unit: number) => (Math.sqrt(x) * unit) / (2 * Math.PI);

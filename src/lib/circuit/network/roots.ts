@@ -1,9 +1,5 @@
+import { minus, plus, reciprocal, size, times, type Complex } from "./complex.ts";
 import { trim, type Polynomial } from "./polynomial.ts";
-
-export interface Complex {
-  re: number;
-  im: number;
-}
 
 const maxIterations = 200;
 
@@ -136,18 +132,4 @@ function startingPoints(c: number[]): Complex[] {
 
 function snapToReal(root: Complex): Complex {
   return Math.abs(root.im) <= 1e-11 * size(root) ? { re: root.re, im: 0 } : root;
-}
-
-const size = (z: Complex) => Math.hypot(z.re, z.im);
-const plus = (a: Complex, b: Complex): Complex => ({ re: a.re + b.re, im: a.im + b.im });
-const minus = (a: Complex, b: Complex): Complex => ({ re: a.re - b.re, im: a.im - b.im });
-const times = (a: Complex, b: Complex): Complex => ({ re: a.re * b.re - a.im * b.im, im: a.re * b.im + a.im * b.re });
-
-function reciprocal(z: Complex): Complex {
-  // Scaled, so that tiny or huge roots neither overflow nor vanish on the way.
-  const scale = Math.max(Math.abs(z.re), Math.abs(z.im));
-  if (scale === 0) return { re: 0, im: 0 };
-  const [re, im] = [z.re / scale, z.im / scale];
-  const squared = (re * re + im * im) * scale;
-  return { re: re / squared, im: -im / squared };
 }

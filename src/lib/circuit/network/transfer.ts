@@ -1,5 +1,6 @@
 import { evaluate, rescale, squaredMagnitude, trim, type Polynomial } from "./polynomial.ts";
-import { findRoots, type Complex } from "./roots.ts";
+import type { Complex } from "./complex.ts";
+import { findRoots } from "./roots.ts";
 
 /** A transfer function H(s) = numerator/denominator with real coefficients, constant term first. */
 export interface Transfer {
@@ -53,9 +54,23 @@ export function naturalScale(p: Polynomial): number {
   return order > 0 ? Math.abs(used[first]! / used.at(-1)!) ** (1 / order) : 1;
 }
 
-/** True where every pole has a negative real part: the network settles instead of oscillating. */
-export function isStable(transfer: Transfer): boolean {
-  return polesOf(transfer).every((pole) => pole.re < 0);
+/**
+ * True where every pole has a negative real part: the network settles instead of oscillating. By the Routh criterion on
+ * the scaled denominator, so no root is computed.
+ */
+export function isStable({ denominator }: Transfer): boolean {
+  let row = trim(rescale(denominator, naturalScale(denominator))).reverse();
+  if (row[0]! < 0) row = row.map((c) => -c);
+  while (row.length > 1) {
+    if (!(row[0]! > 0 && row[1]! > 0)) return false;
+    row = routhStep(row, row[0]! / row[1]!);
+  }
+  return row[0]! > 0;
+}
+
+/** One reduction of the Routh table, highest power first: every second coefficient loses `share` of the next one. */
+export function routhStep(row: readonly number[], share: number, by: readonly number[] = row): number[] {
+  return row.slice(1).map((c, i) => (i % 2 === 1 ? c - share * (by[i + 2] ?? 0) : c));
 }
 
 /**

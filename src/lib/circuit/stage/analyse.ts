@@ -38,7 +38,7 @@ export function analyseStage(topology: AnyTopology, request: AnalysisRequest): A
     else warnings.push(undefinedResult(topology, key));
   }
   const windows = targetWindows(topology, request.targets ?? {}, request.windows);
-  warnings.push(...unusualValues(topology, { ...parts, ...numbersOf(conditions) }));
+  unusualValues(topology, parts, conditions, warnings);
   warnings.push(...crossedLimits(topology, { parts, conditions, results, windows }));
   return { results, warnings: bySeverity(warnings), state: targetStates(topology, results, windows) };
 }
@@ -80,24 +80,32 @@ function crossedLimits(
   });
 }
 
-/** Values outside what the trade uses are computed all the same, and said. */
-function unusualValues(topology: AnyTopology, values: PlainValues): Warning[] {
-  const fields: Record<string, NumberField> = { ...topology.parts };
-  for (const [key, field] of Object.entries(topology.conditions)) if (field.type === "number") fields[key] = field;
-  return Object.entries(fields).flatMap(([key, field]) => {
-    const value = values[key];
-    if (value === undefined || (value >= field.least * (1 - 1e-9) && value <= field.most * (1 + 1e-9))) return [];
-    const limit = value < field.least ? field.least : field.most;
-    const side = value < field.least ? "below" : "above";
-    const message = `${field.label} of ${formatQuantity(value, field.unit)} is ${side} the usual ${formatQuantity(limit, field.unit)}.`;
-    return [{ code: "outside-usual-range", severity: "note", message, value, limit, unit: field.unit }];
-  });
+/** Values outside what the trade uses are computed all the same, and said. Plain loops: this runs on every analysis. */
+function unusualValues(
+  topology: AnyTopology,
+  parts: PlainValues,
+  conditions: PlainConditions,
+  warnings: Warning[],
+): void {
+  for (const key in topology.parts) checkUsual(topology.parts[key]!, parts[key], warnings);
+  for (const key in topology.conditions) {
+    const field = topology.conditions[key]!;
+    const value = conditions[key];
+    if (field.type === "number" && typeof value === "number") checkUsual(field, value, warnings);
+  }
 }
 
-function numbersOf(conditions: PlainConditions): PlainValues {
-  return Object.fromEntries(
-    Object.entries(conditions).filter((entry): entry is [string, number] => typeof entry[1] === "number"),
-  );
+/** A hair of room, so that a value at the limit is not called beyond it for the rounding of its last digit. */
+const hair = 1e-9;
+
+function checkUsual(field: NumberField, value: number | undefined, warnings: Warning[]): void {
+  if (value === undefined) return;
+  const [least, most] = [field.least - Math.abs(field.least) * hair, field.most + Math.abs(field.most) * hair];
+  if (value >= least && value <= most) return;
+  const limit = value < least ? field.least : field.most;
+  const side = value < least ? "below" : "above";
+  const message = `${field.label} of ${formatQuantity(value, field.unit)} is ${side} the usual ${formatQuantity(limit, field.unit)}.`;
+  warnings.push({ code: "outside-usual-range", severity: "note", message, value, limit, unit: field.unit });
 }
 
 const order = { fault: 0, caution: 1, note: 2 };

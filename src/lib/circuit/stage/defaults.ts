@@ -11,9 +11,9 @@ export function defaultParts(topology: AnyTopology): PlainValues {
 
 /** The conditions of an ideal world, overlaid with those given; a given null switches an optional one off. */
 export function completeConditions(topology: AnyTopology, given: PlainConditions = {}): PlainConditions {
-  return Object.fromEntries(
-    Object.entries(topology.conditions).map(([key, field]) => [key, given[key] ?? field.default]),
-  );
+  const complete: PlainConditions = {};
+  for (const key in topology.conditions) complete[key] = given[key] ?? topology.conditions[key]!.default;
+  return complete;
 }
 
 /** The targets a topology starts with. */

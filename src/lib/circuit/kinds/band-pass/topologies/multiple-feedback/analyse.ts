@@ -1,3 +1,5 @@
+import { readCentre } from "../../../../network/resonance.ts";
+import { isStable } from "../../../../network/transfer.ts";
 import { potFraction } from "../../../../parts/potLaw.ts";
 import type { ConditionValues, PartValues, ResultValues, State } from "../../../../stage/values.ts";
 import { noiseAfter, responseOf } from "../../model.ts";
@@ -43,7 +45,8 @@ export function transferAt({ parts, conditions }: MultipleFeedbackState, rotatio
 
 /** The exact centre at a rotation; NaN where there is no peak. */
 export function centreAt(state: MultipleFeedbackState, rotation = state.conditions.rotation): number {
-  return responseOf(transferAt(state, rotation), true).centreFrequency ?? Number.NaN;
+  const transfer = transferAt(state, rotation);
+  return isStable(transfer) ? (readCentre(transfer) ?? Number.NaN) : Number.NaN;
 }
 
 export function analyse(state: MultipleFeedbackState): ResultValues<R> {
