@@ -1,12 +1,11 @@
 import { actorOf } from "#lib/server/auth/actorOf.ts";
-import { countCalculation } from "#lib/server/calculatorLimit.ts";
 import { settings } from "#lib/server/env.ts";
 import { secureHeaders } from "#lib/server/headers.ts";
 import { problemResponse } from "#lib/server/problem.ts";
 import { defineMiddleware } from "astro:middleware";
 
 // Nothing under these addresses depends on who asks, so nobody is looked up for them.
-const impersonal = ["/api/kinds", "/api/health", "/api/openapi.json", "/api/auth/"];
+const impersonal = ["/api/kinds", "/api/idle", "/api/health", "/api/openapi.json", "/api/auth/"];
 
 const isImpersonal = (path: string) => impersonal.some((prefix) => path.startsWith(prefix));
 
@@ -19,8 +18,6 @@ export const onRequest = defineMiddleware(async (context, next) => {
   const cookies: string[] = [];
   let response: Response;
   try {
-    if (pathname.startsWith("/api/kinds/") && context.request.method === "POST")
-      countCalculation(context.clientAddress);
     if (!isImpersonal(pathname)) {
       const visit = await actorOf(context.request.headers);
       context.locals.actor = visit.actor;

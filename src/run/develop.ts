@@ -2,9 +2,10 @@
 import { dev } from "astro";
 import { parseSettings } from "#lib/server/env.ts";
 import { migrateDatabase } from "./migrate.ts";
+import { prepareAccounts } from "./seed.ts";
 
 const settings = parseSettings(process.env);
-await migrateDatabase(settings.DATABASE_URL);
+await migrateDatabase(settings.DATABASE_URL, () => prepareAccounts(settings));
 const server = await dev({ root: process.cwd(), server: { host: settings.HOST, port: settings.PORT } });
 
 async function stop() {

@@ -2,12 +2,14 @@
 import type { RequestListener } from "node:http";
 import { join, resolve } from "node:path";
 import { pathToFileURL } from "node:url";
+import { DemoAccountsError } from "#lib/server/demo/refuse.ts";
 import { parseSettings, SettingsError, type Settings } from "#lib/server/env.ts";
 import { serveFiles } from "./http/files.ts";
 import { gate, type Application } from "./http/gate.ts";
 import { closeGracefully, listen, portOf } from "./http/listen.ts";
 import { refuse } from "./http/problem.ts";
 import { migrateDatabase } from "./migrate.ts";
+import { prepareAccounts } from "./seed.ts";
 
 const starting: RequestListener = (request, response) => {
   response.setHeader("Retry-After", "2");
@@ -16,10 +18,12 @@ const starting: RequestListener = (request, response) => {
 
 class StartError extends Error {}
 
-async function prepareDatabase({ DATABASE_URL }: Settings) {
+async function prepareDatabase(settings: Settings) {
+  const { DATABASE_URL } = settings;
   try {
-    await migrateDatabase(DATABASE_URL);
+    await migrateDatabase(DATABASE_URL, () => prepareAccounts(settings));
   } catch (error) {
+    if (error instanceof DemoAccountsError) throw new StartError(error.message, { cause: error });
     const { code, message } = error as { code?: string; message?: string };
     // A refused connection, a wrong password or name: whoever runs the server can mend it, and needs no stack for that.
     if (!/^(E[A-Z]+|CONNECT_TIMEOUT|28\w{3}|3D000)$/.test(code ?? "")) throw error;

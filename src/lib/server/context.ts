@@ -1,7 +1,7 @@
 import type { Database } from "#lib/db/index.ts";
 import { decide, type Action, type Actor, type Target, type Team } from "#lib/policy/index.ts";
 import { database } from "./database.ts";
-import { Refusal } from "./errors.ts";
+import { notFound, Refusal } from "./errors.ts";
 
 /** What a verb is given besides its input. */
 export interface Context {
@@ -46,8 +46,4 @@ export function authorize({ actor }: Pick<Context, "actor">, action: Action, tar
     case "others-work":
       throw new Refusal("not-allowed", "Only the person who wrote this may change it. Nothing was changed.");
   }
-}
-
-export function notFound(): Refusal {
-  return new Refusal("not-found", "There is nothing at this address, or it belongs to another team.");
 }

@@ -53,3 +53,8 @@ export class Refusal extends Error {
     return errorCodes[this.code].status;
   }
 }
+
+/** Also for what another team owns, so that nobody learns what is there. */
+export function notFound(): Refusal {
+  return new Refusal("not-found", "There is nothing at this address, or it belongs to another team.");
+}

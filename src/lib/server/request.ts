@@ -1,6 +1,7 @@
+import { faultText } from "#lib/wire/faultText.ts";
 import type { z } from "zod";
-import { Refusal } from "./errors.ts";
-import { faultsOf, faultText } from "./faults.ts";
+import { notFound, Refusal } from "./errors.ts";
+import { faultsOf } from "./faults.ts";
 
 const bodyLimit = 1_000_000;
 
@@ -62,9 +63,9 @@ export function readQuery<Schema extends z.ZodType>(url: URL, schema: Schema): z
   return parseInput(Object.fromEntries(url.searchParams), schema);
 }
 
-/** A variable of the address, which Astro always sets on a route that has it. */
-export function pathParameter(params: Record<string, string | undefined>, name: string): string {
+/** An id in the address. One that we can never have given out names nothing, and is not looked for. */
+export function idInPath(params: Record<string, string | undefined>, name = "id"): string {
   const value = params[name];
-  if (value === undefined) throw new Error(`the route has no variable ${name}`);
+  if (value === undefined || !/^[a-z]{3}_[0-9a-z]{1,40}$/.test(value)) throw notFound();
   return value;
 }

@@ -2,6 +2,7 @@ import { z } from "zod";
 import { designatorLetters, type AnyTopology } from "#lib/circuit/index.ts";
 import { stageKinds } from "#lib/circuit/kinds/index.ts";
 import { topologySchemas } from "./calculator.ts";
+import { faultText } from "./faultText.ts";
 
 const word = z.string().min(1).max(60);
 const values = z.record(z.string(), z.union([z.number(), z.string().max(40), z.null()]));
@@ -66,7 +67,7 @@ export const stageSchema: z.ZodType<Stage, z.input<typeof looseStage>> = looseSt
 });
 
 function check<T>(context: Context, place: string, schema: z.ZodType<T>, value: unknown): T | undefined {
-  const parsed = schema.safeParse(value);
+  const parsed = schema.safeParse(value, { error: faultText });
   if (parsed.success) return parsed.data;
   for (const issue of parsed.error.issues)
     context.issues.push({ ...issue, path: [place, ...issue.path], input: value } as never);

@@ -1,4 +1,4 @@
-import { notFound } from "#lib/server/context.ts";
+import { notFound } from "#lib/server/errors.ts";
 import { problemResponse } from "#lib/server/problem.ts";
 import type { APIRoute } from "astro";
 

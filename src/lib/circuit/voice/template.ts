@@ -1,0 +1,42 @@
+import { defaultParts } from "../stage/defaults.ts";
+import type { StageKind } from "../stage/kind.ts";
+import { nextDesignator } from "./designators.ts";
+
+export interface TemplateStage {
+  /** Unique in the template; becomes the stage's id. */
+  id: string;
+  /** What the stage does in this voice. */
+  name: string;
+  kind: string;
+  topology: string;
+  targets: Record<string, number>;
+  /** Values that differ from the topology's own defaults. */
+  parts: Record<string, number>;
+}
+
+export interface VoiceTemplate {
+  id: string;
+  name: string;
+  summary: string;
+  stages: readonly TemplateStage[];
+}
+
+export interface BegunStage extends TemplateStage {
+  conditions: Record<string, number | string | null>;
+  designators: Record<string, string>;
+}
+
+/** The stages a voice begins with: all parts filled in, and each part that is fitted has a designator of its own. */
+export function beginStages(template: VoiceTemplate, kinds: readonly StageKind[]): BegunStage[] {
+  const taken = new Set<string>();
+  return template.stages.map((stage) => {
+    const topology = kinds.find(({ id }) => id === stage.kind)?.topologies.find(({ id }) => id === stage.topology);
+    if (!topology) throw new Error(`template ${template.id}: there is no ${stage.kind}/${stage.topology}`);
+    const parts = { ...defaultParts(topology), ...stage.parts };
+    const designators: Record<string, string> = {};
+    for (const [part, field] of Object.entries(topology.parts)) {
+      if ((parts[part] ?? 0) > 0) designators[part] = nextDesignator(field.partClass, taken);
+    }
+    return { ...stage, parts, conditions: {}, designators };
+  });
+}

@@ -1,0 +1,109 @@
+import { z } from "zod";
+import { stageSchema } from "./stage.ts";
+
+export const mostStages = 500;
+const mostLinks = 2000;
+
+const word = z.string().min(1).max(60);
+
+const linkEnd = z.strictObject({ stage: word, port: word });
+
+export const linkSchema = z.strictObject({ id: word, from: linkEnd, to: linkEnd });
+
+export type Link = z.infer<typeof linkSchema>;
+
+const conditionsSchema = z
+  .record(z.string().min(1).max(60), z.union([z.number(), z.string().max(60)]))
+  .refine((conditions) => Object.keys(conditions).length <= 100, { error: "At most 100 conditions." })
+  .meta({ description: "What holds for the whole voice, such as rails and temperature, in SI units" });
+
+interface Chain {
+  stages: readonly { id: string; designators?: Record<string, string> | undefined }[];
+  links: readonly Link[];
+}
+
+type Report = (path: (string | number)[], message: string) => void;
+
+function reportRepeated(ids: readonly string[], at: string, what: string, report: Report) {
+  const first = new Map<string, number>();
+  ids.forEach((id, index) => {
+    const before = first.get(id);
+    if (before === undefined) first.set(id, index);
+    else report([at, index, "id"], `${what} ${before + 1} has the id ${id} already.`);
+  });
+}
+
+/** A designator names one part of the board, so it stands once in a voice. */
+function reportSharedDesignators({ stages }: Chain, report: Report) {
+  const taken = new Map<string, string>();
+  stages.forEach((stage, index) => {
+    for (const [part, designator] of Object.entries(stage.designators ?? {})) {
+      const holder = taken.get(designator);
+      const here = `${part} of stage ${index + 1}`;
+      if (holder === undefined) taken.set(designator, here);
+      else
+        report(["stages", index, "designators", part], `${designator} is taken by ${holder}. Choose another number.`);
+    }
+  });
+}
+
+function reportLooseLinks({ stages, links }: Chain, report: Report) {
+  const known = new Set(stages.map(({ id }) => id));
+  links.forEach((link, index) => {
+    for (const end of ["from", "to"] as const) {
+      if (!known.has(link[end].stage)) {
+        report(["links", index, end, "stage"], `There is no stage ${link[end].stage} in this voice.`);
+      }
+    }
+  });
+}
+
+const format = z.literal(1).meta({ description: "Version of this document's shape" });
+
+/** A voice as it stands on the bench: its stages, what feeds what, and what holds for all of them. */
+export const workingCopyDocument = z
+  .strictObject({
+    format: format.default(1),
+    stages: z.array(stageSchema).max(mostStages),
+    links: z.array(linkSchema).max(mostLinks),
+    conditions: conditionsSchema,
+    // An answer may be sent back as it came: what the server keeps count of is taken and left aside.
+    id: z.string().max(60).optional().meta({ description: "Left aside when sent" }),
+    createdAt: z.iso.datetime().optional().meta({ description: "Left aside when sent" }),
+    updatedAt: z.iso.datetime().optional().meta({ description: "Left aside when sent" }),
+  })
+  .superRefine((document, context) => {
+    const report: Report = (path, message) => context.addIssue({ code: "custom", path, message, input: document });
+    reportRepeated(
+      document.stages.map(({ id }) => id),
+      "stages",
+      "Stage",
+      report,
+    );
+    reportRepeated(
+      document.links.map(({ id }) => id),
+      "links",
+      "Link",
+      report,
+    );
+    reportSharedDesignators(document, report);
+    reportLooseLinks(document, report);
+  });
+
+export const workingCopyAnswer = z.object({
+  id: z.string().meta({ description: "Id of the voice" }),
+  createdAt: z.iso.datetime(),
+  updatedAt: z.iso.datetime(),
+  format,
+  stages: z.array(stageSchema),
+  links: z.array(linkSchema),
+  conditions: conditionsSchema,
+});
+
+/** What is stored of a working copy. */
+export type WorkingCopyDocument = Pick<
+  z.output<typeof workingCopyDocument>,
+  "format" | "stages" | "links" | "conditions"
+>;
+
+export type WorkingCopyAnswer = z.output<typeof workingCopyAnswer>;
