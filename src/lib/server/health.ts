@@ -18,7 +18,7 @@ export async function readHealth({ db }: { db: Database }): Promise<z.infer<type
     await Promise.race([db.execute(sql`select 1`), late]);
     return { status: "ok", version, database: "ok" };
   } catch (error) {
-    log.warn({ err: error }, "the database gives no sign of life");
+    log().warn({ err: error }, "the database gives no sign of life");
     throw new Refusal("unavailable", "The server runs, but its database does not answer.", {
       members: { version, database: "unavailable" },
       headers: { "retry-after": "5" },

@@ -1,7 +1,14 @@
-import { pino } from "pino";
+import { pino, type Logger } from "pino";
+import { settings } from "./env.ts";
 
-export const log = pino({
-  name: "clatterbench",
-  level: "info",
-  redact: ["*.password", "*.token", "headers.cookie", "headers.authorization"],
-});
+let made: Logger | undefined;
+
+/** The log of this process. Made at first use, so that a build needs no settings. */
+export function log(): Logger {
+  made ??= pino({
+    name: "clatterbench",
+    level: settings().LOG_LEVEL,
+    redact: ["*.password", "*.token", "headers.cookie", "headers.authorization"],
+  });
+  return made;
+}

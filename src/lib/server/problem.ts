@@ -26,7 +26,7 @@ function isUnreachable(error: unknown): boolean {
 /** Turns whatever was thrown into a refusal. Text of unforeseen errors goes to the log and never to the user. */
 export function toRefusal(error: unknown): Refusal {
   if (error instanceof Refusal) return error;
-  log.error({ err: error }, "a request failed");
+  log().error({ err: error }, "a request failed");
   if (isUnreachable(error)) {
     return new Refusal(
       "unavailable",

@@ -62,7 +62,7 @@ export function gate({ files, application, ...reached }: Gate): RequestListener 
 
   return (request, response) => {
     admit(request, response).catch((error: unknown) => {
-      log.error({ err: error }, "a request failed before the application");
+      log().error({ err: error }, "a request failed before the application");
       if (response.headersSent) response.destroy();
       else
         refuse(

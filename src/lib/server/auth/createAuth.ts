@@ -154,7 +154,7 @@ export function createAuth({ db, mailer, settings }: { db: Database; mailer: Mai
     ],
     logger: {
       level: "warn",
-      log: (level, message, ...details) => log[level === "error" ? "error" : "warn"]({ details }, message),
+      log: (level, message, ...details) => log()[level === "error" ? "error" : "warn"]({ details }, message),
     },
     telemetry: { enabled: false },
   });
