@@ -2,7 +2,7 @@
 // since it runs before any package is there.
 import { spawn } from "node:child_process";
 import { createHash } from "node:crypto";
-import { existsSync, readdirSync, readFileSync, statSync, writeFileSync } from "node:fs";
+import { existsSync, readdirSync, readFileSync, rmSync, statSync, writeFileSync } from "node:fs";
 import { join } from "node:path";
 import { withLock } from "../../docker-less-db/lock.mjs";
 import { checkout, ensureStateFolder } from "../../docker-less-db/place.mjs";
@@ -94,6 +94,7 @@ export async function ensureBuild(folder, signal) {
     const hash = hashOfInputs();
     if (isCurrent(hash)) return;
     console.log("Building …");
+    rmSync(stamp, { force: true });
     const astro = join("node_modules", "astro", "astro.js");
     const env = { OUT_DIR: folder, ASTRO_TELEMETRY_DISABLED: "1", NODE_ENV: "production" };
     await run(process.execPath, [astro, "build", "--silent"], { signal, env, label: "The build" });

@@ -1,5 +1,5 @@
 import { readdirSync, readFileSync } from "node:fs";
-import { request as httpRequest } from "node:http";
+import { request as httpRequest, type IncomingMessage } from "node:http";
 import { connect } from "node:net";
 import { join } from "node:path";
 import postgres from "postgres";
@@ -42,6 +42,27 @@ describe("the server before the application", () => {
     expect(answer.status).toBe(403);
     expect(await answer.json()).toMatchObject({ status: 403, type: "urn:clatterbench:problem:cross-site" });
   });
+
+  test.each(["TRACE", "PROPFIND"])("takes no %s", async (method) => {
+    const answer = await new Promise<IncomingMessage>((resolve, reject) => {
+      httpRequest(`${app.url}/api/health`, { method }, resolve).once("error", reject).end();
+    });
+    answer.resume();
+    expect(answer.statusCode).toBe(405);
+    expect(answer.headers.allow).toContain("GET");
+  });
+
+  test.each(["/%E0%A4%A", "/%00", "//evil.example.org", "/_astro/%2e%2e/%2e%2e/package.json", "/api/%ff"])(
+    "does not break down at the address %s",
+    async (path) => {
+      const answer = await new Promise<IncomingMessage>((resolve, reject) => {
+        const { hostname, port } = new URL(app.url);
+        httpRequest({ hostname, port, path }, resolve).once("error", reject).end();
+      });
+      answer.resume();
+      expect([400, 404]).toContain(answer.statusCode);
+    },
+  );
 
   test("lets built files be kept for ever and nothing else", async () => {
     const file = readdirSync(assets).find((name) => name.endsWith(".css")) ?? "";

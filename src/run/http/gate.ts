@@ -12,6 +12,9 @@ export type Application = (request: IncomingMessage, response: ServerResponse) =
 /** Half as much again as the largest body an endpoint reads, so that an endpoint answers for its own limit. */
 export const bodyLimit = 1.5 * 1024 * 1024;
 
+// A Request of the web platform cannot be made of the others, TRACE among them.
+const methods = new Set(["GET", "HEAD", "POST", "PUT", "PATCH", "DELETE", "OPTIONS"]);
+
 export interface Gate extends Reached {
   files: FileServer;
   application: Application;
@@ -26,6 +29,12 @@ export function gate({ files, application, ...reached }: Gate): RequestListener 
   ) => void;
 
   async function admit(request: IncomingMessage, response: ServerResponse) {
+    if (!methods.has(request.method ?? "")) {
+      discardBody(request);
+      response.setHeader("Allow", [...methods].join(", "));
+      refuse(request, response, "method-not-allowed", `No address here takes ${request.method}.`);
+      return;
+    }
     vouchForHeaders(request, reached);
     if (isForgedWrite(request)) {
       discardBody(request);
