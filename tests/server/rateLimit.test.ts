@@ -30,6 +30,15 @@ describe("the limit on calculations", () => {
     expect(spend(5, "b")).toEqual([]);
   });
 
+  test("takes what a calculation costs, and never more than a full minute's worth", () => {
+    let time = 0;
+    const limit = createRateLimit({ perMinute: 60, now: () => time });
+    expect(limit.take("a", 50)).toBe(0);
+    expect(limit.take("a", 50)).toBe(40);
+    time = 60_000;
+    expect(limit.take("a", 500)).toBe(0);
+  });
+
   test("told 0, lets everything through", () => {
     expect(limitOf(0).spend(20_001)).toEqual([]);
   });

@@ -14,7 +14,7 @@ const common = {
   DATABASE_CONNECTIONS: count(10, 500).refine((value) => value > 0, "at least 1"),
   BETTER_AUTH_SECRET: z.string().min(32, "give at least 32 random characters (openssl rand -base64 32)"),
   TRUST_PROXY: count(0, 10),
-  RATE_LIMIT_CALCULATORS: count(600, 1_000_000),
+  RATE_LIMIT_CALCULATORS: count(60_000, 10_000_000),
   RATE_LIMIT_ACCOUNTS: count(30, 1_000_000),
   LOG_LEVEL: z.enum(["fatal", "error", "warn", "info", "debug", "trace", "silent"]).default("info"),
   OUT_DIR: z.string().default("dist"),

@@ -1,6 +1,6 @@
 export interface RateLimit {
   /** Seconds to wait, or 0 when the request may pass. */
-  take(address: string): number;
+  take(address: string, cost?: number): number;
 }
 
 interface Bucket {
@@ -20,19 +20,21 @@ export function createRateLimit({ perMinute, now }: { perMinute: number; now: ()
   const perMillisecond = perMinute / 60_000;
 
   return {
-    take(address) {
+    take(address, cost = 1) {
       const at = now();
       const bucket = buckets.get(address);
       const tokens = bucket ? Math.min(perMinute, bucket.tokens + (at - bucket.at) * perMillisecond) : perMinute;
       // Taken out and put back at the end, so that the map stays ordered by last use and the stalest goes first.
       buckets.delete(address);
-      const allowed = tokens >= 1;
-      buckets.set(address, { tokens: allowed ? tokens - 1 : tokens, at });
+      // What costs more than a whole minute's worth passes on a full bucket, or it would never pass at all.
+      const price = Math.min(cost, perMinute);
+      const allowed = tokens >= price;
+      buckets.set(address, { tokens: allowed ? tokens - price : tokens, at });
       if (buckets.size > mostAddresses) {
         const [stalest] = buckets.keys();
         if (stalest !== undefined) buckets.delete(stalest);
       }
-      return allowed ? 0 : Math.max(1, Math.ceil((1 - tokens) / perMillisecond / 1000));
+      return allowed ? 0 : Math.max(1, Math.ceil((price - tokens) / perMillisecond / 1000));
     },
   };
 }

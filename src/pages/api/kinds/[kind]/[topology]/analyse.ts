@@ -3,6 +3,7 @@ import { methodNotAllowed } from "#lib/server/answer.ts";
 import { calculator } from "#lib/server/calculators/calculate.ts";
 
 export const POST = calculator(
+  "analyse",
   (schemas) => schemas.analyse,
   (topology, input) => {
     const { results, warnings, state } = analyseStage(topology, input);

@@ -3,6 +3,7 @@ import { methodNotAllowed } from "#lib/server/answer.ts";
 import { calculator } from "#lib/server/calculators/calculate.ts";
 
 export const POST = calculator(
+  "curves",
   (schemas) => schemas.curves,
   (topology, input) => ({ curves: plotStage(topology, input) }),
 );

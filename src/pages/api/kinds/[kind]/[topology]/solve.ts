@@ -4,6 +4,7 @@ import { calculator } from "#lib/server/calculators/calculate.ts";
 import { Refusal } from "#lib/server/errors.ts";
 
 export const POST = calculator(
+  "solve",
   (schemas) => schemas.solve,
   (topology, input) => {
     const solution = solveStage(topology, input);
