@@ -1,8 +1,8 @@
 import { zodResolver } from "@hookform/resolvers/zod";
 import { useState } from "react";
 import { useForm } from "react-hook-form";
-import { z } from "zod";
 import { failureText, request } from "#lib/client/request.ts";
+import { newVoice } from "#lib/wire/voice.ts";
 import { FormMessage } from "../forms/FormMessage.tsx";
 import { SubmitButton } from "../forms/SubmitButton.tsx";
 import { TextField } from "../forms/TextField.tsx";
@@ -17,16 +17,11 @@ const templates = [
   { id: "struck-tone", label: "Struck tone", holds: "A trigger rings a resonator, then the output driver" },
 ] as const;
 
-const entrySchema = z.strictObject({
-  name: z.string().trim().min(1, "Type a name for the voice.").max(120, "Use at most 120 characters."),
-  template: z.enum(["empty", "two-path-noise", "struck-tone"]),
-});
-
 export function NewVoiceForm() {
   const [failure, setFailure] = useState<string | null>(null);
-  const form = useForm<z.infer<typeof entrySchema>>({
-    resolver: zodResolver(entrySchema),
-    defaultValues: { name: "", template: "empty" as const },
+  const form = useForm({
+    resolver: zodResolver(newVoice),
+    defaultValues: { name: "", template: "empty" },
   });
   const { errors, isSubmitting } = form.formState;
 

@@ -1,19 +1,15 @@
 import { zodResolver } from "@hookform/resolvers/zod";
 import { useState } from "react";
 import { useForm } from "react-hook-form";
-import { z } from "zod";
 import { failureText, request } from "#lib/client/request.ts";
+import { voiceChange } from "#lib/wire/voice.ts";
 import { FormMessage } from "../forms/FormMessage.tsx";
 import { SubmitButton } from "../forms/SubmitButton.tsx";
 import { TextField } from "../forms/TextField.tsx";
 
-const entrySchema = z.strictObject({
-  name: z.string().trim().min(1, "Type a name for the voice.").max(120, "Use at most 120 characters."),
-});
-
 export function RenameVoice({ voiceId, name }: { voiceId: string; name: string }) {
   const [failure, setFailure] = useState<string | null>(null);
-  const form = useForm({ resolver: zodResolver(entrySchema), defaultValues: { name } });
+  const form = useForm({ resolver: zodResolver(voiceChange), defaultValues: { name } });
   const { errors, isSubmitting } = form.formState;
 
   const send = form.handleSubmit(async (entries) => {

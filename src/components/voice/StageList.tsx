@@ -60,7 +60,7 @@ export function StageList({ voiceId, rows, copy, editable }: StageListProps) {
           its parts carry reference designators.
         </p>
       ) : (
-        <table className="table stage-list">
+        <table className="table table-stacks">
           <thead>
             <tr>
               <th scope="col">Stage</th>

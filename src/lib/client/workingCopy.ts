@@ -1,17 +1,7 @@
+import type { Stage } from "#lib/wire/stage.ts";
 import { request, type Fault } from "./request.ts";
 
-/** A stage as it is kept; the island that draws it knows the finer type of its kind. */
-export interface StoredStage {
-  id: string;
-  kind: string;
-  topology: string;
-  name: string;
-  parts: Record<string, number>;
-  conditions: Record<string, unknown>;
-  targets: Record<string, unknown>;
-  windows?: Record<string, unknown>;
-  designators: Record<string, string>;
-}
+export type StoredStage = Stage;
 
 export interface StoredLink {
   id: string;
@@ -40,6 +30,12 @@ export type SaveOutcome =
   | { kind: "refused"; detail: string; errors: Fault[] };
 
 const pathOf = (voiceId: string) => `/api/voices/${encodeURIComponent(voiceId)}/working-copy`;
+
+/** Null where it could not be read, for whatever reason. */
+export async function readWorkingCopy(voiceId: string): Promise<WorkingCopy | null> {
+  const answer = await request<WorkingCopyDocument>(pathOf(voiceId));
+  return answer.kind === "done" && answer.etag !== null ? { etag: answer.etag, document: answer.body } : null;
+}
 
 /** The newer copy that the server sends along when it refuses a stale one. */
 function copyIn(current: unknown, etag: string | null): WorkingCopy | null {

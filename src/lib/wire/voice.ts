@@ -5,8 +5,8 @@ import { z } from "zod";
 export const voiceName = z
   .string()
   .trim()
-  .min(1)
-  .max(120)
+  .min(1, "Type a name for the voice.")
+  .max(120, "Use at most 120 characters.")
   .refine((text) => !/\p{Cc}/u.test(text), { error: "Leave out line breaks and other control characters." })
   .meta({ description: "Name of the voice, 1 to 120 characters" });
 
