@@ -19,7 +19,8 @@ const outDir = process.env.OUT_DIR ?? "dist";
 export async function startApp(settings: Record<string, string> = {}): Promise<RunningApp> {
   if (!existsSync(join(outDir, "server", "entry.mjs")))
     throw new Error(`There is no build in ${outDir}: npm run build makes one.`);
-  const { PUBLIC_URL: _, ...inherited } = process.env;
+  // Told that it is being tested, the sign-in would leave out its checks of where a request comes from.
+  const { PUBLIC_URL: _, NODE_ENV: __, TEST: ___, ...inherited } = process.env;
   const child = spawn(process.execPath, ["--import", "tsx", "src/run/serve.ts"], {
     env: { ...inherited, HOST: "127.0.0.1", PORT: "0", OUT_DIR: outDir, ...settings },
     stdio: ["ignore", "pipe", "pipe", "ipc"],

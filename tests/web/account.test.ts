@@ -133,6 +133,7 @@ describe("signing in", () => {
       clientOf(app.url).request("POST", "/api/auth/sign-in/email", { json, headers: { origin } });
     expect((await from(app.url)).status).toBe(200);
     expect((await from("https://elsewhere.test")).status).toBe(403);
+    expect((await from("null")).status).toBe(403);
   });
 
   test("ends with signing out", async () => {

@@ -1,9 +1,9 @@
 import { answer } from "#lib/server/answer.ts";
 import { auth } from "#lib/server/auth/index.ts";
-import { withPeer } from "#lib/server/auth/peer.ts";
+import { vouchedRequest } from "#lib/server/auth/peer.ts";
 import { asProblem } from "#lib/server/auth/asProblem.ts";
 
 /** better-auth's own interface: sign-up, sign-in, verification, teams, members, invitations. */
 export const ALL = answer(async ({ request, clientAddress }) =>
-  asProblem(await auth().handler(withPeer(request, clientAddress))),
+  asProblem(await auth().handler(vouchedRequest(request, clientAddress))),
 );
