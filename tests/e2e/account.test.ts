@@ -118,6 +118,6 @@ test("without JavaScript the pages read, and navigation and sign-out need none",
   await page.goto(`${app.url}/sign-in`);
   expect(await page.locator("noscript").textContent()).toContain("Signing in needs JavaScript.");
   await page.getByLabel("E-mail").waitFor();
-  expect(await page.getByLabel("Theme").count()).toBe(0);
+  expect(await page.getByLabel("Theme").isVisible()).toBe(false);
   await close();
 });
