@@ -1,5 +1,6 @@
 import { z } from "zod";
-import { acceptedRange, formatTyped, parseQuantity, type NumberField } from "#lib/circuit/index.ts";
+import { acceptedRange, parseQuantity, type NumberField } from "#lib/circuit/index.ts";
+import { rangeFault } from "./rangeFault.ts";
 
 /** A figure as it may be sent: a number in SI base units, or text in engineering or IEC 60062 notation. */
 const written = z
@@ -18,16 +19,6 @@ export function quantitySchema(field: NumberField): z.ZodType<number, number | s
       return z.NEVER;
     })
     .meta({ title: field.label, description: describe(field) });
-}
-
-/** Why a figure cannot be computed with, worded for the person who gave it; undefined where it can. */
-export function rangeFault(field: NumberField, value: number, least: number, most: number): string | undefined {
-  if (value >= least && value <= most) return undefined;
-  if (value <= 0 && least >= 0 && field.scale === "logarithmic") {
-    return field.least > 0 ? "This must be more than zero." : "This cannot be negative.";
-  }
-  const bound = (at: number) => `${formatTyped(at, field.unit)}${field.unit}`;
-  return `This must lie between ${bound(least)} and ${bound(most)}.`;
 }
 
 function describe(field: NumberField): string {

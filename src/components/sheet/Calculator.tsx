@@ -1,0 +1,65 @@
+import { useCallback, useEffect, useRef, useState } from "react";
+import { stageKinds } from "#lib/circuit/kinds/index.ts";
+import { writeAddress } from "#lib/wire/stageAddress.ts";
+import type { StageState } from "#lib/wire/stageState.ts";
+import { SaveToVoice } from "./SaveToVoice.tsx";
+import { StageSheet } from "./StageSheet.tsx";
+import { topologyOf } from "./useStage.ts";
+
+interface CalculatorProps {
+  kind: string;
+  initial: StageState;
+  signedIn: boolean;
+}
+
+/** Browsers refuse more than about a hundred address changes in half a minute. */
+const pause = 350;
+
+/** The public calculator: a stage sheet whose state stands in the page's address, so that a link shares it. */
+export function Calculator({ kind: kindId, initial, signedIn }: CalculatorProps) {
+  const kind = stageKinds.find(({ id }) => id === kindId)!;
+  const [state, setState] = useState(initial);
+  const [saving, setSaving] = useState(false);
+  const timer = useRef<ReturnType<typeof setTimeout>>(undefined);
+  const topology = topologyOf(kind, state.topology);
+  const address = `/calculators/${kind.id}?${writeAddress(topology, state)}`;
+
+  const onChange = useCallback(
+    (next: StageState) => {
+      setState(next);
+      clearTimeout(timer.current);
+      timer.current = setTimeout(() => {
+        const query = writeAddress(topologyOf(kind, next.topology), next);
+        window.history.replaceState(window.history.state, "", `?${query}`);
+      }, pause);
+    },
+    [kind],
+  );
+  useEffect(() => () => clearTimeout(timer.current), []);
+
+  return (
+    <StageSheet
+      kind={kindId}
+      initial={initial}
+      onChange={onChange}
+      actions={
+        signedIn ? (
+          <button
+            type="button"
+            className="btn btn-primary needs-js"
+            aria-expanded={saving}
+            onClick={() => setSaving(!saving)}
+          >
+            Save to a voice
+          </button>
+        ) : (
+          <a className="btn btn-primary" href={`/sign-in?next=${encodeURIComponent(address)}`}>
+            Sign in to save to a voice
+          </a>
+        )
+      }
+    >
+      {saving && <SaveToVoice kind={kind} topology={topology} state={state} />}
+    </StageSheet>
+  );
+}

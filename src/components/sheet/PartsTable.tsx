@@ -1,0 +1,177 @@
+import { formatPartValue, formatQuantity, formatTyped, seriesNames, type PartField } from "#lib/circuit/index.ts";
+import { stepPart } from "#lib/client/stage/stepping.ts";
+import { partText, readFigure } from "#lib/wire/figureText.ts";
+import { seriesOf, type SeriesChoice } from "#lib/wire/stageState.ts";
+import { FieldNote } from "./FieldNote.tsx";
+import { QuantityInput } from "./QuantityInput.tsx";
+import { SymbolText } from "./SymbolText.tsx";
+import type { Stage } from "./useStage.ts";
+
+interface PartsTableProps {
+  stage: Stage;
+  id: string;
+  designators: Record<string, string>;
+  readOnly: boolean;
+  /** Tells which part's field has the focus, so that the network can show it. */
+  onLit: (part: string | undefined) => void;
+}
+
+/** The parts: what the targets call for exactly, and what is chosen. */
+export function PartsTable({ stage, id, designators, readOnly, onLit }: PartsTableProps) {
+  const { topology, telling, exact, moves } = stage;
+  const entries = Object.entries(topology.parts);
+  if (entries.length === 0) return <p className="text-ink-2">This network has no parts of its own to choose.</p>;
+  const result = topology.results[telling]!;
+  const anyMoves = Object.keys(moves).length > 0;
+  return (
+    <>
+      <table className="table parts-table">
+        <thead>
+          <tr>
+            <th scope="col">Part</th>
+            <th scope="col" className="right">
+              Exact
+            </th>
+            <th scope="col" className="right">
+              Chosen
+            </th>
+            <th scope="col" className="right">
+              Tolerance
+            </th>
+            {anyMoves && (
+              <th scope="col" className="right only-wide">
+                Moves <SymbolText symbol={result.symbol} />
+              </th>
+            )}
+          </tr>
+        </thead>
+        <tbody>
+          {entries.map(([key, field]) => (
+            <PartRow
+              key={key}
+              stage={stage}
+              part={key}
+              field={field}
+              id={`${id}-${key}`}
+              designator={designators[key]}
+              exact={exact?.[key]}
+              moves={anyMoves ? (moves[key] ?? null) : undefined}
+              readOnly={readOnly}
+              onLit={onLit}
+            />
+          ))}
+        </tbody>
+      </table>
+      <FieldNote
+        control={stage.form.control}
+        names={entries.map(([key]) => `parts.${key}` as const)}
+        id={`${id}-note`}
+        hint={
+          readOnly
+            ? undefined
+            : "↑ ↓ step along the series, with Shift by ten." +
+              (anyMoves ? ` “Moves”: per cent of ${result.label.toLowerCase()} for one per cent of the part.` : "")
+        }
+        inForce="the last value that could be read"
+      />
+    </>
+  );
+}
+
+interface PartRowProps {
+  stage: Stage;
+  part: string;
+  field: PartField;
+  id: string;
+  designator: string | undefined;
+  exact: number | undefined;
+  /** Null where this part has none, undefined where no part has. */
+  moves: number | null | undefined;
+  readOnly: boolean;
+  onLit: (part: string | undefined) => void;
+}
+
+function PartRow({ stage, part, field, id, designator, exact, moves, readOnly, onLit }: PartRowProps) {
+  const { state, form, actions } = stage;
+  const value = state.parts[part]!;
+  const series = seriesOf(field.partClass, state.series);
+  return (
+    <tr>
+      <th scope="row">
+        <label htmlFor={id}>
+          <span className="val part-mark">{designator ?? <SymbolText symbol={field.symbol} />}</span>{" "}
+          <span className="text-ink-2">{field.label}</span>
+        </label>
+      </th>
+      <td className="right val dim">{exactText(exact, field)}</td>
+      <td className="right">
+        <QuantityInput
+          control={form.control}
+          name={`parts.${part}`}
+          id={id}
+          className="input input-cell"
+          read={(text) => readFigure(text, field)}
+          print={(figure) => partText(figure, field.unit)}
+          step={(direction, count) => stepPart(value, field, series, direction, count)}
+          onValue={(figure) => actions.set("parts", part, figure)}
+          onFocus={() => onLit(part)}
+          onBlur={() => onLit(undefined)}
+          describedBy={`${id.slice(0, -part.length - 1)}-note`}
+          readOnly={readOnly}
+        />
+      </td>
+      <td className="right text-ink-2">± {Number((field.tolerance * 100).toPrecision(3))} %</td>
+      {moves !== undefined && (
+        <td className="right text-ink-2 only-wide">{moves === null ? "–" : formatQuantity(moves, "dB").replace(/\u00a0dB$/, "")}</td>
+      )}
+    </tr>
+  );
+}
+
+function exactText(exact: number | undefined, field: PartField): string {
+  if (exact === undefined) return "–";
+  if (exact === 0) return "not fitted";
+  const marked = formatPartValue(exact, field.unit);
+  return partIsPlain(exact, marked, field) ? marked : formatTyped(exact, field.unit, 4);
+}
+
+/** A decided part's exact value is its own: shown in the same hand. */
+const partIsPlain = (exact: number, marked: string, field: PartField) => {
+  const reading = readFigure(marked, field);
+  return reading.ok && reading.value === exact;
+};
+
+interface SeriesChoosersProps {
+  stage: Stage;
+  id: string;
+}
+
+/** Which preferred series resistors and capacitors are taken from. */
+export function SeriesChoosers({ stage, id }: SeriesChoosersProps) {
+  const { topology, state, actions } = stage;
+  const classes = new Set(Object.values(topology.parts).map(({ partClass }) => partClass));
+  const offered = (["resistor", "capacitor"] as const).filter((name) => classes.has(name));
+  return (
+    <span className="series-choosers">
+      {offered.map((name) => (
+        <span key={name}>
+          <label htmlFor={`${id}-${name}`}>{name === "resistor" ? "Resistors" : "Capacitors"}</label>
+          <select
+            id={`${id}-${name}`}
+            className="select-plain"
+            value={state.series[name]}
+            onChange={(event) =>
+              actions.setSeries({ ...state.series, [name]: event.target.value as SeriesChoice[typeof name] })
+            }
+          >
+            {seriesNames.map((series) => (
+              <option key={series} value={series}>
+                {series}
+              </option>
+            ))}
+          </select>
+        </span>
+      ))}
+    </span>
+  );
+}

@@ -1,0 +1,113 @@
+import { useDeferredValue, useId, useState, type ReactNode } from "react";
+import { stageKinds } from "#lib/circuit/kinds/index.ts";
+import type { StageState } from "#lib/wire/stageState.ts";
+import "../../styles/stage.css";
+import "../../styles/plot.css";
+import { NetworkDrawing } from "../network/NetworkDrawing.tsx";
+import { Candidates } from "./Candidates.tsx";
+import { Conditions } from "./Conditions.tsx";
+import { Curves } from "./Curves.tsx";
+import { PartsTable, SeriesChoosers } from "./PartsTable.tsx";
+import { ResultsTable } from "./ResultsTable.tsx";
+import { Targets } from "./Targets.tsx";
+import { useStage } from "./useStage.ts";
+import { Warnings } from "./Warnings.tsx";
+
+export interface StageSheetProps {
+  /** Id of a stage kind in the registry. */
+  kind: string;
+  initial: StageState;
+  /** Told of every change, with values that can be computed with. */
+  onChange?: ((state: StageState) => void) | undefined;
+  /** By part, where the stage stands in a voice. */
+  designators?: Record<string, string> | undefined;
+  readOnly?: boolean;
+  /** Heading and aside of the sheet; the topology's own where left out. */
+  name?: string;
+  /** Buttons at the right of the heading. */
+  actions?: ReactNode;
+  /** Between the heading and the columns: how a save went. */
+  children?: ReactNode;
+}
+
+/** One stage as the work goes: targets, parts, results, curves, and what the figures leave out. */
+export function StageSheet({ kind: kindId, initial, onChange, ...props }: StageSheetProps) {
+  const { designators = {}, readOnly = false, name, actions, children } = props;
+  const kind = stageKinds.find(({ id }) => id === kindId)!;
+  const stage = useStage(kind, initial, { onChange });
+  const { topology, state } = stage;
+  const drawn = useDeferredValue(state);
+  const [lit, setLit] = useState<string>();
+  const [open, setOpen] = useState(false);
+  const [keep, setKeep] = useState(false);
+  const id = useId();
+  const canSolve = !readOnly && Object.keys(topology.targets).length > 0 && Object.keys(topology.parts).length > 0;
+  const fileName = `${kind.id}-${topology.id}`;
+
+  return (
+    <div className="sheet stage">
+      <div className="sheet-head">
+        <h2>{name ?? topology.name}</h2>
+        <p className="aside">{name === undefined ? topology.summary : `${kind.name}, ${topology.name.toLowerCase()}`}</p>
+        {actions !== undefined && <div className="act">{actions}</div>}
+      </div>
+      {children}
+      <div className="stage-cols">
+        <section className="stage-targets" aria-labelledby={`${id}-targets`}>
+          <h3 id={`${id}-targets`}>Targets</h3>
+          <Targets stage={stage} id={`${id}-target`} readOnly={readOnly} />
+          <Conditions stage={stage} id={`${id}-condition`} readOnly={readOnly} />
+        </section>
+        <section className="stage-parts" aria-labelledby={`${id}-parts`}>
+          <h3 id={`${id}-parts`}>Parts</h3>
+          <PartsTable stage={stage} id={`${id}-part`} designators={designators} readOnly={readOnly} onLit={setLit} />
+          {canSolve && (
+            <div className="parts-foot needs-js no-print">
+              <button
+                type="button"
+                className="btn"
+                aria-expanded={open}
+                aria-controls={`${id}-candidates`}
+                onClick={() => setOpen(!open)}
+              >
+                Work out parts
+              </button>
+              <SeriesChoosers stage={stage} id={`${id}-series`} />
+            </div>
+          )}
+        </section>
+        <div id={`${id}-candidates`} className="stage-candidates-place" hidden={!open}>
+          {open && (
+            <Candidates
+              stage={stage}
+              id={`${id}-candidate`}
+              keep={keep}
+              onKeep={setKeep}
+              onClose={() => setOpen(false)}
+              designators={designators}
+            />
+          )}
+        </div>
+        <section className="stage-results" aria-labelledby={`${id}-results`}>
+          <h3 id={`${id}-results`}>Results</h3>
+          <ResultsTable stage={stage} />
+          <Warnings warnings={stage.analysis.warnings} />
+        </section>
+      </div>
+      <section className="stage-curves" aria-label="Curves and network">
+        <Curves topology={topology} state={drawn} fileName={fileName} />
+        <figure className="plot" aria-labelledby={`${id}-network`}>
+          <figcaption className="plot-head">
+            <h3 id={`${id}-network`}>Network</h3>
+          </figcaption>
+          <NetworkDrawing topology={topology} parts={state.parts} designators={designators} lit={lit} />
+        </figure>
+      </section>
+      {topology.leavesOut.length > 0 && (
+        <p className="sheet-foot">
+          <strong>Left out of these figures:</strong> {topology.leavesOut.join("; ")}.
+        </p>
+      )}
+    </div>
+  );
+}

@@ -1,0 +1,16 @@
+import type { Warning } from "#lib/circuit/index.ts";
+
+const words = { note: "Note.", caution: "Caution.", fault: "Fault." } as const;
+
+/** What the stage has to say about its own figures; announced when it changes. */
+export function Warnings({ warnings }: { warnings: readonly Warning[] }) {
+  return (
+    <div className="warnings" aria-live="polite">
+      {warnings.map((warning) => (
+        <p key={warning.code + warning.message} className={warning.severity}>
+          <strong>{words[warning.severity]}</strong> {warning.message}
+        </p>
+      ))}
+    </div>
+  );
+}

@@ -1,0 +1,81 @@
+import { useCallback, useMemo, useState } from "react";
+import { useForm } from "react-hook-form";
+import {
+  analyseStage,
+  designExactly,
+  isRefusal,
+  sensitivities,
+  type AnyTopology,
+  type PlainValues,
+  type StageKind,
+} from "#lib/circuit/index.ts";
+import { partText } from "#lib/wire/figureText.ts";
+import { decidedParts, idealConditions, type SeriesChoice, type StageState } from "#lib/wire/stageState.ts";
+import { fieldsOf, type StageFields } from "./fields.ts";
+
+export type Stage = ReturnType<typeof useStage>;
+
+interface StageWatcher {
+  /** Told of every change. */
+  onChange?: ((state: StageState) => void) | undefined;
+  /** Lets a change bring others with it: parts that follow their targets. */
+  settle?: (next: StageState, before: StageState) => StageState;
+}
+
+/** A stage being worked on: what stands in its fields, the values in force, and everything that follows from them. */
+export function useStage(kind: StageKind, initial: StageState, { onChange, settle }: StageWatcher = {}) {
+  const topology = topologyOf(kind, initial.topology);
+  const [state, setState] = useState(initial);
+  const form = useForm<StageFields>({ defaultValues: fieldsOf(topology, initial), mode: "onChange" });
+
+  const change = useCallback(
+    (wanted: StageState) => {
+      const next = settle?.(wanted, state) ?? wanted;
+      setState(next);
+      onChange?.(next);
+    },
+    [onChange, settle, state],
+  );
+  const { setValue } = form;
+  const actions = useMemo(
+    () => ({
+      set: (group: "targets" | "windows" | "parts", key: string, value: number) =>
+        change({ ...state, [group]: { ...state[group], [key]: value } }),
+      setCondition: (key: string, value: number | string | null) =>
+        change({ ...state, conditions: { ...state.conditions, [key]: value } }),
+      setSeries: (series: SeriesChoice) => change({ ...state, series }),
+      takeParts: (parts: PlainValues) => {
+        for (const [key, field] of Object.entries(topology.parts)) {
+          setValue(`parts.${key}`, partText(parts[key]!, field.unit), { shouldValidate: true });
+        }
+        change({ ...state, parts });
+      },
+    }),
+    [change, setValue, state, topology],
+  );
+
+  const analysis = useMemo(() => analyseStage(topology, state), [topology, state]);
+  const ideal = useMemo(() => {
+    const { conditions, differs } = idealConditions(topology, state.conditions);
+    return differs ? analyseStage(topology, { parts: state.parts, conditions }).results : undefined;
+  }, [topology, state.conditions, state.parts]);
+  const design = useMemo(
+    () =>
+      Object.keys(topology.targets).length === 0
+        ? undefined
+        : designExactly(topology, state.targets, state.conditions, decidedParts(topology, state.parts)),
+    [topology, state.targets, state.conditions, state.parts],
+  );
+  const telling = kind.telling[0];
+  const moves = useMemo(
+    () => sensitivities(topology, state.parts, state.conditions, telling),
+    [topology, state.parts, state.conditions, telling],
+  );
+  const refusal = design && isRefusal(design) ? design : undefined;
+  const exact = design && !isRefusal(design) ? design : undefined;
+  return { kind, topology, state, form, actions, analysis, ideal, exact, refusal, moves, telling };
+}
+
+export function topologyOf(kind: StageKind, id: string): AnyTopology {
+  return kind.topologies.find((topology) => topology.id === id) ?? kind.topologies[0]!;
+}
