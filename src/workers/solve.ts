@@ -15,9 +15,7 @@ export interface SolveReply {
 
 // Some hundred exact analyses take longer than a frame, so they are done here, beside the page.
 self.addEventListener("message", ({ data }: MessageEvent<SolveTask>) => {
-  const topology = stageKinds
-    .find(({ id }) => id === data.kind)
-    ?.topologies.find(({ id }) => id === data.topology);
+  const topology = stageKinds.find(({ id }) => id === data.kind)?.topologies.find(({ id }) => id === data.topology);
   const reply: SolveReply = { id: data.id, outcome: topology ? solveStage(topology, data.request) : null };
   self.postMessage(reply);
 });

@@ -2,10 +2,10 @@
 export function SymbolTspans({ symbol }: { symbol: string }) {
   const [base, ...rest] = symbol.split("_");
   const low = rest.join("");
-  if (low === "") return base;
+  if (low === "") return <tspan>{base}</tspan>;
   return (
     <>
-      {base}
+      <tspan>{base}</tspan>
       <tspan className="low" dy="3">
         {low}
       </tspan>

@@ -17,8 +17,7 @@ const scaleOf = (axis: PlotAxis) => (axis.scale === "logarithmic" ? "log" : "lin
 /** The plot that answers pointer and keyboard. Loaded after the page, since its library is larger than all the rest. */
 export default function InteractivePlot({ model, room, at, onPoint }: InteractivePlotProps) {
   const data = useMemo(
-    () =>
-      model.xs.map((x, i) => ({ x, ...Object.fromEntries(model.lines.map((line) => [line.id, line.ys[i]])) })),
+    () => model.xs.map((x, i) => ({ x, ...Object.fromEntries(model.lines.map((line) => [line.id, line.ys[i]])) })),
     [model],
   );
   const [x1, x2] = model.window?.x ?? model.x.domain;

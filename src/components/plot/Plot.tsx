@@ -55,13 +55,20 @@ export function Plot({ topology, curve, stage, fileName, empty }: PlotProps) {
             <Cursor model={model} at={at} onMove={setAt} label={`${curve.name}: point along the curve`} />
           </>
         ) : (
-          <p className="plot-empty">{empty ?? `No curve: with these values ${curve.name.toLowerCase()} has no figure to draw. Change a part or a target.`}</p>
+          <p className="plot-empty">
+            {empty ??
+              `No curve: with these values ${curve.name.toLowerCase()} has no figure to draw. Change a part or a target.`}
+          </p>
         )}
       </div>
       {model && (
         <>
           <p className="plot-readout" aria-hidden="true">
-            {at === null ? <span className="dim">Point at the curve, or focus it and press ← →</span> : readout(model, at)}
+            {at === null ? (
+              <span className="dim">Point at the curve, or focus it and press ← →</span>
+            ) : (
+              readout(model, at)
+            )}
           </p>
           <PlotFigures model={model} />
         </>
@@ -170,9 +177,9 @@ function useWidth(box: React.RefObject<HTMLDivElement | null>): number | null {
 }
 
 /** Fetches the plotting library once the plot comes near the screen. */
-function useInteractivePlot(box: React.RefObject<HTMLDivElement | null>): ComponentType<
-  React.ComponentProps<typeof InteractivePlotType>
-> | null {
+function useInteractivePlot(
+  box: React.RefObject<HTMLDivElement | null>,
+): ComponentType<React.ComponentProps<typeof InteractivePlotType>> | null {
   const [loaded, setLoaded] = useState<{ Plot: typeof InteractivePlotType } | null>(null);
   useEffect(() => {
     const element = box.current;

@@ -77,6 +77,8 @@ export function PlotDrawing({ model, room, palette = pagePalette, alone = false 
             <path
               key={line.id}
               d={pathOf(model.xs, line.ys, x, y)}
+              // A tenth of a pixel may still fall the other way in the browser's arithmetic.
+              suppressHydrationWarning
               stroke={colourOf(palette, i)}
               strokeWidth={strokeOf(i)}
               strokeDasharray={dashOf(i)}
@@ -183,7 +185,7 @@ function pathOf(
         pen = "M";
         return "";
       }
-      const step = `${pen}${x(value).toFixed(1)} ${y(height).toFixed(1)}`;
+      const step = `${pen}${x(value)} ${y(height)}`;
       pen = "L";
       return step;
     })

@@ -147,9 +147,12 @@ export function placing(model: PlotModel, room: PlotRoom) {
   const width = room.width - margins.left - margins.right;
   const height = room.height - margins.top - margins.bottom;
   return {
-    x: (value: number) => margins.left + width * share(model.x, value),
-    y: (value: number) => margins.top + height * (1 - share(model.y, value)),
+    x: (value: number) => tenth(margins.left + width * share(model.x, value)),
+    y: (value: number) => tenth(margins.top + height * (1 - share(model.y, value))),
     width,
     height,
   };
 }
+
+/** Logarithms differ in their last digit between server and browser; what is drawn must not. */
+const tenth = (pixels: number) => Math.round(pixels * 10) / 10;

@@ -1,4 +1,4 @@
-import { useCallback, useEffect, useRef, useState } from "react";
+import { useEffect, useRef, useState } from "react";
 import { stageKinds } from "#lib/circuit/kinds/index.ts";
 import { writeAddress } from "#lib/wire/stageAddress.ts";
 import type { StageState } from "#lib/wire/stageState.ts";
@@ -24,17 +24,14 @@ export function Calculator({ kind: kindId, initial, signedIn }: CalculatorProps)
   const topology = topologyOf(kind, state.topology);
   const address = `/calculators/${kind.id}?${writeAddress(topology, state)}`;
 
-  const onChange = useCallback(
-    (next: StageState) => {
-      setState(next);
-      clearTimeout(timer.current);
-      timer.current = setTimeout(() => {
-        const query = writeAddress(topologyOf(kind, next.topology), next);
-        window.history.replaceState(window.history.state, "", `?${query}`);
-      }, pause);
-    },
-    [kind],
-  );
+  const onChange = (next: StageState) => {
+    setState(next);
+    clearTimeout(timer.current);
+    timer.current = setTimeout(() => {
+      const query = writeAddress(topologyOf(kind, next.topology), next);
+      window.history.replaceState(window.history.state, "", `?${query}`);
+    }, pause);
+  };
   useEffect(() => () => clearTimeout(timer.current), []);
 
   return (

@@ -34,13 +34,19 @@ export function Candidates({ stage, id, keep, onKeep, onClose, designators }: Ca
         <h3 id={`${id}-head`}>Values that exist</h3>
         <p className="text-small text-ink-2" role="status">
           {search.kind === "working" && "Working out parts…"}
-          {search.kind === "failed" && "This browser could not run the search. Step the values by hand, or load the page again."}
+          {search.kind === "failed" &&
+            "This browser could not run the search. Step the values by hand, or load the page again."}
           {search.kind === "done" && solution && `${solution.tried.toLocaleString("en-GB")} combinations tried`}
           {search.kind === "done" && refusal && "Nothing to choose from"}
         </p>
         {anchors.length > 0 && (
           <label className="choice" htmlFor={`${id}-keep`}>
-            <input id={`${id}-keep`} type="checkbox" checked={keep} onChange={(event) => onKeep(event.target.checked)} />
+            <input
+              id={`${id}-keep`}
+              type="checkbox"
+              checked={keep}
+              onChange={(event) => onKeep(event.target.checked)}
+            />
             <span>
               Keep{" "}
               {anchors.map((part, i) => (
@@ -87,7 +93,7 @@ function CandidateTable({ stage, solution, stale, designators }: CandidateTableP
   const parts = Object.entries(topology.parts).filter(([key]) => solution.candidates.some((c) => c.parts[key]! > 0));
   const targets = Object.entries(topology.targets);
   return (
-    <div className="table-scroll" tabIndex={0} role="group" aria-label="Candidates" aria-busy={stale}>
+    <div className="table-scroll" aria-busy={stale}>
       <table className="table candidate-table">
         <thead>
           <tr>

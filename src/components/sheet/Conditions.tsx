@@ -1,5 +1,11 @@
 import { useState } from "react";
-import { acceptedRange, formatQuantity, type ChoiceField, type ConditionField, type NumberField } from "#lib/circuit/index.ts";
+import {
+  acceptedRange,
+  formatQuantity,
+  type ChoiceField,
+  type ConditionField,
+  type NumberField,
+} from "#lib/circuit/index.ts";
 import { stepFigure } from "#lib/client/stage/stepping.ts";
 import { figureText, readFigure } from "#lib/wire/figureText.ts";
 import { isOptional } from "#lib/wire/stageState.ts";
@@ -26,7 +32,9 @@ const isShare = (field: ConditionField): field is NumberField => {
 export function Conditions({ stage, id, readOnly, only }: ConditionsProps & { only?: "turned" }) {
   const entries = Object.entries(stage.topology.conditions);
   const shares = entries.filter((entry): entry is [string, NumberField] => isShare(entry[1]));
-  const optional = entries.filter((entry): entry is [string, NumberField] => isOptional(entry[1]) && !isShare(entry[1]));
+  const optional = entries.filter(
+    (entry): entry is [string, NumberField] => isOptional(entry[1]) && !isShare(entry[1]),
+  );
   const others = entries.filter(([, field]) => !isShare(field) && !isOptional(field));
   const changed = others.filter(([key, field]) => stage.state.conditions[key] !== field.default).length;
   return (
@@ -38,7 +46,14 @@ export function Conditions({ stage, id, readOnly, only }: ConditionsProps & { on
         <fieldset className="surroundings">
           <legend>Surroundings</legend>
           {optional.map(([key, field]) => (
-            <Surrounding key={key} stage={stage} condition={key} field={field} id={`${id}-${key}`} readOnly={readOnly} />
+            <Surrounding
+              key={key}
+              stage={stage}
+              condition={key}
+              field={field}
+              id={`${id}-${key}`}
+              readOnly={readOnly}
+            />
           ))}
         </fieldset>
       )}

@@ -122,7 +122,9 @@ function PartRow({ stage, part, field, id, designator, exact, moves, readOnly, o
       </td>
       <td className="right text-ink-2">± {Number((field.tolerance * 100).toPrecision(3))} %</td>
       {moves !== undefined && (
-        <td className="right text-ink-2 only-wide">{moves === null ? "–" : formatQuantity(moves, "dB").replace(/\u00a0dB$/, "")}</td>
+        <td className="right text-ink-2 only-wide">
+          {moves === null ? "–" : formatQuantity(moves, "dB").replace(/\u00a0dB$/, "")}
+        </td>
       )}
     </tr>
   );

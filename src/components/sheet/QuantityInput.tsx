@@ -28,7 +28,10 @@ interface QuantityInputProps {
  * stays in force.
  */
 export function QuantityInput({ control, name, read, print, step, onValue, ...input }: QuantityInputProps) {
-  const { field, fieldState } = useController({
+  const {
+    field: { ref, name: fieldName, value: typed, onChange, onBlur },
+    fieldState,
+  } = useController({
     control,
     name,
     rules: {
@@ -38,18 +41,18 @@ export function QuantityInput({ control, name, read, print, step, onValue, ...in
       },
     },
   });
-  const text = String(field.value);
+  const text = String(typed);
   const onKeyDown = (event: KeyboardEvent) => {
     if (input.readOnly || (event.key !== "ArrowUp" && event.key !== "ArrowDown")) return;
     event.preventDefault();
     const value = step(event.key === "ArrowUp" ? 1 : -1, event.shiftKey ? 10 : 1);
-    field.onChange(print(value));
+    onChange(print(value));
     onValue(value);
   };
   return (
     <input
-      ref={field.ref}
-      name={field.name}
+      ref={ref}
+      name={fieldName}
       id={input.id}
       className={input.className ?? "input"}
       type="text"
@@ -63,9 +66,8 @@ export function QuantityInput({ control, name, read, print, step, onValue, ...in
       aria-invalid={fieldState.invalid || input.refused || undefined}
       aria-describedby={input.describedBy}
       onChange={(event) => {
-        const typed = event.target.value;
-        field.onChange(typed);
-        const reading = read(typed);
+        onChange(event.target.value);
+        const reading = read(event.target.value);
         if (reading.ok) onValue(reading.value);
       }}
       onFocus={(event) => {
@@ -74,8 +76,8 @@ export function QuantityInput({ control, name, read, print, step, onValue, ...in
       }}
       onBlur={() => {
         const reading = read(text);
-        if (reading.ok && !input.readOnly) field.onChange(print(reading.value));
-        field.onBlur();
+        if (reading.ok && !input.readOnly) onChange(print(reading.value));
+        onBlur();
         input.onBlur?.();
       }}
       onKeyDown={onKeyDown}

@@ -1,8 +1,8 @@
 import { useEffect, useId, useState, type FormEvent } from "react";
 import type { AnyTopology, StageKind } from "#lib/circuit/index.ts";
 import { failureText, request } from "#lib/client/request.ts";
-import { assignDesignators } from "#lib/client/stage/designators.ts";
-import { changeWorkingCopy, readWorkingCopy, withStage, type StoredStage } from "#lib/client/workingCopy.ts";
+import { appendStage } from "#lib/client/stage/appendStage.ts";
+import type { StoredStage } from "#lib/client/workingCopy.ts";
 import type { StageState } from "#lib/wire/stageState.ts";
 
 interface SaveToVoiceProps {
@@ -52,9 +52,15 @@ export function SaveToVoice({ kind, topology, state }: SaveToVoiceProps) {
   const save = async (event: FormEvent) => {
     event.preventDefault();
     if (!voice || saving.kind === "saving") return;
-    if (name.trim() === "") return setSaving({ kind: "failed", message: "Give the stage a name, such as Body or Snap." });
+    if (name.trim() === "")
+      return setSaving({ kind: "failed", message: "Give the stage a name, such as Body or Snap." });
     setSaving({ kind: "saving" });
-    setSaving(await append(voice, { kind, topology, state }, name.trim()));
+    const outcome = await appendStage(voice.id, { kind, topology, state, name: name.trim() });
+    setSaving(
+      outcome.kind === "saved"
+        ? { kind: "saved", voice, stage: outcome.stage }
+        : { kind: "failed", message: outcome.message },
+    );
   };
 
   return (
@@ -115,52 +121,4 @@ export function SaveToVoice({ kind, topology, state }: SaveToVoiceProps) {
       </div>
     </form>
   );
-}
-
-async function append(
-  voice: VoiceChoice,
-  { kind, topology, state }: SaveToVoiceProps,
-  name: string,
-): Promise<Saving> {
-  const copy = await readWorkingCopy(voice.id);
-  if (copy === null) {
-    return {
-      kind: "failed",
-      message: "The voice could not be read. Your values stay on this page: check that you are signed in, then try again.",
-    };
-  }
-  const id = newId();
-  let stage: StoredStage | undefined;
-  const outcome = await changeWorkingCopy(voice.id, copy, (document) => {
-    const taken = document.stages.flatMap(({ designators }) => Object.values(designators));
-    stage = {
-      id,
-      kind: kind.id,
-      topology: topology.id,
-      name,
-      parts: state.parts,
-      conditions: state.conditions,
-      targets: state.targets,
-      ...(Object.keys(state.windows).length > 0 && { windows: state.windows }),
-      designators: assignDesignators(topology, state.parts, {}, taken),
-    };
-    return withStage(document, stage);
-  });
-  switch (outcome.kind) {
-    case "saved":
-      return { kind: "saved", voice, stage: stage! };
-    case "conflict":
-      return { kind: "failed", message: "Others are saving this voice just now. Your values stay here: try again in a moment." };
-    case "signed-out":
-    case "unreachable":
-      return { kind: "failed", message: failureText(outcome) };
-    case "refused":
-      return { kind: "failed", message: `${[outcome.detail, ...outcome.errors.map(({ message }) => message)].join(" ")} Your values stay here.` };
-  }
-}
-
-/** Unlike randomUUID, this also works where the page is not served over TLS. */
-function newId(): string {
-  const bytes = crypto.getRandomValues(new Uint8Array(12));
-  return `s-${[...bytes].map((byte) => byte.toString(16).padStart(2, "0")).join("")}`;
 }

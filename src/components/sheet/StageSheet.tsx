@@ -48,7 +48,9 @@ export function StageSheet({ kind: kindId, initial, onChange, ...props }: StageS
     <div className="sheet stage">
       <div className="sheet-head">
         <h2>{name ?? topology.name}</h2>
-        <p className="aside">{name === undefined ? topology.summary : `${kind.name}, ${topology.name.toLowerCase()}`}</p>
+        <p className="aside">
+          {name === undefined ? topology.summary : `${kind.name}, ${topology.name.toLowerCase()}`}
+        </p>
         {actions !== undefined && <div className="act">{actions}</div>}
       </div>
       {children}
@@ -61,6 +63,18 @@ export function StageSheet({ kind: kindId, initial, onChange, ...props }: StageS
         <section className="stage-parts" aria-labelledby={`${id}-parts`}>
           <h3 id={`${id}-parts`}>Parts</h3>
           <PartsTable stage={stage} id={`${id}-part`} designators={designators} readOnly={readOnly} onLit={setLit} />
+          {topology.devices.length > 0 && (
+            <ul className="devices" aria-label="Devices">
+              {topology.devices.map((device) => (
+                <li key={device.key}>
+                  <span className="val part-mark">{designators[device.key] ?? device.letter}</span>{" "}
+                  <span className="text-ink-2">
+                    {device.label}: {device.deviceClass}
+                  </span>
+                </li>
+              ))}
+            </ul>
+          )}
           {canSolve && (
             <div className="parts-foot needs-js no-print">
               <button

@@ -12,11 +12,19 @@ const windowStep = 0.01;
 export function Targets({ stage, id, readOnly }: { stage: Stage; id: string; readOnly: boolean }) {
   const { topology, refusal } = stage;
   const entries = Object.entries(topology.targets);
-  if (entries.length === 0) return <p className="text-ink-2">Nothing to aim at here: set the parts and read the results.</p>;
+  if (entries.length === 0)
+    return <p className="text-ink-2">Nothing to aim at here: set the parts and read the results.</p>;
   return (
     <>
       {entries.map(([key]) => (
-        <TargetField key={key} stage={stage} target={key} id={`${id}-${key}`} refusalId={`${id}-refusal`} readOnly={readOnly} />
+        <TargetField
+          key={key}
+          stage={stage}
+          target={key}
+          id={`${id}-${key}`}
+          refusalId={`${id}-refusal`}
+          readOnly={readOnly}
+        />
       ))}
       <div id={`${id}-refusal`} aria-live="polite" className="target-refusal">
         {refusal && (
@@ -76,7 +84,9 @@ function TargetField({ stage, target, id, refusalId, readOnly }: TargetFieldProp
           className="input input-window"
           read={readWindow}
           print={windowText}
-          step={(direction, count) => Math.min(1, Math.max(0.001, Number((width + direction * count * windowStep).toFixed(4))))}
+          step={(direction, count) =>
+            Math.min(1, Math.max(0.001, Number((width + direction * count * windowStep).toFixed(4))))
+          }
           onValue={(figure) => actions.set("windows", target, figure)}
           describedBy={`${id}-note`}
           readOnly={readOnly}

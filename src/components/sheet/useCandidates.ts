@@ -5,9 +5,7 @@ import { decidedParts } from "#lib/wire/stageState.ts";
 import type { Stage } from "./useStage.ts";
 
 export type CandidateSearch =
-  | { kind: "working"; before: SolveOutcome | null }
-  | { kind: "done"; outcome: SolveOutcome }
-  | { kind: "failed" };
+  { kind: "working"; before: SolveOutcome | null } | { kind: "done"; outcome: SolveOutcome } | { kind: "failed" };
 
 /** Long enough to type another digit. */
 const pause = 200;

@@ -17,7 +17,7 @@ export function changeText(from: number, to: number, unit: Unit): string | undef
 
 /** A relative error with its sign: +0.83 %. */
 export function errorText(share: number): string {
-  return Math.abs(share) < negligible ? "0 %" : signed(share, percentText(Math.abs(share)));
+  return Math.abs(share) < negligible ? "0\u00a0%" : signed(share, percentText(Math.abs(share)));
 }
 
 function percentText(share: number): string {

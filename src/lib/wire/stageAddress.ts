@@ -98,7 +98,9 @@ export function readAddress(topologies: readonly AnyTopology[], query: URLSearch
   state.series = series;
   const strangers = [...new Set(query.keys())].filter((name) => !known.has(name));
   if (strangers.length > 0 && (found || asked === null)) {
-    faults.push(`The link also holds ${strangers.slice(0, 5).map(quoted).join(", ")}, which this calculator does not know.`);
+    faults.push(
+      `The link also holds ${strangers.slice(0, 5).map(quoted).join(", ")}, which this calculator does not know.`,
+    );
   }
   // Targets alone ask for a design; parts given by hand are never touched.
   if (anyTarget && !anyPart) state.parts = nearestParts(topology, state);

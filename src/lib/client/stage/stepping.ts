@@ -1,4 +1,10 @@
-import { acceptedRange, stepAlongSeries, type NumberField, type PartField, type ValueSeries } from "#lib/circuit/index.ts";
+import {
+  acceptedRange,
+  stepAlongSeries,
+  type NumberField,
+  type PartField,
+  type ValueSeries,
+} from "#lib/circuit/index.ts";
 
 /** Below this a pot that need not be fitted steps down to "not fitted". */
 const smallestPot = 100;
@@ -9,7 +15,12 @@ export function stepPart(value: number, field: PartField, series: ValueSeries, d
   let stepped = value;
   for (let i = 0; i < count; i++) {
     if (field.default === 0 && direction === -1 && stepped <= smallestPot) return 0;
-    const next = stepped === 0 ? (direction === 1 ? (field.suggestion ?? smallestPot) : 0) : stepAlongSeries(stepped, series, direction);
+    const next =
+      stepped === 0
+        ? direction === 1
+          ? (field.suggestion ?? smallestPot)
+          : 0
+        : stepAlongSeries(stepped, series, direction);
     if (next < least || next > most) return stepped;
     stepped = next;
   }
