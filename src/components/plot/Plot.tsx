@@ -1,7 +1,6 @@
-import { useEffect, useId, useRef, useState, type ComponentType, type KeyboardEvent } from "react";
+import { lazy, Suspense, useEffect, useId, useRef, useState, type KeyboardEvent } from "react";
 import type { AnyTopology } from "#lib/circuit/index.ts";
 import type { StageState } from "#lib/wire/stageState.ts";
-import type InteractivePlotType from "./InteractivePlot.tsx";
 import { PlotActions } from "./PlotActions.tsx";
 import { colourOf, dashOf, pagePalette, PlotDrawing, strokeOf } from "./PlotDrawing.tsx";
 import { PlotFigures } from "./PlotFigures.tsx";
@@ -16,14 +15,20 @@ interface PlotProps {
   empty?: string | undefined;
 }
 
+/** The plotting library is fetched once a plot comes near the screen; without it the drawn plot stays, which shows the same. */
+const InteractivePlot = lazy(() => import("./InteractivePlot.tsx").catch(() => ({ default: PlotDrawing })));
+
 /** Drawn before the width is known: one for wide columns and one for phones, chosen by the stylesheet. */
 const wide: PlotRoom = { width: 640, height: 340 };
 const narrow: PlotRoom = { width: 340, height: 320 };
 
+/** Narrower than this nothing can be read off a plot. */
+const leastWidth = 160;
+
 export function Plot({ topology, curve, stage, fileName, empty }: PlotProps) {
   const box = useRef<HTMLDivElement>(null);
   const width = useWidth(box);
-  const Interactive = useInteractivePlot(box);
+  const near = useNear(box);
   const [at, setAt] = useState<number | null>(null);
   const head = useId();
   const room = width === null ? wide : { width, height: width < 480 ? narrow.height : wide.height };
@@ -37,7 +42,7 @@ export function Plot({ topology, curve, stage, fileName, empty }: PlotProps) {
         {model && model.lines.length > 1 && <Legend model={model} />}
         {model && <PlotActions model={model} fileName={fileName} />}
       </figcaption>
-      <div ref={box} className="plot-box">
+      <div ref={box} className={model ? "plot-box" : "plot-box plot-box-empty"}>
         {model ? (
           <>
             {width === null ? (
@@ -47,8 +52,10 @@ export function Plot({ topology, curve, stage, fileName, empty }: PlotProps) {
                 </div>
                 <div className="plot-narrow">{narrowModel && <PlotDrawing model={narrowModel} room={narrow} />}</div>
               </>
-            ) : Interactive ? (
-              <Interactive model={model} room={room} at={at} onPoint={setAt} />
+            ) : near ? (
+              <Suspense fallback={<PlotDrawing model={model} room={room} />}>
+                <InteractivePlot model={model} room={room} at={at} onPoint={setAt} />
+              </Suspense>
             ) : (
               <PlotDrawing model={model} room={room} />
             )}
@@ -169,39 +176,32 @@ function useWidth(box: React.RefObject<HTMLDivElement | null>): number | null {
   useEffect(() => {
     const element = box.current;
     if (!element) return undefined;
-    const observer = new ResizeObserver(([entry]) => entry && setWidth(Math.floor(entry.contentRect.width)));
+    const observer = new ResizeObserver(([entry]) => {
+      // A plot out of sight has no width; it keeps the one it had.
+      if (entry && entry.contentRect.width >= leastWidth) setWidth(Math.floor(entry.contentRect.width));
+    });
     observer.observe(element);
     return () => observer.disconnect();
   }, [box]);
   return width;
 }
 
-/** Fetches the plotting library once the plot comes near the screen. */
-function useInteractivePlot(
-  box: React.RefObject<HTMLDivElement | null>,
-): ComponentType<React.ComponentProps<typeof InteractivePlotType>> | null {
-  const [loaded, setLoaded] = useState<{ Plot: typeof InteractivePlotType } | null>(null);
+/** True once the element has come near the screen. */
+function useNear(box: React.RefObject<HTMLDivElement | null>): boolean {
+  const [near, setNear] = useState(false);
   useEffect(() => {
     const element = box.current;
     if (!element) return undefined;
-    let left = false;
     const observer = new IntersectionObserver(
       (entries) => {
         if (!entries.some((entry) => entry.isIntersecting)) return;
         observer.disconnect();
-        // Without it the drawn plot stays, which shows the same.
-        import("./InteractivePlot.tsx").then(
-          (module) => left || setLoaded({ Plot: module.default }),
-          () => undefined,
-        );
+        setNear(true);
       },
       { rootMargin: "300px" },
     );
     observer.observe(element);
-    return () => {
-      left = true;
-      observer.disconnect();
-    };
+    return () => observer.disconnect();
   }, [box]);
-  return loaded?.Plot ?? null;
+  return near;
 }

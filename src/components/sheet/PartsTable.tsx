@@ -132,7 +132,7 @@ function PartRow({ stage, part, field, id, designator, exact, moves, readOnly, o
 
 function exactText(exact: number | undefined, field: PartField): string {
   if (exact === undefined) return "–";
-  if (exact === 0) return "not fitted";
+  if (exact === 0) return "none";
   const marked = formatPartValue(exact, field.unit);
   return partIsPlain(exact, marked, field) ? marked : formatTyped(exact, field.unit, 4);
 }

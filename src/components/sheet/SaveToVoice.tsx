@@ -1,4 +1,4 @@
-import { useEffect, useId, useState, type FormEvent } from "react";
+import { useEffect, useId, useState, type SyntheticEvent } from "react";
 import type { AnyTopology, StageKind } from "#lib/circuit/index.ts";
 import { failureText, request } from "#lib/client/request.ts";
 import { appendStage } from "#lib/client/stage/appendStage.ts";
@@ -49,7 +49,7 @@ export function SaveToVoice({ kind, topology, state }: SaveToVoiceProps) {
   }, []);
 
   const voice = Array.isArray(voices) ? (voices.find((v) => v.id === chosen) ?? voices[0]) : undefined;
-  const save = async (event: FormEvent) => {
+  const save = async (event: SyntheticEvent) => {
     event.preventDefault();
     if (!voice || saving.kind === "saving") return;
     if (name.trim() === "")
