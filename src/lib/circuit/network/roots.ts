@@ -9,7 +9,7 @@ const maxIterations = 200;
  * lie many decades apart: a filter's poles at 1 kHz beside an op amp's at 3 MHz.
  *
  * @param p constant term first; highest non-zero coefficient decides the degree
- * @returns as many roots as the degree; those of a real polynomial come in conjugate pairs, imaginary parts below
+ * @returns as many roots as the degree, one beyond the largest double as infinite; those of a real polynomial come in conjugate pairs, imaginary parts below
  *   rounding are set to zero
  * @throws RangeError where a coefficient is not finite or the iteration does not settle
  */
@@ -21,9 +21,26 @@ export function findRoots(p: Polynomial): Complex[] {
     return [...Array.from({ length: zeros }, () => ({ re: 0, im: 0 })), ...findRoots(coefficients.slice(zeros))];
   const degree = coefficients.length - 1;
   if (degree < 1) return [];
+  const gap = wideGap(coefficients);
+  if (gap) return [...findRoots(coefficients.slice(0, gap + 1)), ...findRoots(coefficients.slice(gap))];
   if (degree === 1) return [{ re: -coefficients[0]! / coefficients[1]!, im: 0 }];
   if (degree === 2) return quadraticRoots(coefficients[0]!, coefficients[1]!, coefficients[2]!);
   return aberth(coefficients).map(snapToReal);
+}
+
+/** Roots farther apart than this do not move each other by as much as rounding does. */
+const independent = 1e20;
+
+/**
+ * The index at which the polynomial falls into two whose roots are independent: a vertex of the hull with a wide gap
+ * between the radii on its sides. Keeps the iteration away from over- and underflow too.
+ */
+function wideGap(c: readonly number[]): number | undefined {
+  const hull = upperHull(c);
+  const logRadius = (k: number) => (hull[k - 1]!.log - hull[k]!.log) / (hull[k]!.i - hull[k - 1]!.i);
+  for (let k = 1; k < hull.length - 1; k++)
+    if (logRadius(k + 1) - logRadius(k) > Math.log(independent)) return hull[k]!.i;
+  return undefined;
 }
 
 /** Roots of c0 + c1 s + c2 s², without the cancellation of the schoolbook formula. */
@@ -104,8 +121,8 @@ function horner(c: readonly number[], z: Complex) {
   return { value, slope, bound: bound * 4 * Number.EPSILON };
 }
 
-/** Radii from the upper convex hull of the points (i, log|cᵢ|), spread in angle. */
-function startingPoints(c: number[]): Complex[] {
+/** The upper convex hull of the points (i, log|cᵢ|); its slopes are the logarithms of the radii on which roots lie. */
+function upperHull(c: readonly number[]): { i: number; log: number }[] {
   const points = c
     .map((x, i) => ({ i, log: x === 0 ? -Infinity : Math.log(Math.abs(x)) }))
     .filter((p) => p.log > -Infinity);
@@ -118,6 +135,12 @@ function startingPoints(c: number[]): Complex[] {
     }
     hull.push(point);
   }
+  return hull;
+}
+
+/** Radii from the hull, spread in angle. */
+function startingPoints(c: number[]): Complex[] {
+  const hull = upperHull(c);
   return hull.slice(1).flatMap((to, k) => {
     const from = hull[k]!;
     const count = to.i - from.i;

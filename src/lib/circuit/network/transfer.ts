@@ -33,17 +33,12 @@ function sizeAt(p: Polynomial, omega: number): number {
 
 /** The poles, in rad/s. */
 export function polesOf({ denominator }: Transfer): Complex[] {
-  return scaledRoots(denominator);
+  return findRoots(denominator);
 }
 
 /** The finite zeros, in rad/s. */
 export function zerosOf({ numerator }: Transfer): Complex[] {
-  return scaledRoots(numerator);
-}
-
-function scaledRoots(p: Polynomial): Complex[] {
-  const unit = naturalScale(p);
-  return findRoots(rescale(p, unit)).map(({ re, im }) => ({ re: re * unit, im: im * unit }));
+  return findRoots(numerator);
 }
 
 /** The geometric mean of the roots' sizes, or 1 where there is none: the frequency about which coefficients balance. */
@@ -100,7 +95,7 @@ export function powerGain({ numerator, denominator }: Transfer, unit: number): {
 /** Positive real roots of a polynomial, ascending. */
 export function positiveRoots(p: Polynomial): number[] {
   return findRoots(p)
-    .filter(({ re, im }) => re > 0 && Math.abs(im) <= 1e-6 * re)
+    .filter(({ re, im }) => re > 0 && re < Infinity && Math.abs(im) <= 1e-6 * re)
     .map(({ re }) => polish(p, re))
     .sort((a, b) => a - b);
 }

@@ -9,15 +9,15 @@ export const sources = [
   },
   {
     id: "op-amps-for-everyone",
-    title: "Op Amps for Everyone (SLOD006)",
-    place: "chapter 16, multiple-feedback band-pass",
-    provenance: "from memory",
+    title: "Op Amps for Everyone (R. Mancini ed., SLOD006B, August 2002)",
+    place: "section 16.5.1.2, figure 16-34 and example 16-5",
+    provenance: "published",
   },
   {
     id: "franco",
     title: "S. Franco, Design with Operational Amplifiers and Analog Integrated Circuits",
-    place: "chapter 3, multiple-feedback band-pass",
-    provenance: "from memory",
+    place: "example 3.15, multiple-feedback band-pass",
+    provenance: "published",
   },
   {
     id: "noise-bandwidth",
