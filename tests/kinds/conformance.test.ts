@@ -93,7 +93,10 @@ describe.each(stageKinds.map((kind) => [kind.id, kind] as const))("%s", (_, kind
   it("keeps limit cases for its own topologies and codes only", () => {
     for (const { topology, code } of limitCasesOf(kind)) {
       const found = kind.topologies.find(({ id }) => id === topology);
-      expect(found?.limits.map((limit) => limit.code), `${topology}/${code}`).toContain(code);
+      expect(
+        found?.limits.map((limit) => limit.code),
+        `${topology}/${code}`,
+      ).toContain(code);
     }
   });
 
@@ -106,7 +109,10 @@ describe.each(stageKinds.map((kind) => [kind.id, kind] as const))("%s", (_, kind
       const fields = { ...topology.parts, ...topology.conditions, ...topology.targets };
       for (const [key, field] of Object.entries(fields)) {
         if (field.type === "choice") {
-          expect(field.options.map(({ value }) => value), key).toContain(field.default);
+          expect(
+            field.options.map(({ value }) => value),
+            key,
+          ).toContain(field.default);
           continue;
         }
         const [lowest, highest] = acceptedRange(field);

@@ -1,5 +1,8 @@
-import { complex, lusolve, type Complex, type Matrix } from "mathjs";
+import { create, complexDependencies, lusolveDependencies, type Complex, type Matrix } from "mathjs";
 import type { Network } from "#lib/circuit/index.ts";
+
+// As it comes, mathjs takes anything below 1e-15 for zero while it solves, and a filter's far skirts lie below that.
+const { complex, lusolve } = create({ ...complexDependencies, ...lusolveDependencies }, { absTol: 0 });
 
 /**
  * Modified nodal analysis of a drawn network, kept apart from the library on purpose: it knows nothing of transfer
@@ -9,18 +12,13 @@ import type { Network } from "#lib/circuit/index.ts";
 export type Element =
   | { kind: "resistor"; nodes: readonly [string, string]; value: number }
   | { kind: "capacitor"; nodes: readonly [string, string]; value: number }
-  /** A(s) = 2π·gainBandwidth/s behind `outputResistance`; `null` for an ideal one, whose inputs are then held equal. */
-  | {
-      kind: "op-amp";
-      plus: string;
-      minus: string;
-      out: string;
-      gainBandwidth: number | null;
-      outputResistance: number;
-    };
+  | ({ kind: "op-amp"; plus: string; minus: string; out: string } & OpAmpModel);
 
+/** 1/A(s) = 1/openLoopGain + s/(2π·gainBandwidth), behind an output resistance. */
 export interface OpAmpModel {
+  /** Hz; null for an ideal op amp, whose inputs are then held equal. */
   gainBandwidth: number | null;
+  openLoopGain: number | null;
   outputResistance: number;
 }
 
@@ -57,7 +55,8 @@ export function withSource(elements: Element[], inside: string, outside: string,
 /** V(output)/V(input) at a frequency in Hz, with `input` driven by an ideal source and node "0" as ground. */
 export function nodalTransfer(elements: Element[], input: string, output: string): (frequency: number) => Complex {
   const names = new Set<string>();
-  for (const e of elements) for (const node of e.kind === "op-amp" ? [e.plus, e.minus, e.out] : e.nodes) names.add(node);
+  for (const e of elements)
+    for (const node of e.kind === "op-amp" ? [e.plus, e.minus, e.out] : e.nodes) names.add(node);
   names.delete("0");
   names.delete(input);
   const nodes = [...names];
@@ -98,10 +97,11 @@ export function nodalTransfer(elements: Element[], input: string, output: string
         addTo(current, u.minus, -1, 0);
         continue;
       }
-      // jω·τ·(V(out) + Ro·I) = V(plus) − V(minus)
-      const reluctance = omega / (2 * Math.PI * u.gainBandwidth);
-      addTo(current, u.out, 0, reluctance);
-      matrix[current]![current]!.im += reluctance * u.outputResistance;
+      // (V(out) + Ro·I)/A = V(plus) − V(minus)
+      const [re, im] = [u.openLoopGain === null ? 0 : 1 / u.openLoopGain, omega / (2 * Math.PI * u.gainBandwidth)];
+      addTo(current, u.out, re, im);
+      matrix[current]![current]!.re += re * u.outputResistance;
+      matrix[current]![current]!.im += im * u.outputResistance;
       addTo(current, u.plus, -1, 0);
       addTo(current, u.minus, 1, 0);
     }

@@ -12,7 +12,8 @@ export function sectionsOf(markdown: string): Map<string, string> {
 }
 
 const powers: Record<string, number> = { f: -15, p: -12, n: -9, µ: -6, m: -3, k: 3, M: 6, G: 9 };
-const figure = /(?<![\w.])([-−]?\d+(?:\.\d+)?)(?:\s?([fpnµmkMG]?)(Hz|Ω|F|V|A|S|W|s|K|dB|°|%)(?![A-Za-zΩ/]))?(?![\w.]*\w)/g;
+const figure =
+  /(?<![\w.])([-−]?\d+(?:\.\d+)?)(?:\s?([fpnµmkMG]?)(Hz|Ω|F|V|A|S|W|s|K|dB|°|%)(?![A-Za-zΩ/]))?(?![\w.]*\w)/g;
 
 interface Figure {
   value: number;

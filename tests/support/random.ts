@@ -8,17 +8,24 @@ export const logarithmic = (least: number, most: number): fc.Arbitrary<number> =
     .double({ min: Math.log(least), max: Math.log(most), noNaN: true })
     .map((x) => Math.min(most, Math.max(least, Math.exp(x))));
 
-/** A figure within the sane range of its field, stretched by `reach` on both sides but never past what is accepted. */
+/**
+ * A figure within the sane range of its field, stretched by `reach` on both sides but never past what is accepted.
+ * Zero is a case of its own (not fitted) that a plain draw never meets; past the usual range, absurdly small figures
+ * are drawn too.
+ */
 export function valueOf(field: NumberField, reach = 1): fc.Arbitrary<number> {
   const [lowest, highest] = acceptedRange(field);
-  if (field.scale === "linear" || field.least <= 0) {
+  if (field.scale === "linear") {
     const slack = ((field.most - field.least) * (reach - 1)) / 2;
     const [min, max] = [Math.max(lowest, field.least - slack), Math.min(highest, field.most + slack)];
-    const spread = fc.double({ min, max, noNaN: true });
-    // Zero is often a case of its own (not fitted), and a plain draw never meets it.
-    return min <= 0 && max >= 0 ? fc.oneof({ weight: 1, arbitrary: fc.constant(0) }, { weight: 3, arbitrary: spread }) : spread;
+    return reach > 1
+      ? fc.double({ min, max, noNaN: true })
+      : fc.integer({ min: 0, max: 1000 }).map((k) => min + ((max - min) * k) / 1000);
   }
-  return logarithmic(Math.max(lowest, field.least / reach), Math.min(highest, field.most * reach));
+  const most = Math.min(highest, field.most * reach);
+  if (field.least > 0) return logarithmic(Math.max(lowest, field.least / reach), most);
+  const usual = [fc.constant(0), logarithmic(field.most / 1e6, most)];
+  return fc.oneof(...usual, ...(reach > 1 ? [fc.double({ min: 0, max: most, noNaN: true })] : []));
 }
 
 function conditionOf(field: ConditionField, reach: number): fc.Arbitrary<number | string | null> {

@@ -2,6 +2,7 @@ import { minus, plus, reciprocal, size, times, type Complex } from "./complex.ts
 import { trim, type Polynomial } from "./polynomial.ts";
 
 const maxIterations = 200;
+const leastNormal = 2 ** -1022;
 
 /**
  * All roots of a real polynomial, by the simultaneous iteration of Aberth (Math. Comp. 27 (1973) 339) started on the
@@ -15,7 +16,8 @@ const maxIterations = 200;
  */
 export function findRoots(p: Polynomial): Complex[] {
   if (p.some((c) => !Number.isFinite(c))) throw new RangeError("findRoots: every coefficient must be finite");
-  const coefficients = trim(p);
+  // What underflow has left of a coefficient holds no digits to find a root from.
+  const coefficients = trim(p.map((c) => (Math.abs(c) < leastNormal ? 0 : c)));
   const zeros = coefficients.findIndex((c) => c !== 0);
   if (zeros > 0)
     return [...Array.from({ length: zeros }, () => ({ re: 0, im: 0 })), ...findRoots(coefficients.slice(zeros))];

@@ -69,17 +69,18 @@ export function routhStep(row: readonly number[], share: number, by: readonly nu
 }
 
 /**
- * Phase of H in degrees as a continuous function of frequency. Each pole and zero contributes the angle of (jω − root),
- * which never jumps, so no unwrapping is needed. A negative gain counts as −180°.
+ * Phase of H in degrees as a continuous function of frequency, counted from its low-frequency end: a negative gain there
+ * is −180°, and each zero at the origin adds 90°. Each other pole and zero contributes the angle that (jω − root) has
+ * turned since, which never jumps, so no unwrapping is needed.
  */
 export function phaseDegrees(transfer: Transfer): (frequency: number) => number {
   const zeros = zerosOf(transfer);
   const poles = polesOf(transfer);
-  const gain = trim(transfer.numerator).at(-1)! / trim(transfer.denominator).at(-1)!;
-  const sign = gain < 0 ? -180 : 0;
-  // A root in the right half plane turns the other way: its angle is taken from ±180° so that it too is continuous.
+  const lowest = (p: Polynomial) => p.find((c) => c !== 0) ?? 0;
+  const sign = Math.sign(lowest(transfer.numerator)) * Math.sign(lowest(transfer.denominator)) < 0 ? -180 : 0;
+  // A root in the right half plane turns the other way.
   const angle = (omega: number, { re, im }: Complex) =>
-    re > 0 ? 180 + (Math.atan2(im - omega, re) * 180) / Math.PI : (Math.atan2(omega - im, -re) * 180) / Math.PI;
+    ((re > 0 ? Math.atan2(im - omega, re) : Math.atan2(omega - im, -re)) * 180) / Math.PI;
   return (frequency) => {
     const omega = 2 * Math.PI * frequency;
     const sum = (roots: Complex[]) => roots.reduce((total, root) => total + angle(omega, root), 0);

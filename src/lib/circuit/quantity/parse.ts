@@ -23,24 +23,28 @@ export function parseQuantity(text: string, unit: Unit = ""): Parsed {
   if (trimmed.length > 40) return refuse("This is too long for a value. Type a figure such as 4k7, 100n or 1.5.");
   if (trimmed.includes(",")) return refuse("Use a point for decimals: 4.7k or 4k7. A comma can be read in two ways.");
   const bare = stripUnit(trimmed, unit);
-  const exponent = scaleOf(bare);
+  const exponent = scaleOf(bare, unit === "" || unit === "Ω");
   if (exponent === undefined) return refuse(`“${trimmed}” is not a value. Type a figure such as 4k7, 100n or 1.5.`);
   const value = Number(exponent);
   return Number.isFinite(value) ? { ok: true, value } : refuse(`“${trimmed}” is too large for any value.`);
 }
 
+/** Letters that mark ohms where no prefix stands: 4R7, 470R. */
+const ohmMarks = new Set(["R", "Ω"]);
+
 /** Decimal text of the figure: built as text so that 4k7 becomes exactly the double nearest to 4700, not 4.7 × 1000. */
-function scaleOf(text: string): string | undefined {
+function scaleOf(text: string, mayBeOhms: boolean): string | undefined {
+  const powerOf = (letter: string) => (mayBeOhms && ohmMarks.has(letter) ? 0 : prefixExponent(letter));
   const plain = number.exec(text);
   if (plain) return `${plain[1]}${plain[2]}e${plain[3] ?? "0"}`;
   const suffixed = prefixed.exec(text);
   if (suffixed) {
-    const power = prefixExponent(suffixed[3]!);
+    const power = powerOf(suffixed[3]!);
     return power === undefined ? undefined : `${suffixed[1]}${suffixed[2]}e${power}`;
   }
   const inside = infix.exec(text);
   if (inside) {
-    const power = inside[3] === "R" || inside[3] === "Ω" ? 0 : prefixExponent(inside[3]!);
+    const power = powerOf(inside[3]!);
     return power === undefined ? undefined : `${inside[1]}${inside[2] || "0"}.${inside[4]}e${power}`;
   }
   return undefined;

@@ -26,6 +26,16 @@ export const common = {
     suggestion: 3e6,
     help: "Left out, the op amp is ideal.",
   }),
+  openLoopGain: condition({
+    label: "Op amp gain at DC",
+    symbol: "A_0",
+    unit: "",
+    default: null,
+    least: 1e4,
+    most: 10e6,
+    suggestion: 200e3,
+    help: "Open loop. It matters only with a finite gain-bandwidth; left out, the gain grows without end towards DC.",
+  }),
   outputResistance: condition({
     label: "Op amp output resistance",
     symbol: "R_o",

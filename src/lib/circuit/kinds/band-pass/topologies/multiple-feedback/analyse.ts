@@ -55,13 +55,11 @@ export function analyse(state: MultipleFeedbackState): ResultValues<R> {
   const seen = { ...network, ra: network.ra + conditions.sourceResistance };
   const response = responseOf(transferAt(state), true);
   const noiseGain = noiseGainAtCentre(seen);
-  const centre = response.centreFrequency;
   return {
     ...response,
     ...(parts.rbPot > 0 && retune(state)),
     noiseGain,
-    ...(conditions.gainBandwidth !== null &&
-      centre !== undefined && { loopGain: conditions.gainBandwidth / (centre * noiseGain) }),
+    ...(conditions.gainBandwidth !== null && { loopGain: conditions.gainBandwidth / (idealCentre(seen) * noiseGain) }),
     ...(conditions.sourceRms !== null &&
       response.peakGain !== undefined &&
       response.noiseBandwidth !== undefined && {

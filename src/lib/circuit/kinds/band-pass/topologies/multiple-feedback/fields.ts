@@ -56,6 +56,7 @@ export const conditions = {
   },
   potLaw: common.potLaw,
   gainBandwidth: common.gainBandwidth,
+  openLoopGain: common.openLoopGain,
   outputResistance: common.outputResistance,
   sourceResistance: common.sourceResistance,
   loadResistance: common.loadResistance,

@@ -33,7 +33,7 @@ export const formulas: readonly Formula[] = [
   {
     id: "response",
     name: "Response with a real op amp",
-    tex: String.raw`H(s) = \frac{-s C_2 / R_A}{(1 + s\tau)\left(\frac{G}{R_F} + s\frac{C_1 + C_2}{R_F} + s^2 C_1 C_2\right) + s^2 \tau\, C_2 G},\quad \tau = \frac{1}{2\pi f_t},\ G = \frac{1}{R_A} + \frac{1}{R_B}`,
+    tex: String.raw`H(s) = \frac{-s C_2 / R_A}{(1 + \sigma)\left(\frac{G}{R_F} + s\frac{C_1 + C_2}{R_F} + s^2 C_1 C_2\right) + s\sigma\, C_2 G},\quad \sigma = \frac{1}{A_0} + \frac{s}{2\pi f_t},\ G = \frac{1}{R_A} + \frac{1}{R_B}`,
     holds: "Single-pole op amp without output resistance; the figures also include that and the load.",
     sources: ["mfb-derivation"],
   },

@@ -18,6 +18,8 @@ export interface Surroundings {
   loadResistance: number | null;
   /** Hz of the op amp's single-pole open-loop gain; null for an ideal one. */
   gainBandwidth: number | null;
+  /** Open-loop gain at DC, or null for none that matters. */
+  openLoopGain: number | null;
   /** Ω, open loop. */
   outputResistance: number;
 }
@@ -26,6 +28,7 @@ export const idealSurroundings: Surroundings = {
   sourceResistance: 0,
   loadResistance: null,
   gainBandwidth: null,
+  openLoopGain: null,
   outputResistance: 0,
 };
 
@@ -36,17 +39,17 @@ export function resistanceToGround(rb: number, rbPot: number, law: PotLaw, rotat
 
 /**
  * Transfer function from the source to the output: second order with an ideal op amp, third with one of finite
- * gain-bandwidth A(s) = 2π·ft/s.
+ * gain-bandwidth A(s) = A0/(1 + s·A0/(2π·ft)).
  *
- * Node equations, Vm the inverting input, τ = 1/(2π·ft), G = 1/(RA + Rs) + 1/RB, gF = 1/RF, Ro the op amp's output
- * resistance and gL the load:
+ * Node equations, Vm the inverting input, σ(s) = 1/A(s) = 1/A0 + s/(2π·ft), G = 1/(RA + Rs) + 1/RB, gF = 1/RF, Ro the
+ * op amp's output resistance and gL the load:
  *   x:  Vx(G + s(C1 + C2)) = Vin/(RA + Rs) + Vo·sC1 + Vm·sC2
  *   m:  Vm(sC2 + gF) = Vx·sC2 + Vo·gF
- *   o:  sτ[Vo + Ro(Vo·gL + (Vo − Vx)sC1 + (Vo − Vm)gF)] + Vm = 0
+ *   o:  σ[Vo + Ro(Vo·gL + (Vo − Vx)sC1 + (Vo − Vm)gF)] + Vm = 0
  * Eliminating Vx and Vm by hand leaves no difference of like terms in the denominator, so no digits are lost:
- *   H = −s·M/(RA + Rs) / [(1 + sτ(1 + Ro·gL))·E + s·G·N]
+ *   H = −s·M/(RA + Rs) / [(1 + σ(1 + Ro·gL))·E + s·G·σ·N]
  *   E = gF·G + s·gF(C1 + C2) + s²C1C2
- *   N = sτ[C2(1 + Ro(gL + gF)) + Ro·C1·gF] + s²τ·Ro·C1C2,  M = C2 − sτ·Ro·gF(C1 + C2) − s²τ·Ro·C1C2
+ *   N = C2(1 + Ro(gL + gF)) + Ro·C1·gF + s·Ro·C1C2,  M = C2 − σ·Ro·(gF(C1 + C2) + s·C1C2)
  */
 export function transferOf({ ra, rb, rf, c1, c2 }: NetworkValues, around: Surroundings): Transfer {
   const gIn = 1 / (ra + around.sourceResistance);
@@ -54,14 +57,14 @@ export function transferOf({ ra, rb, rf, c1, c2 }: NetworkValues, around: Surrou
   const gF = 1 / rf;
   const e = [gF * g, gF * (c1 + c2), c1 * c2];
   if (around.gainBandwidth === null) return { numerator: [0, -gIn * c2], denominator: e };
-  const tau = 1 / (2 * Math.PI * around.gainBandwidth);
+  const sigma = [around.openLoopGain === null ? 0 : 1 / around.openLoopGain, 1 / (2 * Math.PI * around.gainBandwidth)];
   const ro = around.outputResistance;
   const gL = around.loadResistance === null ? 0 : 1 / around.loadResistance;
-  const n = [0, tau * (c2 * (1 + ro * (gL + gF)) + ro * c1 * gF), tau * ro * c1 * c2];
-  const m = ro === 0 ? [c2] : [c2, -tau * ro * gF * (c1 + c2), -tau * ro * c1 * c2];
+  const n = [c2 * (1 + ro * (gL + gF)) + ro * c1 * gF, ro * c1 * c2];
+  const m = ro === 0 ? [c2] : add([c2], multiply([-ro], sigma, [gF * (c1 + c2), c1 * c2]));
   return {
     numerator: multiply([0, -gIn], m),
-    denominator: add(multiply([1, tau * (1 + ro * gL)], e), multiply([0, g], n)),
+    denominator: add(multiply(add([1], multiply([1 + ro * gL], sigma)), e), multiply([0, g], sigma, n)),
   };
 }
 
