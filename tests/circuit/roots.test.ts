@@ -1,6 +1,7 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
-import { findRoots, type Complex } from "#lib/circuit/network/roots.ts";
+import type { Complex } from "#lib/circuit/network/complex.ts";
+import { findRoots } from "#lib/circuit/network/roots.ts";
 import { multiply } from "#lib/circuit/network/polynomial.ts";
 import { logarithmic, runs } from "../support/random.ts";
 

@@ -93,9 +93,12 @@ describe("the multiple-feedback band-pass", () => {
       fc.property(anyParts, conditionsOf(multipleFeedback), (given, conditions) => {
         const parts = { ...given, rbPot: 10e3 };
         const got = results(parts, conditions);
+        const ends = [results(parts, { ...conditions, rotation: 1 }), results(parts, { ...conditions, rotation: 0 })];
+        // A peak without −3 dB points has a place in the range, and no centre of its own.
+        for (const [i, key] of ["retuneLow", "retuneHigh"].entries())
+          if (ends[i]!["centreFrequency"] !== undefined)
+            expectRelative(got[key], ends[i]!["centreFrequency"], 1e-12, key);
         if (got["retuneLow"] === undefined || got["retuneHigh"] === undefined) return;
-        expect(results(parts, { ...conditions, rotation: 1 })["centreFrequency"]).toBe(got["retuneLow"]);
-        expect(results(parts, { ...conditions, rotation: 0 })["centreFrequency"]).toBe(got["retuneHigh"]);
         expectRelative(got["retuneSpan"], 12 * Math.log2(got["retuneHigh"] / got["retuneLow"]), 1e-9, "span");
       }),
       runs(100),

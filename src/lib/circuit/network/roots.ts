@@ -10,8 +10,8 @@ const leastNormal = 2 ** -1022;
  * lie many decades apart: a filter's poles at 1 kHz beside an op amp's at 3 MHz.
  *
  * @param p constant term first; highest non-zero coefficient decides the degree
- * @returns as many roots as the degree, one beyond the largest double as infinite; those of a real polynomial come in conjugate pairs, imaginary parts below
- *   rounding are set to zero
+ * @returns as many roots as the degree, one beyond the largest double as infinite; those of a real polynomial come in
+ *   conjugate pairs, imaginary parts below rounding are set to zero
  * @throws RangeError where a coefficient is not finite or the iteration does not settle
  */
 export function findRoots(p: Polynomial): Complex[] {
