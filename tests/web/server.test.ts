@@ -93,7 +93,7 @@ describe("the server before the application", () => {
   });
 });
 
-describe("starting and stopping", () => {
+describe("starting and stopping", { timeout: 90_000 }, () => {
   test("several servers may start at once on an empty database", async () => {
     const name = `crowd_${process.pid}`;
     const own = process.env.DATABASE_URL ?? "";
