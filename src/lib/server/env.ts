@@ -15,7 +15,7 @@ const common = {
   BETTER_AUTH_SECRET: z.string().min(32, "give at least 32 random characters (openssl rand -base64 32)"),
   TRUST_PROXY: count(0, 10),
   RATE_LIMIT_CALCULATORS: count(60_000, 10_000_000),
-  RATE_LIMIT_ACCOUNTS: count(30, 1_000_000),
+  RATE_LIMIT_ACCOUNTS: count(120, 1_000_000),
   LOG_LEVEL: z.enum(["fatal", "error", "warn", "info", "debug", "trace", "silent"]).default("info"),
   OUT_DIR: z.string().default("dist"),
 };
