@@ -106,6 +106,17 @@ export const common = {
     scale: "linear",
     accepts: [-40, -1],
   }),
+  beta: condition({
+    label: "Current gain",
+    symbol: "β",
+    unit: "",
+    default: null,
+    least: 40,
+    most: 600,
+    accepts: [5, 1e6],
+    suggestion: 150,
+    help: "Collector over base current of each transistor where it works; left out, no base current.",
+  }),
   rotation: condition({
     label: "Pot rotation",
     symbol: "x",
