@@ -187,6 +187,8 @@ describe.each(stageKinds.map((kind) => [kind.id, kind] as const))("%s", (_, kind
     it("returns its targets: solve, then analyse", () => {
       if (!hasTargets) return;
       expect(solveThenAnalyse(topology, defaultTargets(topology), {}), "the targets it starts with").toBe("met");
+      // Without parts there is nothing to solve for: such a topology meets its targets or refuses them.
+      if (Object.keys(topology.parts).length === 0) return;
       const outcomes: string[] = [];
       fc.assert(
         fc.property(targetsOf(topology), conditionsOf(topology), (targets, conditions) => {

@@ -36,6 +36,12 @@ export const limitCases: readonly LimitCase[] = [
     { conditions: { mismatchVoltage: 1e-3, referenceCurrent: 50e-6 } },
   ),
   {
+    topology: "wilson",
+    code: "unmatched-pair",
+    raised: { conditions: { ...real, mismatchVoltage: 2e-3 } },
+    quiet: { conditions: real },
+  },
+  {
     topology: "simple",
     code: "high-collector-voltage",
     raised: { conditions: real },

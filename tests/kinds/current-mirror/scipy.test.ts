@@ -1,5 +1,6 @@
 import { describe, expect, it } from "vitest";
-import { analyseStage, findKind } from "#lib/circuit/index.ts";
+import { analyseStage } from "#lib/circuit/index.ts";
+import { currentMirror } from "#lib/circuit/kinds/current-mirror/index.ts";
 import { expectRelative } from "../../support/approx.ts";
 import { hasScipy, rerunScipy, scipyReference } from "../../support/scipyReference.ts";
 
@@ -26,7 +27,7 @@ const committed = scipyReference<Given, Figures>("current_mirror");
 
 describe("mirrors against Kirchhoff's current law solved by scipy", () => {
   it.each(committed.cases.map((one) => [one.given.id, one] as const))("agrees for %s", (id, { given, figures }) => {
-    const topology = findKind("current-mirror")!.topologies.find((one) => one.id === given.topology)!;
+    const topology = currentMirror.topologies.find((one) => one.id === given.topology)!;
     const { results } = analyseStage(topology, {
       parts: given.r1 === undefined ? {} : { r1: given.r1, r2: given.r2! },
       conditions: {

@@ -1,11 +1,14 @@
 import { describe, expect, it } from "vitest";
-import { analyseStage, findKind, type PlainConditions, type PlainValues } from "#lib/circuit/index.ts";
+import { analyseStage, type PlainConditions, type PlainValues } from "#lib/circuit/index.ts";
+import { currentMirror } from "#lib/circuit/kinds/current-mirror/index.ts";
 import { expectPrinted, expectRelative } from "../../support/approx.ts";
 import { worked, workedKeys } from "../../support/published.ts";
 
-const kind = findKind("current-mirror")!;
 const figures = (topology: string, conditions: PlainConditions, parts: PlainValues = {}) =>
-  analyseStage(kind.topologies.find(({ id }) => id === topology)!, { parts, conditions }).results as Record<string, number>;
+  analyseStage(
+    currentMirror.topologies.find(({ id }) => id === topology)!,
+    { parts, conditions },
+  ).results as Record<string, number>;
 
 const bench = { referenceCurrent: 500e-6, beta: 150, earlyVoltage: 50 };
 const oneK = { r1: 1e3, r2: 1e3 };
@@ -54,13 +57,17 @@ const approximated: Record<string, { exact: () => number; within: number }> = {
   "mir.early_pct": { exact: () => simple.earlyError! * 100, within: 3e-5 },
   "mir.simple_formula_uA": { exact: () => simple.outputCurrent! * 1e6, within: 2e-5 },
   // ΔV/(VT + I·R) is the first term of the exact mismatch.
-  "mir.degen_5mV_formula_pct": { exact: () => degenerated({ mismatchVoltage: 5e-3 }).mismatchError! * 100, within: 0.02 },
+  "mir.degen_5mV_formula_pct": {
+    exact: () => degenerated({ mismatchVoltage: 5e-3 }).mismatchError! * 100,
+    within: 0.02,
+  },
   // −VBE/VA with the inner pair's VBE taken alike; the output transistor's is lower by its own Early effect.
   "mir.wilson_early_pct": { exact: () => wilson.earlyError! * 100, within: 0.02 },
   // 500 µA at 22.7 V: the reference that gives this output current is smaller.
   "mir.P_mW": {
     exact: () =>
-      figures("simple", { ...bench, referenceCurrent: bench.referenceCurrent ** 2 / simple.outputCurrent! }).dissipation! * 1e3,
+      figures("simple", { ...bench, referenceCurrent: bench.referenceCurrent ** 2 / simple.outputCurrent! })
+        .dissipation! * 1e3,
     within: 2e-4,
   },
 };

@@ -86,4 +86,3 @@ export function activeCurrent(world: MirrorWorld, { solve, compliance }: MirrorS
   const spare = world.supply - point.outputCurrent * world.seriesResistance - compliance(point);
   return spare < 0 ? Number.NaN : point.outputCurrent;
 }
-

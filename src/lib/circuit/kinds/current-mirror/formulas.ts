@@ -139,7 +139,8 @@ export const wilsonFormulas: readonly Formula[] = [
     id: "textbook-output-resistance",
     name: "Output resistance, textbook",
     tex: String.raw`\frac{\beta\,r_o}{2},\quad r_o = \frac{V_A}{I_{ref}}`,
-    holds: "High by a few per cent against the slope of the exact solution at low VCE; left out without base currents.",
+    holds:
+      "Leaves out VCE, which raises it by VCE/VA, and a share near β·V_T/(2·V_A), which lowers it. Not stated without base currents.",
     sources: ["sedra-smith"],
   },
   {

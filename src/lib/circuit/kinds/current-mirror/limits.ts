@@ -18,8 +18,7 @@ const saturates: Limit<Parts, C, R> = {
   source: "memory",
   template:
     "The output needs {limit} more than it has: its voltage to spare is {value}, and its current is no longer a copy. Lower the current, the resistors, or the output's voltage.",
-  check: ({ results }) =>
-    results.headroom! < 0 ? { value: results.headroom!, limit: -results.headroom! } : undefined,
+  check: ({ results }) => (results.headroom! < 0 ? { value: results.headroom!, limit: -results.headroom! } : undefined),
 };
 
 const littleHeadroom: Limit<Parts, C, R> = {
@@ -89,7 +88,8 @@ const highCollectorVoltage: Limit<Parts, C, R> = {
     "{value} lies across the output transistor without degeneration, above {limit}: {detail}. Put a resistor in the output, or emitter resistors.",
   check: ({ results, conditions }) => {
     const { collectorEmitterVoltage: across, earlyError } = results;
-    if (conditions.earlyVoltage === null || across === undefined || (results.degenerationVoltage ?? 0) > 0) return undefined;
+    if (conditions.earlyVoltage === null || across === undefined || (results.degenerationVoltage ?? 0) > 0)
+      return undefined;
     if (across <= mostCollectorVoltage) return undefined;
     return {
       value: across,

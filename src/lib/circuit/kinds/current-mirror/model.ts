@@ -87,7 +87,7 @@ export function solvePair(world: MirrorWorld, r1: number, r2: number): MirrorPoi
       start + 1,
     ),
   );
-  checkResidual(solution.total / referenceCurrent - 1, solution.totalSlope / solution.total);
+  checkResidual(solution.total / referenceCurrent - 1, 1 + (solution.baseLine - solution.baseEmitter) / thermal);
   const { baseEmitter, baseLine, output } = solution;
   const slopesOf = (collector: number, transport: number) =>
     bipolarSlopes({ collector, transport, base: collector / beta }, world);
@@ -125,7 +125,7 @@ function outputOf(world: MirrorWorld, r2: number, drive: number) {
   const unloaded = Math.min(drive / thermal + logSaturation, most);
   if (emitterResistance === 0) {
     const { transport, current, slope } = collector(unloaded);
-    return { transport, current, slope: slope / thermal };
+    return { transport, current, slope: unloaded < most ? slope / thermal : 0 };
   }
   const residual = (u: number) => {
     const { current, slope } = collector(u);
@@ -139,7 +139,7 @@ function outputOf(world: MirrorWorld, r2: number, drive: number) {
   const start = a > 1 ? unloaded - (a - Math.log(a - Math.log(a))) : unloaded;
   const u = solveIncreasing(residual, start, unloaded - Math.max(residual(unloaded)[0], 0) / thermal - 1, unloaded);
   const { transport, current, slope } = collector(u);
-  return { transport, current, slope: slope / (thermal + emitterResistance * slope) };
+  return { transport, current, slope: u < most ? slope / (thermal + emitterResistance * slope) : 0 };
 }
 
 /** Wilson mirror of three transistors, exactly: the pair is closed by the output transistor's base. */
@@ -181,8 +181,8 @@ export function solveWilson(world: MirrorWorld): MirrorPoint {
   };
 }
 
-/** …and against how far the last digit of the logarithm that was solved for moves the sum. */
+/** …times how many times more steeply than the solved logarithm the sum may move. */
 function checkResidual(residual: number, steepness = 1): void {
-  if (!(Math.abs(residual) <= residualAllowed * Math.max(1, steepness)))
+  if (!(Math.abs(residual) <= residualAllowed * steepness))
     throw new Error(`mirror: the currents at the reference node are off balance by ${residual} of the reference`);
 }

@@ -30,8 +30,7 @@ export function pairResistance(
   const input = output.input / helperGain;
   const baseLine = (input * (emitter / divisor)) / (admittance + (outputs * input * (1 + emitter)) / divisor);
   const baseEmitter = ((1 + emitter) * baseLine - emitter) / divisor;
-  const current =
-    ((output.transconductance + output.output) * baseEmitter + output.output * (1 - baseLine)) / loaded;
+  const current = ((output.transconductance + output.output) * baseEmitter + output.output * (1 - baseLine)) / loaded;
   return 1 / current;
 }
 

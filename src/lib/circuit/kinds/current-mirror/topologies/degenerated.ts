@@ -52,7 +52,11 @@ function textbookResistance({ earlyVoltage, referenceCurrent, thermal, beta, sup
 /** Search bounds of R2, Ω: below, the resistor does nothing; above, no current is left. */
 const [leastR2, mostR2] = [1e-3, 1e9];
 
-function design(given: number | undefined, wanted: number, world: MirrorWorld): { r1: number; r2: number } | DesignRefusal {
+function design(
+  given: number | undefined,
+  wanted: number,
+  world: MirrorWorld,
+): { r1: number; r2: number } | DesignRefusal {
   const r1 = given ?? emitterResistor.default;
   const aim = wanted * world.referenceCurrent;
   const excess = (logR2: number) => Math.log(solvePair(world, r1, Math.exp(logR2)).outputCurrent / aim);
@@ -76,8 +80,7 @@ export const degenerated = defineTopology({
   conditions,
   targets,
   results,
-  analyse: ({ parts: values, conditions: given }) =>
-    mirrorFigures(worldOf(given), shapeOf(values, given.beta)),
+  analyse: ({ parts: values, conditions: given }) => mirrorFigures(worldOf(given), shapeOf(values, given.beta)),
   design: ({ targets: { ratio }, conditions: given, given: decided }) => design(decided.r1, ratio, worldOf(given)),
   anchors: [{ part: "r1", least: 100, most: 4.7e3 }],
   curves: mirrorCurves<typeof parts>((state) => shapeOf(state.parts, state.conditions.beta)),

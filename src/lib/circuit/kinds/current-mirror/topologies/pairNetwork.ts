@@ -4,8 +4,20 @@ import type { DrawnItem, Network } from "../../../stage/network.ts";
 function emitters(degenerated: boolean): DrawnItem[] {
   if (!degenerated)
     return [
-      { draw: "wire", through: [[6, 4], [6, 2]] },
-      { draw: "wire", through: [[14, 4], [14, 2]] },
+      {
+        draw: "wire",
+        through: [
+          [6, 4],
+          [6, 2],
+        ],
+      },
+      {
+        draw: "wire",
+        through: [
+          [14, 4],
+          [14, 2],
+        ],
+      },
     ];
   return [
     { draw: "part", part: "r1", symbol: "resistor", from: [6, 2], to: [6, 4], nodes: ["vp", "e1"] },
@@ -38,15 +50,41 @@ export function pairNetwork(degenerated: boolean): Network {
         at: [12, 6],
         nodes: { base: "b", collector: "o", emitter: e2! },
       },
-      { draw: "wire", through: [[8, 6], [12, 6]] },
+      {
+        draw: "wire",
+        through: [
+          [8, 6],
+          [12, 6],
+        ],
+      },
       { draw: "dot", at: [9, 6] },
-      { draw: "wire", through: [[9, 6], [9, 8], [6, 8]] },
+      {
+        draw: "wire",
+        through: [
+          [9, 6],
+          [9, 8],
+          [6, 8],
+        ],
+      },
       { draw: "dot", at: [6, 8] },
       { draw: "node", at: [6, 8], label: "b" },
-      { draw: "wire", through: [[6, 8], [6, 9]] },
+      {
+        draw: "wire",
+        through: [
+          [6, 8],
+          [6, 9],
+        ],
+      },
       { draw: "source", name: "Iref", sort: "current", from: [6, 9], to: [6, 13], nodes: ["b", "0"] },
       { draw: "ground", at: [6, 13] },
-      { draw: "wire", through: [[14, 8], [14, 10], [18, 10]] },
+      {
+        draw: "wire",
+        through: [
+          [14, 8],
+          [14, 10],
+          [18, 10],
+        ],
+      },
       { draw: "port", at: [18, 10], label: "out", side: "right" },
     ],
   };

@@ -38,7 +38,12 @@ export const simple = defineTopology({
   sources,
   network: pairNetwork(false),
   devices: [
-    { key: "q1", letter: "Q", label: "reference transistor", deviceClass: "general-purpose PNP, half of a matched pair" },
+    {
+      key: "q1",
+      letter: "Q",
+      label: "reference transistor",
+      deviceClass: "general-purpose PNP, half of a matched pair",
+    },
     { key: "q2", letter: "Q", label: "output transistor", deviceClass: "general-purpose PNP, half of a matched pair" },
   ],
   traits: [

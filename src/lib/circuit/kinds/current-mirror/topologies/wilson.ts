@@ -40,12 +40,31 @@ const network: Network = {
       at: [12, 4],
       nodes: { base: "b", collector: "b", emitter: "vp" },
     },
-    { draw: "wire", through: [[8, 4], [12, 4]] },
+    {
+      draw: "wire",
+      through: [
+        [8, 4],
+        [12, 4],
+      ],
+    },
     { draw: "dot", at: [11, 4] },
-    { draw: "wire", through: [[11, 4], [11, 6], [14, 6]] },
+    {
+      draw: "wire",
+      through: [
+        [11, 4],
+        [11, 6],
+        [14, 6],
+      ],
+    },
     { draw: "dot", at: [14, 6] },
     { draw: "node", at: [14, 6], label: "b" },
-    { draw: "wire", through: [[14, 6], [14, 8]] },
+    {
+      draw: "wire",
+      through: [
+        [14, 6],
+        [14, 8],
+      ],
+    },
     {
       draw: "transistor",
       name: "Q3",
@@ -53,13 +72,32 @@ const network: Network = {
       at: [12, 10],
       nodes: { base: "r", collector: "o", emitter: "b" },
     },
-    { draw: "wire", through: [[6, 6], [6, 13]] },
-    { draw: "wire", through: [[6, 10], [12, 10]] },
+    {
+      draw: "wire",
+      through: [
+        [6, 6],
+        [6, 13],
+      ],
+    },
+    {
+      draw: "wire",
+      through: [
+        [6, 10],
+        [12, 10],
+      ],
+    },
     { draw: "dot", at: [6, 10] },
     { draw: "node", at: [6, 10], label: "r" },
     { draw: "source", name: "Iref", sort: "current", from: [6, 13], to: [6, 17], nodes: ["r", "0"] },
     { draw: "ground", at: [6, 17] },
-    { draw: "wire", through: [[14, 12], [14, 14], [18, 14]] },
+    {
+      draw: "wire",
+      through: [
+        [14, 12],
+        [14, 14],
+        [18, 14],
+      ],
+    },
     { draw: "port", at: [18, 14], label: "out", side: "right" },
   ],
 };
