@@ -72,7 +72,7 @@ describe("current mirrors", () => {
   });
 
   it("stand stiffer the more they are degenerated, a Wilson mirror near β·ro/2", () => {
-    // β·ro/2 leaves out a share near β·VT/(2·VA).
+    // β·ro/2 leaves out shares near 2/β and β·VT/(2·VA).
     fc.assert(
       fc.property(gain, early, (beta, earlyVoltage) => {
         const conditions = { beta, earlyVoltage, outputVoltage: 0 };
@@ -84,7 +84,7 @@ describe("current mirrors", () => {
         expectRelative(
           wilson.outputResistance,
           (beta * inner) / 2,
-          0.02 + (beta * 25.7e-3) / (2 * earlyVoltage),
+          2 / beta + (beta * 25.7e-3) / (2 * earlyVoltage),
           "β·ro/2",
         );
       }),
