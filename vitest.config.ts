@@ -9,7 +9,7 @@ export default defineConfig({
         // Needs nothing: pure functions, and the repository's own files.
         test: {
           name: "unit",
-          include: folders("circuit", "kinds", "policy", "wire", "reference", "client", "project"),
+          include: folders("circuit", "kinds", "policy", "wire", "reference", "golden", "client", "project"),
           testTimeout: 20_000,
         },
       },

@@ -28,4 +28,4 @@ export { plotStage, type PlottedLine, type PlotRequest } from "./stage/plot.ts";
 export { meritStatement, solveStage, type Candidate, type Solution, type SolveRequest } from "./analysis/solve.ts";
 export { designExactly, isRefusal } from "./analysis/design.ts";
 export { sensitivities } from "./analysis/sensitivity.ts";
-export { libraryVersion } from "./version.ts";
+export { declaredChanges, libraryVersion, type DeclaredChange } from "./version.ts";
