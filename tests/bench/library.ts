@@ -1,0 +1,64 @@
+import { analyseStage, plotStage, spacedValues, type PlainConditions } from "#lib/circuit/index.ts";
+import { multipleFeedback } from "#lib/circuit/kinds/band-pass/topologies/multiple-feedback/index.ts";
+import { nodalResponse } from "../kinds/band-pass/network.ts";
+
+const pointsOfCurve = 400;
+
+export const subject = {
+  parts: { ra: 22e3, rb: 2200, rbPot: 2000, rf: 100e3, c1: 10e-9, c2: 10e-9 },
+  conditions: { gainBandwidth: 3e6, sourceResistance: 1e3, loadResistance: 10e3 } satisfies PlainConditions,
+  targets: { centreFrequency: 1000, qualityFactor: 3, peakGain: 2 },
+};
+
+const axis = { quantity: "Frequency", unit: "Hz", scale: "logarithmic" } as const;
+const at = spacedValues(axis, [100, 10e3], pointsOfCurve);
+
+/** A part that differs each time, so that no result could have been kept from the time before. */
+const varied = (turn: number) => ({ ...subject.parts, ra: subject.parts.ra * (1 + (turn % 1000) * 1e-6) });
+
+export const work: Record<string, (turn: number) => unknown> = {
+  analyse: (turn) => analyseStage(multipleFeedback, { ...subject, parts: varied(turn) }),
+  "400-point curve": (turn) =>
+    plotStage(multipleFeedback, { ...subject, parts: { ...varied(turn), rbPot: 0 }, curves: ["magnitude"], at }),
+  "400-point curve through mathjs": (turn) => {
+    const response = nodalResponse({ ...varied(turn), rbPot: 0 }, subject.conditions);
+    return at.map((frequency) => {
+      const { re, im } = response(frequency);
+      return 20 * Math.log10(Math.hypot(re, im));
+    });
+  },
+  /** What mathjs would need to read a centre and two edges to 1e-12 off the network: about 3 × 40 halvings. */
+  "analyse through mathjs": (turn) => {
+    const response = nodalResponse(varied(turn), subject.conditions);
+    const gain = (f: number) => {
+      const { re, im } = response(f);
+      return Math.hypot(re, im);
+    };
+    const peak = halve((f) => gain(f * (1 + 1e-7)) - gain(f * (1 - 1e-7)), 100, 10e3);
+    const edge = (from: number, to: number) => halve((f) => gain(f) - gain(peak) / Math.SQRT2, from, to);
+    return [peak, edge(10, peak), edge(peak, 100e3)];
+  },
+};
+
+function halve(f: (x: number) => number, from: number, to: number): number {
+  let [low, high] = [from, to];
+  const rising = f(low) < 0;
+  for (let i = 0; i < 40; i++) {
+    const middle = Math.sqrt(low * high);
+    if (f(middle) < 0 === rising) low = middle;
+    else high = middle;
+  }
+  return low;
+}
+
+/** Times per second over at least `seconds`, after as long a warm-up as a tenth of that. */
+export function rate(job: (turn: number) => unknown, seconds: number): number {
+  const run = (until: number) => {
+    const start = performance.now();
+    let turns = 0;
+    while (performance.now() - start < until * 1000) job(turns++);
+    return (turns * 1000) / (performance.now() - start);
+  };
+  run(seconds / 10);
+  return run(seconds);
+}
