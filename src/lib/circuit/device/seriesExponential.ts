@@ -1,0 +1,32 @@
+/** Newton's method settles within a dozen steps from the bound below; more means the arguments are no numbers. */
+const mostSteps = 200;
+
+/**
+ * The root u of u + scale·(e^(u/slope) − 1) = voltage: what a resistor and an exponential junction in series share.
+ *
+ * The left side rises and is convex, so Newton's method falls monotonically onto the root from any point above it. Two
+ * such points are known for a positive voltage: the voltage itself, and slope·ln(1 + voltage/scale).
+ *
+ * @param scale ≥ 0, volts
+ * @param slope > 0, volts
+ * @throws RangeError where the residual does not vanish to rounding
+ */
+export function solvedVoltage(voltage: number, scale: number, slope: number): number {
+  if (scale === 0) return voltage;
+  let u = voltage > 0 ? Math.min(voltage, slope * Math.log1p(voltage / scale)) : 0;
+  for (let step = 0; step < mostSteps; step++) {
+    const exponential = scale * Math.exp(u / slope);
+    const residual = u + exponential - scale - voltage;
+    const next = u - residual / (1 + exponential / slope);
+    if (next < u) {
+      u = next;
+      continue;
+    }
+    // The fall has ended on rounding, which the exponential magnifies by u/slope.
+    const rounding =
+      Number.EPSILON * (1 + Math.abs(u / slope)) * (Math.abs(u) + exponential + scale + Math.abs(voltage));
+    if (Math.abs(residual) <= 4 * rounding) return u;
+    break;
+  }
+  throw new RangeError(`solvedVoltage: no root for ${voltage} V, scale ${scale} V, slope ${slope} V`);
+}
