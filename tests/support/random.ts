@@ -2,11 +2,9 @@ import fc from "fast-check";
 import type { AnyTopology, ConditionField, NumberField, PlainConditions, PlainValues } from "#lib/circuit/index.ts";
 import { acceptedRange } from "#lib/circuit/index.ts";
 
-/** A figure spread evenly over its decades. */
+/** A figure spread evenly over its decades; plain draws of doubles would crowd around a logarithm of zero. */
 export const logarithmic = (least: number, most: number): fc.Arbitrary<number> =>
-  fc
-    .double({ min: Math.log(least), max: Math.log(most), noNaN: true })
-    .map((x) => Math.min(most, Math.max(least, Math.exp(x))));
+  fc.integer({ min: 0, max: 1_000_000 }).map((k) => Math.min(most, least * (most / least) ** (k / 1_000_000)));
 
 /**
  * A figure within the sane range of its field, stretched by `reach` on both sides but never past what is accepted.
