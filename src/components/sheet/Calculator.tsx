@@ -1,10 +1,11 @@
-import { useEffect, useRef, useState } from "react";
+import { lazy, Suspense, useEffect, useRef, useState } from "react";
 import { stageKinds } from "#lib/circuit/kinds/index.ts";
 import { writeAddress } from "#lib/wire/stageAddress.ts";
 import type { StageState } from "#lib/wire/stageState.ts";
-import { SaveToVoice } from "./SaveToVoice.tsx";
 import { StageSheet } from "./StageSheet.tsx";
 import { topologyOf } from "./useStage.ts";
+
+const SaveToVoice = lazy(() => import("./SaveToVoice.tsx").then((module) => ({ default: module.SaveToVoice })));
 
 interface CalculatorProps {
   kind: string;
@@ -56,7 +57,11 @@ export function Calculator({ kind: kindId, initial, signedIn }: CalculatorProps)
         )
       }
     >
-      {saving && <SaveToVoice kind={kind} topology={topology} state={state} />}
+      {saving && (
+        <Suspense fallback={<p className="save-panel">Looking up the team’s voices…</p>}>
+          <SaveToVoice kind={kind} topology={topology} state={state} />
+        </Suspense>
+      )}
     </StageSheet>
   );
 }

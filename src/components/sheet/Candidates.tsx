@@ -89,7 +89,7 @@ interface CandidateTableProps {
 }
 
 function CandidateTable({ stage, solution, stale, designators }: CandidateTableProps) {
-  const { topology, state, actions } = stage;
+  const { topology } = stage;
   const parts = Object.entries(topology.parts).filter(([key]) => solution.candidates.some((c) => c.parts[key]! > 0));
   const targets = Object.entries(topology.targets);
   return (
@@ -128,24 +128,29 @@ function CandidateTable({ stage, solution, stale, designators }: CandidateTableP
                 <GivenFigure key={key} stage={stage} candidate={candidate} target={key} />
               ))}
               <td className="right">
-                {sameParts(candidate.parts, state.parts) ? (
-                  <span className="text-small text-within">in use</span>
-                ) : (
-                  <button
-                    type="button"
-                    className="btn btn-small"
-                    aria-label={`Take number ${i + 1}`}
-                    onClick={() => actions.takeParts(candidate.parts)}
-                  >
-                    Take
-                  </button>
-                )}
+                <TakeButton stage={stage} candidate={candidate} rank={i + 1} />
               </td>
             </tr>
           ))}
         </tbody>
       </table>
     </div>
+  );
+}
+
+/** Stays the same button when its candidate is taken, so that the keyboard keeps its place. */
+function TakeButton({ stage, candidate, rank }: { stage: Stage; candidate: Candidate; rank: number }) {
+  const taken = sameParts(candidate.parts, stage.state.parts);
+  return (
+    <button
+      type="button"
+      className="btn btn-small"
+      aria-label={taken ? `Number ${rank} is in use` : `Take number ${rank}`}
+      aria-disabled={taken}
+      onClick={() => taken || stage.actions.takeParts(candidate.parts)}
+    >
+      {taken ? "In use" : "Take"}
+    </button>
   );
 }
 

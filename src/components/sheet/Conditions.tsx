@@ -116,10 +116,9 @@ function Figure({ stage, condition, field, id, readOnly }: ConditionProps<Number
       </div>
       <FieldNote
         control={form.control}
-        names={[`conditions.${condition}`]}
+        fields={[{ name: `conditions.${condition}`, inForce: formatQuantity(figure, field.unit) }]}
         id={`${id}-note`}
         hint={field.help}
-        inForce={formatQuantity(figure, field.unit)}
       />
     </>
   );

@@ -1,23 +1,32 @@
 import { useFormState, type Control, type FieldPath } from "react-hook-form";
 import type { StageFields } from "./fields.ts";
 
+interface NotedField {
+  name: FieldPath<StageFields>;
+  /** What is computed with while the field holds no figure. */
+  inForce: string;
+  /** Where several fields share the note. */
+  label?: string;
+}
+
 interface FieldNoteProps {
   control: Control<StageFields>;
   /** The first of these that has a fault speaks. */
-  names: FieldPath<StageFields>[];
+  fields: NotedField[];
   id: string;
   hint?: string | undefined;
-  /** What is computed with while the field holds no figure. */
-  inForce: string;
+  /** The hint itself tells of a fault. */
+  refused?: boolean;
 }
 
 /** The space under a field, always kept free: a hint, or what is wrong and what stands meanwhile. */
-export function FieldNote({ control, names, id, hint, inForce }: FieldNoteProps) {
-  const { errors } = useFormState({ control, name: names });
-  const fault = names.map((name) => messageAt(errors, name)).find((message) => message !== undefined);
+export function FieldNote({ control, fields, id, hint, refused = false }: FieldNoteProps) {
+  const { errors } = useFormState({ control, name: fields.map(({ name }) => name) });
+  const faulty = fields.find(({ name }) => messageAt(errors, name) !== undefined);
+  const label = faulty?.label === undefined ? "" : `${faulty.label}: `;
   return (
-    <p id={id} className={fault === undefined ? "field-note" : "field-note error"} aria-live="polite">
-      {fault === undefined ? hint : `${fault} Still in force: ${inForce}.`}
+    <p id={id} className={faulty || refused ? "field-note error" : "field-note"} aria-live="polite">
+      {faulty ? `${label}${messageAt(errors, faulty.name)} Still ${faulty.inForce}.` : hint}
     </p>
   );
 }

@@ -4,7 +4,7 @@ import { partText, readFigure } from "#lib/wire/figureText.ts";
 import { seriesOf, type SeriesChoice } from "#lib/wire/stageState.ts";
 import { FieldNote } from "./FieldNote.tsx";
 import { QuantityInput } from "./QuantityInput.tsx";
-import { SymbolText } from "./SymbolText.tsx";
+import { plainSymbol, SymbolText } from "./SymbolText.tsx";
 import type { Stage } from "./useStage.ts";
 
 interface PartsTableProps {
@@ -64,7 +64,11 @@ export function PartsTable({ stage, id, designators, readOnly, onLit }: PartsTab
       </table>
       <FieldNote
         control={stage.form.control}
-        names={entries.map(([key]) => `parts.${key}` as const)}
+        fields={entries.map(([key, field]) => ({
+          name: `parts.${key}` as const,
+          inForce: formatPartValue(stage.state.parts[key]!, field.unit),
+          label: designators[key] ?? plainSymbol(field.symbol),
+        }))}
         id={`${id}-note`}
         hint={
           readOnly
@@ -72,7 +76,6 @@ export function PartsTable({ stage, id, designators, readOnly, onLit }: PartsTab
             : "↑ ↓ step along the series, with Shift by ten." +
               (anyMoves ? ` “Moves”: per cent of ${result.label.toLowerCase()} for one per cent of the part.` : "")
         }
-        inForce="the last value that could be read"
       />
     </>
   );

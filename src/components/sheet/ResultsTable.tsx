@@ -133,11 +133,13 @@ function Cost({ row, ideal }: { row: Figure[]; ideal: Analysis["results"] }) {
       ? changeText(decibelsBefore, inDecibels.value, "dB")
       : undefined;
   const printed = printQuantity(before, main.field.unit);
+  const sameUnit = printed.unit === printQuantity(main.value, main.field.unit).unit;
   return (
     <span className="result-cost">
       <span className="sr-only">ideally </span>
       <span className="was">
-        {printed.figure} {printed.unit}
+        {printed.figure}
+        {sameUnit || printed.unit === "" ? "" : ` ${printed.unit}`}
       </span>{" "}
       <span className="cost">{main.field.unit !== "dB" && decibels !== undefined ? decibels : change}</span>
     </span>

@@ -1,10 +1,9 @@
-import { useDeferredValue, useId, useState, type ReactNode } from "react";
+import { lazy, Suspense, useDeferredValue, useId, useRef, useState, type ReactNode } from "react";
 import { stageKinds } from "#lib/circuit/kinds/index.ts";
 import type { StageState } from "#lib/wire/stageState.ts";
 import "../../styles/stage.css";
 import "../../styles/plot.css";
 import { NetworkDrawing } from "../network/NetworkDrawing.tsx";
-import { Candidates } from "./Candidates.tsx";
 import { Conditions } from "./Conditions.tsx";
 import { Curves } from "./Curves.tsx";
 import { PartsTable, SeriesChoosers } from "./PartsTable.tsx";
@@ -12,6 +11,8 @@ import { ResultsTable } from "./ResultsTable.tsx";
 import { Targets } from "./Targets.tsx";
 import { useStage } from "./useStage.ts";
 import { Warnings } from "./Warnings.tsx";
+
+const Candidates = lazy(() => import("./Candidates.tsx").then((module) => ({ default: module.Candidates })));
 
 export interface StageSheetProps {
   /** Id of a stage kind in the registry. */
@@ -40,6 +41,7 @@ export function StageSheet({ kind: kindId, initial, onChange, ...props }: StageS
   const [lit, setLit] = useState<string>();
   const [open, setOpen] = useState(false);
   const [keep, setKeep] = useState(false);
+  const opener = useRef<HTMLButtonElement>(null);
   const id = useId();
   const canSolve = !readOnly && Object.keys(topology.targets).length > 0 && Object.keys(topology.parts).length > 0;
   const fileName = `${kind.id}-${topology.id}`;
@@ -78,6 +80,7 @@ export function StageSheet({ kind: kindId, initial, onChange, ...props }: StageS
           {canSolve && (
             <div className="parts-foot needs-js no-print">
               <button
+                ref={opener}
                 type="button"
                 className="btn"
                 aria-expanded={open}
@@ -92,14 +95,19 @@ export function StageSheet({ kind: kindId, initial, onChange, ...props }: StageS
         </section>
         <div id={`${id}-candidates`} className="stage-candidates-place" hidden={!open}>
           {open && (
-            <Candidates
-              stage={stage}
-              id={`${id}-candidate`}
-              keep={keep}
-              onKeep={setKeep}
-              onClose={() => setOpen(false)}
-              designators={designators}
-            />
+            <Suspense fallback={<p className="stage-candidates">Working out parts…</p>}>
+              <Candidates
+                stage={stage}
+                id={`${id}-candidate`}
+                keep={keep}
+                onKeep={setKeep}
+                onClose={() => {
+                  setOpen(false);
+                  opener.current?.focus();
+                }}
+                designators={designators}
+              />
+            </Suspense>
           )}
         </div>
         <section className="stage-results" aria-labelledby={`${id}-results`}>

@@ -97,10 +97,13 @@ function TargetField({ stage, target, id, refusalId, readOnly }: TargetFieldProp
       </p>
       <FieldNote
         control={form.control}
-        names={[`targets.${target}`, `windows.${target}`]}
+        fields={[
+          { name: `targets.${target}`, inForce: formatQuantity(value, field.unit) },
+          { name: `windows.${target}`, inForce: `± ${windowText(width)} %` },
+        ]}
         id={`${id}-note`}
         hint={refused ? "No parts give this; the reason stands below." : field.help}
-        inForce={`${formatQuantity(value, field.unit)} ± ${windowText(width)} %`}
+        refused={refused}
       />
     </div>
   );

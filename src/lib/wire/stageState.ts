@@ -61,6 +61,26 @@ function start(topology: AnyTopology): StageState {
   };
 }
 
+/** A saved stage as a sheet takes it up: what was not saved stands at its usual value. */
+export function stateOfSaved(
+  topology: AnyTopology,
+  saved: {
+    parts: PlainValues;
+    conditions?: PlainConditions;
+    targets?: PlainValues;
+    windows?: PlainValues | undefined;
+  },
+): StageState {
+  return {
+    topology: topology.id,
+    targets: { ...defaultTargets(topology), ...saved.targets },
+    windows: { ...saved.windows },
+    parts: { ...defaultParts(topology), ...saved.parts },
+    conditions: completeConditions(topology, saved.conditions),
+    series: usualSeries,
+  };
+}
+
 /**
  * Parts a designer decides before the rest is worked out: the anchors, what follows them, and any pot that need not be
  * fitted.
