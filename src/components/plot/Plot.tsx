@@ -70,7 +70,7 @@ export function Plot({ topology, curve, stage, fileName, empty }: PlotProps) {
       </div>
       {model && (
         <>
-          <p className="plot-readout" aria-hidden="true">
+          <p className="plot-readout needs-js" aria-hidden="true">
             {at === null ? (
               <span className="dim">Point at the curve, or focus it and press ← →</span>
             ) : (
