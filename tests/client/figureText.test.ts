@@ -45,6 +45,7 @@ describe("what became of a figure", () => {
 
   it("has a sign unless it is nothing", () => {
     expect(errorText(0.0083)).toBe("+0.83\u00a0%");
+    expect(errorText(48e6)).toBe("+999\u00a0% and more");
     expect(errorText(0)).toBe("0\u00a0%");
     expect(errorText(-0.5)).toBe("\u221250\u00a0%");
   });

@@ -59,7 +59,7 @@ export function plotModel(
   const stretch = curve.domain(state);
   if (!stretch.every(Number.isFinite) || stretch[0] >= stretch[1]) return undefined;
   const factor = curve.x.shown?.factor ?? 1;
-  const plainXs = spacedValues(curve.x, stretch, count);
+  const plainXs = withMark(spacedValues(curve.x, stretch, count), curve.mark?.(state)?.x);
   const yFactor = curve.y.shown?.factor ?? 1;
   const lines = curve.lines(state).map(({ id, label, at }): PlotLine => ({
     id,
@@ -83,6 +83,13 @@ export function plotModel(
     ...(window && { window }),
     ...markOf(curve, state as never, factor, yFactor),
   };
+}
+
+/** The operating point is drawn exactly: a sharp peak would fall between two points. */
+function withMark(xs: number[], mark: number | undefined): number[] {
+  const [first, last] = [xs[0]!, xs.at(-1)!];
+  if (mark === undefined || !(mark > first && mark < last) || xs.includes(mark)) return xs;
+  return [...xs, mark].sort((a, b) => a - b);
 }
 
 const finite = (value: number) => (Number.isFinite(value) ? value : null);

@@ -100,6 +100,9 @@ function CandidateTable({ stage, solution, stale, designators }: CandidateTableP
             <th scope="col" className="right">
               <span className="sr-only">Rank</span>
             </th>
+            <th scope="col">
+              <span className="sr-only">Take</span>
+            </th>
             {parts.map(([key, field]) => (
               <th key={key} scope="col" className="right">
                 {designators[key] ?? <SymbolText symbol={field.symbol} />}
@@ -110,15 +113,15 @@ function CandidateTable({ stage, solution, stale, designators }: CandidateTableP
                 {field.label}
               </th>
             ))}
-            <th scope="col">
-              <span className="sr-only">Take</span>
-            </th>
           </tr>
         </thead>
         <tbody>
           {solution.candidates.map((candidate, i) => (
             <tr key={JSON.stringify(candidate.parts)}>
               <td className="right dim">{i + 1}</td>
+              <td>
+                <TakeButton stage={stage} candidate={candidate} rank={i + 1} />
+              </td>
               {parts.map(([key, field]) => (
                 <td key={key} className="right val">
                   {formatPartValue(candidate.parts[key]!, field.unit)}
@@ -127,9 +130,6 @@ function CandidateTable({ stage, solution, stale, designators }: CandidateTableP
               {targets.map(([key]) => (
                 <GivenFigure key={key} stage={stage} candidate={candidate} target={key} />
               ))}
-              <td className="right">
-                <TakeButton stage={stage} candidate={candidate} rank={i + 1} />
-              </td>
             </tr>
           ))}
         </tbody>

@@ -22,7 +22,9 @@ export function errorText(share: number): string {
 
 function percentText(share: number): string {
   const percent = share * 100;
-  return `${percent >= 1000 ? percent.toExponential(1) : percent >= 100 ? percent.toFixed(0) : percent.toPrecision(percent < 0.1 ? 1 : 2)}\u00a0%`;
+  // Beyond ten times too much nobody reads digits.
+  if (percent > 999) return "999\u00a0% and more";
+  return `${percent >= 100 ? percent.toFixed(0) : percent.toPrecision(percent < 0.1 ? 1 : 2)}\u00a0%`;
 }
 
 const signed = (value: number, text: string) => `${value < 0 ? "\u2212" : "+"}${text}`;
