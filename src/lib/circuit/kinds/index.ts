@@ -2,7 +2,14 @@ import type { StageKind } from "../stage/kind.ts";
 import { bandPass } from "./band-pass/index.ts";
 import { currentMirror } from "./current-mirror/index.ts";
 import { decayEnvelope } from "./decay-envelope/index.ts";
+import { triggerInput } from "./trigger-input/index.ts";
 import { voltageToCurrent } from "./voltage-to-current/index.ts";
 
 /** Every stage kind, in the order a voice is built. Adding one: its folder and a line here. */
-export const stageKinds: readonly StageKind[] = [decayEnvelope, voltageToCurrent, currentMirror, bandPass];
+export const stageKinds: readonly StageKind[] = [
+  triggerInput,
+  decayEnvelope,
+  voltageToCurrent,
+  currentMirror,
+  bandPass,
+];
