@@ -2,6 +2,7 @@ import fc from "fast-check";
 import { describe, expect, it } from "vitest";
 import { designExactly, isRefusal, solveStage, type PlainConditions, type PlainValues } from "#lib/circuit/index.ts";
 import { multipleFeedback } from "#lib/circuit/kinds/band-pass/topologies/multiple-feedback/index.ts";
+import { idealResistors, largestGain } from "#lib/circuit/kinds/band-pass/topologies/multiple-feedback/model.ts";
 import { expectRelative } from "../../support/approx.ts";
 import { analyseChange } from "../../support/limitCase.ts";
 import { conditionsOf, logarithmic, partsOf, runs, targetsOf } from "../../support/random.ts";
@@ -35,6 +36,22 @@ describe("the multiple-feedback band-pass", () => {
         expectRelative(got["noiseBandwidth"], (Math.PI / 2) * bandwidth, 1e-11, "noise bandwidth");
         // Below this the −3 dB points lie so far apart that their difference is all there is to lose digits.
         expectRelative(got["bandwidth"], bandwidth, 1e-9, "bandwidth");
+      }),
+      runs(300),
+    );
+  });
+
+  it("is sized exactly for any pair of capacitors, with an ideal op amp", () => {
+    fc.assert(
+      fc.property(targetsOf(multipleFeedback), capacitor, logarithmic(0.2, 5), (targets, c1, ratio) => {
+        const { centreFrequency, qualityFactor, peakGain } = targets as Record<string, number>;
+        const c2 = c1 * ratio;
+        const exact = idealResistors(centreFrequency!, qualityFactor!, peakGain!, c1, c2);
+        expect(exact.rb > 0).toBe(peakGain! < largestGain(qualityFactor!, c1, c2));
+        if (exact.rb <= 0) return;
+        const got = results({ ...exact, rbPot: 0, c1, c2 });
+        // Near its limit RB takes up what is left of two nearly equal conductances.
+        for (const [key, wanted] of Object.entries(targets)) expectRelative(got[key], wanted, 1e-9, key);
       }),
       runs(300),
     );

@@ -59,7 +59,7 @@ export function solveStage(topology: AnyTopology, request: SolveRequest): Soluti
   const given = request.given ?? {};
   const designs: { parts: PlainValues; decided: Set<string> }[] = [];
   let refusal: DesignRefusal | undefined;
-  for (const anchored of anchorChoices(topology, given, request.series?.capacitor ?? "E12")) {
+  for (const anchored of anchorChoices(topology, given, request.series ?? {})) {
     const decided = { ...given, ...anchored };
     const parts = designExactly(topology, request.targets, conditions, decided);
     if (isRefusal(parts)) refusal ??= parts;
@@ -83,11 +83,20 @@ export function solveStage(topology: AnyTopology, request: SolveRequest): Soluti
   };
 }
 
-/** The anchor values to try: those given, else every member of the series in the anchor's range. */
-function* anchorChoices(topology: AnyTopology, given: PlainValues, series: SeriesName): Generator<PlainValues> {
+/**
+ * The anchor values to try: those given, else steps of E12 over the anchor's range, each moved to the nearest member of
+ * its part's own series, so that every value exists and a fine series does not multiply the work.
+ */
+function* anchorChoices(
+  topology: AnyTopology,
+  given: PlainValues,
+  series: NonNullable<SolveRequest["series"]>,
+): Generator<PlainValues> {
   const choices = topology.anchors.map(({ part, least, most, follows = [] }) => {
     const fixed = given[part];
-    const values = fixed === undefined ? seriesBetween(series, least, most) : [fixed];
+    const own = seriesOf(topology.parts[part]!.partClass, series);
+    const steps = seriesBetween("E12", least, most).map((value) => nearestInSeries(value, own)[0]!);
+    const values = fixed === undefined ? [...new Set(steps)] : [fixed];
     return values.map((value) => Object.fromEntries([part, ...follows].map((key) => [key, given[key] ?? value])));
   });
   yield* product(choices).map((chosen) => Object.assign({}, ...chosen) as PlainValues);
@@ -100,19 +109,19 @@ function snapped(
   decided: Set<string>,
   series: NonNullable<SolveRequest["series"]>,
 ): PlainValues[] {
-  const usual: Record<PartClass, ValueSeries> = {
-    resistor: series.resistor ?? "E24",
-    capacitor: series.capacitor ?? "E12",
-    pot: "pots",
-  };
   let varied = 0;
   const choices = Object.entries(topology.parts).map(([key, field]) => {
     const value = exact[key]!;
     if (decided.has(key) || value === 0) return [[key, value] as const];
     const count = varied++ < variedParts ? neighbours : 1;
-    return nearestInSeries(value, usual[field.partClass], count).map((near) => [key, near] as const);
+    return nearestInSeries(value, seriesOf(field.partClass, series), count).map((near) => [key, near] as const);
   });
   return product(choices).map((entries) => Object.fromEntries(entries));
+}
+
+function seriesOf(partClass: PartClass, series: NonNullable<SolveRequest["series"]>): ValueSeries {
+  if (partClass === "pot") return "pots";
+  return partClass === "resistor" ? (series.resistor ?? "E24") : (series.capacitor ?? "E12");
 }
 
 function weigh(

@@ -1,7 +1,7 @@
-import { minus, plus, reciprocal, size, times, type Complex } from "./complex.ts";
+import { aberth } from "./aberth.ts";
+import { size, type Complex } from "./complex.ts";
 import { trim, type Polynomial } from "./polynomial.ts";
 
-const maxIterations = 200;
 const leastNormal = 2 ** -1022;
 
 /**
@@ -27,7 +27,7 @@ export function findRoots(p: Polynomial): Complex[] {
   if (gap) return [...findRoots(coefficients.slice(0, gap + 1)), ...findRoots(coefficients.slice(gap))];
   if (degree === 1) return [{ re: -coefficients[0]! / coefficients[1]!, im: 0 }];
   if (degree === 2) return quadraticRoots(coefficients[0]!, coefficients[1]!, coefficients[2]!);
-  return aberth(coefficients).map(snapToReal);
+  return iterated(coefficients).map(snapToReal);
 }
 
 /** Roots farther apart than this do not move each other by as much as rounding does. */
@@ -68,59 +68,23 @@ function quadraticRoots(c0: number, c1: number, c2: number): Complex[] {
   ];
 }
 
-function aberth(c: number[]): Complex[] {
-  const roots = startingPoints(c);
-  const settled = roots.map(() => false);
-  for (let iteration = 0; iteration < maxIterations && settled.includes(false); iteration++) {
-    for (const [k, root] of roots.entries()) {
-      if (settled[k]) continue;
-      const ratio = newtonRatio(c, root);
-      if (ratio === undefined) {
-        settled[k] = true;
-        continue;
-      }
-      const sum = roots.reduce((s, other, j) => (j === k ? s : plus(s, reciprocal(minus(root, other)))), {
-        re: 0,
-        im: 0,
-      });
-      const step = times(ratio, reciprocal(minus({ re: 1, im: 0 }, times(ratio, sum))));
-      roots[k] = minus(root, step);
-      if (size(step) <= 4 * Number.EPSILON * size(roots[k])) settled[k] = true;
-    }
-  }
-  // A cluster settles more slowly than a simple root; rounding alone decides its last digits.
-  if (roots.some((r) => !Number.isFinite(r.re) || !Number.isFinite(r.im)))
-    throw new RangeError("findRoots: no convergence");
-  return roots;
-}
-
-/** p(z)/p'(z), or undefined where p(z) is already below its rounding error. Large |z| goes through the reversed polynomial. */
-function newtonRatio(c: number[], z: Complex): Complex | undefined {
-  const n = c.length - 1;
-  const radius = size(z);
-  if (radius <= 1) {
-    const { value, slope, bound } = horner(c, z);
-    if (size(value) <= bound) return undefined;
-    return times(value, reciprocal(slope));
-  }
-  const w = reciprocal(z);
-  const { value, slope, bound } = horner([...c].reverse(), w);
-  if (size(value) <= bound) return undefined;
-  // p(z) = zⁿ r(1/z), so p/p' = z r / (n r − w r').
-  return times(times(z, value), reciprocal(minus({ re: n * value.re, im: n * value.im }, times(w, slope))));
-}
-
-function horner(c: readonly number[], z: Complex) {
-  let value: Complex = { re: c.at(-1)!, im: 0 };
-  let slope: Complex = { re: 0, im: 0 };
-  let bound = Math.abs(c.at(-1)!);
-  const radius = size(z);
-  for (let i = c.length - 2; i >= 0; i--) {
-    slope = plus(times(slope, z), value);
-    value = plus(times(value, z), { re: c[i]!, im: 0 });
-    bound = bound * radius + size(value);
-  }
-  return { value, slope, bound: bound * 4 * Number.EPSILON };
+/**
+ * The iteration on roots brought near to size one by a power of two, which costs no digit: their squares then neither
+ * overflow nor vanish.
+ */
+function iterated(c: readonly number[]): Complex[] {
+  const degree = c.length - 1;
+  const unit = 2 ** Math.round((Math.log2(Math.abs(c[0]!)) - Math.log2(Math.abs(c[degree]!))) / degree);
+  const scaled = c.map((coefficient, i) => {
+    let value = coefficient / c[degree]!;
+    // Step by step, since unit ** i may overflow where the product does not.
+    for (let k = i; k < degree; k++) value /= unit;
+    return value;
+  });
+  const start = startingPoints(scaled);
+  const [re, im] = [start.map((z) => z.re), start.map((z) => z.im)];
+  aberth(scaled, re, im);
+  return re.map((x, k) => ({ re: x * unit, im: im[k]! * unit }));
 }
 
 /** The upper convex hull of the points (i, log|cᵢ|); its slopes are the logarithms of the radii on which roots lie. */
@@ -141,7 +105,7 @@ function upperHull(c: readonly number[]): { i: number; log: number }[] {
 }
 
 /** Radii from the hull, spread in angle. */
-function startingPoints(c: number[]): Complex[] {
+function startingPoints(c: readonly number[]): Complex[] {
   const hull = upperHull(c);
   return hull.slice(1).flatMap((to, k) => {
     const from = hull[k]!;
