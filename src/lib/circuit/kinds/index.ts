@@ -1,5 +1,6 @@
 import type { StageKind } from "../stage/kind.ts";
 import { bandPass } from "./band-pass/index.ts";
+import { burstEnvelope } from "./burst-envelope/index.ts";
 import { currentMirror } from "./current-mirror/index.ts";
 import { decayEnvelope } from "./decay-envelope/index.ts";
 import { triggerInput } from "./trigger-input/index.ts";
@@ -9,6 +10,7 @@ import { voltageToCurrent } from "./voltage-to-current/index.ts";
 export const stageKinds: readonly StageKind[] = [
   triggerInput,
   decayEnvelope,
+  burstEnvelope,
   voltageToCurrent,
   currentMirror,
   bandPass,
