@@ -3,6 +3,7 @@ import { bandPass } from "./band-pass/index.ts";
 import { burstEnvelope } from "./burst-envelope/index.ts";
 import { currentMirror } from "./current-mirror/index.ts";
 import { decayEnvelope } from "./decay-envelope/index.ts";
+import { otaCell } from "./ota-cell/index.ts";
 import { triggerInput } from "./trigger-input/index.ts";
 import { voltageToCurrent } from "./voltage-to-current/index.ts";
 
@@ -14,4 +15,5 @@ export const stageKinds: readonly StageKind[] = [
   voltageToCurrent,
   currentMirror,
   bandPass,
+  otaCell,
 ];

@@ -1,0 +1,142 @@
+import { common } from "../../stage/commonConditions.ts";
+import { choice, condition, resistor, target } from "../../stage/fields.ts";
+
+export const inputParts = {
+  rin: resistor({
+    label: "input",
+    symbol: "R_in",
+    default: 33e3,
+    least: 1e3,
+    most: 220e3,
+    help: "From the source to the non-inverting input.",
+  }),
+  rsh: resistor({
+    label: "shunt",
+    symbol: "R_sh",
+    default: 1e3,
+    least: 100,
+    most: 10e3,
+    help: "From that input to ground; with R_in it divides the signal to millivolts.",
+  }),
+} as const;
+
+export const targets = {
+  gain: target({
+    label: "Gain at this bias current",
+    symbol: "|A|",
+    unit: "",
+    default: 2.5,
+    least: 0.1,
+    most: 50,
+    window: 0.1,
+    result: "gain",
+    help: "As a ratio, for small signals.",
+  }),
+} as const;
+
+export const conditions = {
+  biasCurrent: condition({
+    label: "Bias current",
+    symbol: "I_abc",
+    unit: "A",
+    default: 500e-6,
+    least: 1e-9,
+    most: 2e-3,
+    help: "Into the bias pin, at the peak of the envelope.",
+  }),
+  diodeCurrent: condition({
+    label: "Diode current",
+    symbol: "I_D",
+    unit: "A",
+    default: 0,
+    least: 0,
+    most: 1.5e-3,
+    suggestion: 1e-3,
+    help: "Into the linearising diodes; 0 where they are unused.",
+  }),
+  signal: choice({
+    label: "Signal",
+    symbol: "",
+    default: "sine",
+    options: [
+      { value: "sine", label: "sine" },
+      { value: "noise", label: "noise" },
+    ],
+  }),
+  sourcePeak: condition({
+    label: "Source, peak",
+    symbol: "V_pk",
+    unit: "V",
+    default: null,
+    least: 1e-3,
+    most: 10,
+    suggestion: 0.4,
+    help: "Of a sine; of noise, four times its RMS.",
+  }),
+  sourceRms: condition({
+    label: "Source, RMS",
+    symbol: "V_rms",
+    unit: "V",
+    default: null,
+    least: 1e-3,
+    most: 10,
+    suggestion: 0.2,
+    help: "Goes before the peak where the signal is noise.",
+  }),
+  sourceResistance: common.sourceResistance,
+  offsetVoltage: common.offsetVoltage,
+  resistanceMismatch: condition({
+    label: "Mismatch of the input resistances",
+    symbol: "m",
+    unit: "",
+    default: 0,
+    least: 0,
+    most: 0.02,
+    accepts: [0, 1],
+    suggestion: 0.01,
+  }),
+  balanceResistance: condition({
+    label: "Resistor at the other input",
+    symbol: "R_n",
+    unit: "Ω",
+    default: null,
+    least: 10,
+    most: 10e3,
+    suggestion: 1e3,
+    help: "Left out, it equals what the first input sees.",
+  }),
+  beta: common.beta,
+  trimResistance: condition({
+    label: "Offset trim through",
+    symbol: "R_t",
+    unit: "Ω",
+    default: null,
+    least: 100e3,
+    most: 10e6,
+    suggestion: 2.2e6,
+    help: "From a pot between the rails to the other input; left out, no trim.",
+  }),
+  temperature: common.temperature,
+  railPositive: common.railPositive,
+  railNegative: common.railNegative,
+  biasDrive: choice({
+    label: "Bias pin driven by",
+    symbol: "",
+    default: "current",
+    options: [
+      { value: "current", label: "a current source" },
+      { value: "resistor", label: "a voltage through a resistor" },
+      { value: "voltage", label: "a voltage, nothing in series" },
+    ],
+  }),
+  otherHalf: choice({
+    label: "Other half of the package",
+    symbol: "",
+    default: "used",
+    options: [
+      { value: "used", label: "used" },
+      { value: "terminated", label: "unused, terminated" },
+      { value: "open", label: "unused, left open" },
+    ],
+  }),
+} as const;
