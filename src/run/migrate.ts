@@ -1,9 +1,10 @@
-import { fileURLToPath } from "node:url";
+import { resolve } from "node:path";
 import { drizzle } from "drizzle-orm/postgres-js";
 import { migrate } from "drizzle-orm/postgres-js/migrator";
 import postgres from "postgres";
 
-const migrationsFolder = fileURLToPath(new URL("../../migrations", import.meta.url));
+// Every command of this project runs in the checkout's root, wherever the server was bundled to.
+const migrationsFolder = resolve("migrations");
 
 // Any number will do, as long as every server process takes the same one and nothing else in the database does.
 const lockNumber = 4_703_318_642;

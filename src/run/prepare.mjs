@@ -98,6 +98,7 @@ export async function ensureBuild(folder, signal) {
     const astro = join("node_modules", "astro", "astro.js");
     const env = { OUT_DIR: folder, ASTRO_TELEMETRY_DISABLED: "1", NODE_ENV: "production" };
     await run(process.execPath, [astro, "build", "--silent"], { signal, env, label: "The build" });
+    await run(process.execPath, [join("src", "run", "bundle.mjs")], { signal, env, label: "The server's bundle" });
     // Written last, so that a build which was interrupted is not taken for a whole one.
     writeFileSync(stamp, hash);
   });

@@ -46,7 +46,7 @@ function settingsOf(databaseUrl, demo) {
 function serve(env) {
   const args = developing
     ? ["--import", "tsx", join("src", "run", "develop.ts")]
-    : ["--import", "tsx", join("src", "run", "serve.ts")];
+    : ["--enable-source-maps", join(env.OUT_DIR || "dist", "run", "serve.mjs")];
   return new Promise((resolve, reject) => {
     server = spawn(process.execPath, args, { cwd: checkout, env, stdio: ["ignore", "inherit", "inherit", "ipc"] });
     server.once("error", reject);

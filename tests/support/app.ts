@@ -17,11 +17,11 @@ const outDir = process.env.OUT_DIR ?? "dist";
 
 /** Starts the built application on a free port, in demo mode against this test file's own database unless told otherwise. */
 export async function startApp(settings: Record<string, string> = {}): Promise<RunningApp> {
-  if (!existsSync(join(outDir, "server", "entry.mjs")))
+  if (!existsSync(join(outDir, "run", "serve.mjs")))
     throw new Error(`There is no build in ${outDir}: npm run build makes one.`);
   // Told that it is being tested, the sign-in would leave out its checks of where a request comes from.
   const { PUBLIC_URL: _, NODE_ENV: __, TEST: ___, ...inherited } = process.env;
-  const child = spawn(process.execPath, ["--import", "tsx", "src/run/serve.ts"], {
+  const child = spawn(process.execPath, [join(outDir, "run", "serve.mjs")], {
     env: { ...inherited, HOST: "127.0.0.1", PORT: "0", OUT_DIR: outDir, ...settings },
     stdio: ["ignore", "pipe", "pipe", "ipc"],
   });
