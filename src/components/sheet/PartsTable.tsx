@@ -1,3 +1,4 @@
+import type { ReactNode } from "react";
 import { formatPartValue, formatQuantity, formatTyped, seriesNames, type PartField } from "#lib/circuit/index.ts";
 import { stepPart } from "#lib/client/stage/stepping.ts";
 import { partText, readFigure } from "#lib/wire/figureText.ts";
@@ -7,17 +8,24 @@ import { QuantityInput } from "./QuantityInput.tsx";
 import { plainSymbol, SymbolText } from "./SymbolText.tsx";
 import type { Stage } from "./useStage.ts";
 
+/** Designators that can be typed over. */
+export interface PartMarks {
+  field: (part: string, noteId: string) => ReactNode;
+  fault: string | undefined;
+}
+
 interface PartsTableProps {
   stage: Stage;
   id: string;
   designators: Record<string, string>;
+  marks: PartMarks | undefined;
   readOnly: boolean;
   /** Tells which part's field has the focus, so that the network can show it. */
   onLit: (part: string | undefined) => void;
 }
 
 /** The parts: what the targets call for exactly, and what is chosen. */
-export function PartsTable({ stage, id, designators, readOnly, onLit }: PartsTableProps) {
+export function PartsTable({ stage, id, designators, marks, readOnly, onLit }: PartsTableProps) {
   const { topology, telling, exact, moves } = stage;
   const entries = Object.entries(topology.parts);
   if (entries.length === 0) return <p className="text-ink-2">This network has no parts of its own to choose.</p>;
@@ -54,6 +62,7 @@ export function PartsTable({ stage, id, designators, readOnly, onLit }: PartsTab
               field={field}
               id={`${id}-${key}`}
               designator={designators[key]}
+              markField={marks?.field(key, `${id}-note`) || undefined}
               exact={exact?.[key]}
               moves={anyMoves ? (moves[key] ?? null) : undefined}
               readOnly={readOnly}
@@ -70,11 +79,13 @@ export function PartsTable({ stage, id, designators, readOnly, onLit }: PartsTab
           label: designators[key] ?? plainSymbol(field.symbol),
         }))}
         id={`${id}-note`}
+        refused={marks?.fault !== undefined}
         hint={
           readOnly
             ? undefined
-            : "↑ ↓ step along the series, with Shift by ten." +
-              (anyMoves ? ` “Moves”: per cent of ${result.label.toLowerCase()} for one per cent of the part.` : "")
+            : (marks?.fault ??
+              "↑ ↓ step along the series, with Shift by ten." +
+                (anyMoves ? ` “Moves”: per cent of ${result.label.toLowerCase()} for one per cent of the part.` : ""))
         }
       />
     </>
@@ -87,6 +98,8 @@ interface PartRowProps {
   field: PartField;
   id: string;
   designator: string | undefined;
+  /** Stands in place of the designator where that can be typed over. */
+  markField: ReactNode;
   exact: number | undefined;
   /** Null where this part has none, undefined where no part has. */
   moves: number | null | undefined;
@@ -94,15 +107,18 @@ interface PartRowProps {
   onLit: (part: string | undefined) => void;
 }
 
-function PartRow({ stage, part, field, id, designator, exact, moves, readOnly, onLit }: PartRowProps) {
+function PartRow({ stage, part, field, id, designator, markField, exact, moves, readOnly, onLit }: PartRowProps) {
   const { state, form, actions } = stage;
   const value = state.parts[part]!;
   const series = seriesOf(field.partClass, state.series);
   return (
     <tr>
-      <th scope="row">
+      <th scope="row" className={markField ? "with-mark-field" : undefined}>
+        {markField}
         <label htmlFor={id}>
-          <span className="val part-mark">{designator ?? <SymbolText symbol={field.symbol} />}</span>{" "}
+          <span className={markField ? "sr-only" : "val part-mark"}>
+            {designator ?? <SymbolText symbol={field.symbol} />}
+          </span>{" "}
           <span className="text-ink-2">{field.label}</span>
         </label>
       </th>

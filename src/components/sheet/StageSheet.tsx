@@ -6,7 +6,7 @@ import "../../styles/plot.css";
 import { NetworkDrawing } from "../network/NetworkDrawing.tsx";
 import { Conditions } from "./Conditions.tsx";
 import { Curves } from "./Curves.tsx";
-import { PartsTable, SeriesChoosers } from "./PartsTable.tsx";
+import { PartsTable, SeriesChoosers, type PartMarks } from "./PartsTable.tsx";
 import { ResultsTable } from "./ResultsTable.tsx";
 import { Targets } from "./Targets.tsx";
 import { useStage } from "./useStage.ts";
@@ -22,9 +22,9 @@ export interface StageSheetProps {
   onChange?: ((state: StageState) => void) | undefined;
   /** By part, where the stage stands in a voice. */
   designators?: Record<string, string> | undefined;
+  /** Where the designators can be typed over. */
+  marks?: PartMarks | undefined;
   readOnly?: boolean;
-  /** Heading and aside of the sheet; the topology's own where left out. */
-  name?: string;
   /** Buttons at the right of the heading. */
   actions?: ReactNode;
   /** Between the heading and the columns: how a save went. */
@@ -33,7 +33,7 @@ export interface StageSheetProps {
 
 /** One stage as the work goes: targets, parts, results, curves, and what the figures leave out. */
 export function StageSheet({ kind: kindId, initial, onChange, ...props }: StageSheetProps) {
-  const { designators = {}, readOnly = false, name, actions, children } = props;
+  const { designators = {}, marks, readOnly = false, actions, children } = props;
   const kind = stageKinds.find(({ id }) => id === kindId)!;
   const stage = useStage(kind, initial, { onChange });
   const { topology, state } = stage;
@@ -49,10 +49,8 @@ export function StageSheet({ kind: kindId, initial, onChange, ...props }: StageS
   return (
     <div className="sheet stage">
       <div className="sheet-head">
-        <h2>{name ?? topology.name}</h2>
-        <p className="aside">
-          {name === undefined ? topology.summary : `${kind.name}, ${topology.name.toLowerCase()}`}
-        </p>
+        <h2>{topology.name}</h2>
+        <p className="aside">{topology.summary}</p>
         {actions !== undefined && <div className="act">{actions}</div>}
       </div>
       {children}
@@ -64,7 +62,14 @@ export function StageSheet({ kind: kindId, initial, onChange, ...props }: StageS
         </section>
         <section className="stage-parts" aria-labelledby={`${id}-parts`}>
           <h3 id={`${id}-parts`}>Parts</h3>
-          <PartsTable stage={stage} id={`${id}-part`} designators={designators} readOnly={readOnly} onLit={setLit} />
+          <PartsTable
+            stage={stage}
+            id={`${id}-part`}
+            designators={designators}
+            marks={marks}
+            readOnly={readOnly}
+            onLit={setLit}
+          />
           {topology.devices.length > 0 && (
             <ul className="devices" aria-label="Devices">
               {topology.devices.map((device) => (

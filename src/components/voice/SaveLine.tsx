@@ -1,12 +1,17 @@
+import { useId } from "react";
 import type { StageSave } from "#lib/client/useStageSave.ts";
 import type { StoredStage } from "#lib/client/workingCopy.ts";
+import { longestStageName } from "#lib/wire/stageName.ts";
 
 interface SaveLineProps {
   voiceId: string;
-  stage: StoredStage;
   saving: StageSave;
-  /** Why saving is not offered, for a role that only reads. */
-  readOnly?: string | undefined;
+  /** The stage as it would be saved, or null where a field says why it cannot be. */
+  savable: () => StoredStage | null;
+  onTurnBack: () => void;
+  name: string;
+  nameFault: string | undefined;
+  onName: (name: string) => void;
 }
 
 const words = {
@@ -16,25 +21,49 @@ const words = {
   saved: "Saved in the working copy",
 } as const;
 
-/** Saves the stage and says how that went, beside the work and for as long as it matters. */
-export function SaveLine({ voiceId, stage, saving, readOnly }: SaveLineProps) {
+/** Names and saves the stage, and says how that went, beside the work and for as long as it matters. */
+export function SaveLine({ voiceId, saving, savable, onTurnBack, name, nameFault, onName }: SaveLineProps) {
   const { state, save, saveOverNewer } = saving;
-  if (readOnly !== undefined) return <p className="note">{readOnly}</p>;
+  const id = useId();
   const signIn = `/sign-in?next=${encodeURIComponent(`/voices/${voiceId}`)}`;
+  const busy = state.kind === "saving";
+  const changed = state.kind !== "untouched" && state.kind !== "saved" && !busy;
+  const send = (by: (stage: StoredStage) => Promise<void>) => {
+    const stage = busy ? null : savable();
+    if (stage !== null) void by(stage);
+  };
   return (
     <div>
-      <p className="flex flex-wrap items-center gap-x-4 gap-y-2">
-        <button
-          type="button"
-          className="btn btn-primary"
-          aria-disabled={state.kind === "saving"}
-          onClick={() => state.kind !== "saving" && void save(stage)}
-        >
+      <div className="save-row">
+        <span className="field">
+          <label htmlFor={`${id}-name`}>Name of the stage</label>
+          <input
+            id={`${id}-name`}
+            className="input stage-name"
+            value={name}
+            maxLength={longestStageName}
+            autoComplete="off"
+            aria-invalid={nameFault !== undefined || undefined}
+            aria-describedby={`${id}-note`}
+            onChange={(event) => onName(event.target.value)}
+          />
+        </span>
+        <button type="button" className="btn btn-primary" aria-disabled={busy} onClick={() => send(save)}>
           Save stage
         </button>
-        <span className="text-small text-ink-2" role="status">
-          {state.kind in words ? words[state.kind as keyof typeof words] : "Not saved"}
-        </span>
+        <button
+          type="button"
+          className="btn"
+          aria-disabled={!changed}
+          onClick={() => {
+            if (changed) onTurnBack();
+          }}
+        >
+          Back to the saved values
+        </button>
+      </div>
+      <p id={`${id}-note`} className={nameFault === undefined ? "field-note" : "field-note error"} role="status">
+        {nameFault ?? (state.kind in words ? words[state.kind as keyof typeof words] : "Not saved")}
       </p>
       <div role="alert">
         {state.kind === "conflict" && (
@@ -42,10 +71,10 @@ export function SaveLine({ voiceId, stage, saving, readOnly }: SaveLineProps) {
             <strong>Someone saved a newer copy of this voice.</strong> Your values are still here.{" "}
             {state.current === null
               ? "The newer copy could not be read; try again in a moment."
-              : "Put this stage into the newer copy, which leaves its other stages as they are, or look at the newer copy first."}
+              : "Put this stage into the newer copy, which leaves its other stages as they are; or look at the newer copy first; or give up your values for its."}
             <span className="mt-2 flex flex-wrap gap-x-4 gap-y-2">
               {state.current !== null && (
-                <button type="button" className="btn" onClick={() => void saveOverNewer(stage)}>
+                <button type="button" className="btn" onClick={() => send(saveOverNewer)}>
                   Put this stage into the newer copy
                 </button>
               )}

@@ -5,11 +5,15 @@ export type SaveState = { kind: "untouched" } | { kind: "unsaved" } | { kind: "s
 
 export interface StageSave {
   state: SaveState;
+  /** The newest saved copy there is word of. */
+  newest: WorkingCopy;
   /** Call on every change by hand, so that leaving the page asks first. */
   touch: () => void;
   save: (stage: StoredStage) => Promise<void>;
   /** After a conflict: puts this stage into the newer copy and leaves everything else of it as it is. */
   saveOverNewer: (stage: StoredStage) => Promise<void>;
+  /** Gives up what is not saved; answers with the copy to show instead. */
+  turnBack: () => WorkingCopy;
 }
 
 /** Keeps one stage of a voice: what is on screen is never replaced, however a save ends. */
@@ -39,6 +43,13 @@ export function useStageSave(voiceId: string, start: WorkingCopy): StageSave {
     [send, state],
   );
 
+  const newest = state.kind === "conflict" && state.current !== null ? state.current : copy;
+  const turnBack = useCallback(() => {
+    setCopy(newest);
+    setState({ kind: "untouched" });
+    return newest;
+  }, [newest]);
+
   const atRisk = state.kind !== "untouched" && state.kind !== "saved";
   useEffect(() => {
     if (!atRisk) return undefined;
@@ -47,5 +58,5 @@ export function useStageSave(voiceId: string, start: WorkingCopy): StageSave {
     return () => window.removeEventListener("beforeunload", ask);
   }, [atRisk]);
 
-  return { state, touch, save, saveOverNewer };
+  return { state, newest, touch, save, saveOverNewer, turnBack };
 }

@@ -1,8 +1,10 @@
 import { z } from "zod";
-import { designatorLetters, type AnyTopology } from "#lib/circuit/index.ts";
+import type { AnyTopology } from "#lib/circuit/index.ts";
 import { stageKinds } from "#lib/circuit/kinds/index.ts";
 import { topologySchemas } from "./calculator.ts";
+import { designatorFault } from "./designator.ts";
 import { faultText } from "./faultText.ts";
+import { longestStageName, stageNameFault } from "./stageName.ts";
 
 const word = z.string().min(1).max(60);
 const values = z.record(z.string(), z.union([z.number(), z.string().max(40), z.null()]));
@@ -12,7 +14,11 @@ const looseStage = z.strictObject({
   id: word.meta({ description: "Chosen by the sender; unique in the voice" }),
   kind: word,
   topology: word,
-  name: z.string().trim().min(1).max(120),
+  name: z
+    .string()
+    .trim()
+    .refine((text) => stageNameFault(text) === undefined, { error: ({ input }) => stageNameFault(String(input)) })
+    .meta({ minLength: 1, maxLength: longestStageName }),
   parts: values.meta({ description: "By role" }),
   conditions: values.default({}),
   targets: values.default({}),
@@ -74,15 +80,11 @@ function check<T>(context: Context, place: string, schema: z.ZodType<T>, value: 
   return undefined;
 }
 
-/** R for resistors, C for capacitors, RV for pots, and a number without leading zeros (IEEE 315 class letters). */
 function checkDesignators(context: Context, topology: AnyTopology, designators: Record<string, string>): void {
   for (const [part, designator] of Object.entries(designators)) {
     const field = topology.parts[part];
-    if (!field) fail(context, ["designators", part], "There is no such part in this topology.");
-    else if (!new RegExp(`^${designatorLetters[field.partClass]}[1-9]\\d{0,4}$`).test(designator)) {
-      const letter = designatorLetters[field.partClass];
-      fail(context, ["designators", part], `Write ${letter} and a number, such as ${letter}12.`);
-    }
+    const fault = field ? designatorFault(field.partClass, designator) : "There is no such part in this topology.";
+    if (fault !== undefined) fail(context, ["designators", part], fault);
   }
 }
 
