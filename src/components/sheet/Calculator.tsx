@@ -2,6 +2,7 @@ import { lazy, Suspense, useEffect, useRef, useState } from "react";
 import { stageKinds } from "#lib/circuit/kinds/index.ts";
 import { writeAddress } from "#lib/wire/stageAddress.ts";
 import type { StageState } from "#lib/wire/stageState.ts";
+import type { VoiceChoice } from "./SaveToVoice.tsx";
 import { StageSheet } from "./StageSheet.tsx";
 import { topologyOf } from "./useStage.ts";
 
@@ -11,26 +12,33 @@ interface CalculatorProps {
   kind: string;
   initial: StageState;
   signedIn: boolean;
+  /** The voice that the stage is meant for, where this person may edit it. */
+  voice?: VoiceChoice | undefined;
+  /** As the address names it, known or not. */
+  voiceId?: string | null;
 }
 
 /** Browsers refuse more than about a hundred address changes in half a minute. */
 const pause = 350;
 
 /** The public calculator: a stage sheet whose state stands in the page's address, so that a link shares it. */
-export function Calculator({ kind: kindId, initial, signedIn }: CalculatorProps) {
+export function Calculator({ kind: kindId, initial, signedIn, voice, voiceId = null }: CalculatorProps) {
   const kind = stageKinds.find(({ id }) => id === kindId)!;
   const [state, setState] = useState(initial);
   const [saving, setSaving] = useState(false);
   const timer = useRef<ReturnType<typeof setTimeout>>(undefined);
   const topology = topologyOf(kind, state.topology);
-  const address = `/calculators/${kind.id}?${writeAddress(topology, state)}`;
+  const queryOf = (next: StageState) => {
+    const query = writeAddress(topologyOf(kind, next.topology), next);
+    return voiceId === null ? query : `${query}&voice=${encodeURIComponent(voiceId)}`;
+  };
+  const address = `/calculators/${kind.id}?${queryOf(state)}`;
 
   const onChange = (next: StageState) => {
     setState(next);
     clearTimeout(timer.current);
     timer.current = setTimeout(() => {
-      const query = writeAddress(topologyOf(kind, next.topology), next);
-      window.history.replaceState(window.history.state, "", `?${query}`);
+      window.history.replaceState(window.history.state, "", `?${queryOf(next)}`);
     }, pause);
   };
   useEffect(() => () => clearTimeout(timer.current), []);
@@ -59,7 +67,7 @@ export function Calculator({ kind: kindId, initial, signedIn }: CalculatorProps)
     >
       {saving && (
         <Suspense fallback={<p className="save-panel">Looking up the team’s voices…</p>}>
-          <SaveToVoice kind={kind} topology={topology} state={state} />
+          <SaveToVoice kind={kind} topology={topology} state={state} meant={voice} />
         </Suspense>
       )}
     </StageSheet>

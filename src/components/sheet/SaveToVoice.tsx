@@ -3,15 +3,18 @@ import type { AnyTopology, StageKind } from "#lib/circuit/index.ts";
 import { failureText, request } from "#lib/client/request.ts";
 import { appendStage } from "#lib/client/stage/appendStage.ts";
 import type { StoredStage } from "#lib/client/workingCopy.ts";
+import { longestStageName, stageNameFault } from "#lib/wire/stageName.ts";
 import type { StageState } from "#lib/wire/stageState.ts";
 
 interface SaveToVoiceProps {
   kind: StageKind;
   topology: AnyTopology;
   state: StageState;
+  /** The voice that was left to add this stage. */
+  meant?: VoiceChoice | undefined;
 }
 
-interface VoiceChoice {
+export interface VoiceChoice {
   id: string;
   name: string;
   can?: { editWorkingCopy?: boolean };
@@ -24,10 +27,10 @@ type Saving =
   | { kind: "failed"; message: string };
 
 /** Puts the stage into the working copy of a voice, with the voice's next free designators. */
-export function SaveToVoice({ kind, topology, state }: SaveToVoiceProps) {
+export function SaveToVoice({ kind, topology, state, meant }: SaveToVoiceProps) {
   const id = useId();
   const [voices, setVoices] = useState<VoiceChoice[] | string | null>(null);
-  const [chosen, setChosen] = useState("");
+  const [chosen, setChosen] = useState(meant?.id ?? "");
   const [name, setName] = useState(kind.name);
   const [saving, setSaving] = useState<Saving>({ kind: "idle" });
 
@@ -36,24 +39,23 @@ export function SaveToVoice({ kind, topology, state }: SaveToVoiceProps) {
     const load = async () => {
       const answer = await request<{ voices: VoiceChoice[] }>("/api/voices?limit=200&sort=name");
       if (left) return;
-      setVoices(
-        answer.kind === "done"
-          ? answer.body.voices.filter((voice) => voice.can?.editWorkingCopy !== false)
-          : failureText(answer),
-      );
+      if (answer.kind !== "done") return setVoices(failureText(answer));
+      const listed = answer.body.voices.filter((voice) => voice.can?.editWorkingCopy !== false);
+      const isListed = listed.some((voice) => voice.id === meant?.id);
+      setVoices(meant && !isListed ? [meant, ...listed] : listed);
     };
     void load();
     return () => {
       left = true;
     };
-  }, []);
+  }, [meant]);
 
   const voice = Array.isArray(voices) ? (voices.find((v) => v.id === chosen) ?? voices[0]) : undefined;
   const save = async (event: SyntheticEvent) => {
     event.preventDefault();
     if (!voice || saving.kind === "saving") return;
-    if (name.trim() === "")
-      return setSaving({ kind: "failed", message: "Give the stage a name, such as Body or Snap." });
+    const fault = stageNameFault(name);
+    if (fault !== undefined) return setSaving({ kind: "failed", message: fault });
     setSaving({ kind: "saving" });
     const outcome = await appendStage(voice.id, { kind, topology, state, name: name.trim() });
     setSaving(
@@ -95,7 +97,7 @@ export function SaveToVoice({ kind, topology, state }: SaveToVoiceProps) {
               id={`${id}-name`}
               className="input"
               value={name}
-              maxLength={120}
+              maxLength={longestStageName}
               autoComplete="off"
               onChange={(e) => setName(e.target.value)}
             />
@@ -107,10 +109,11 @@ export function SaveToVoice({ kind, topology, state }: SaveToVoiceProps) {
       )}
       <div aria-live="polite">
         {saving.kind === "saved" && (
-          <p className="done">
+          <p className="done wrap-anywhere">
             <strong>Saved.</strong> {saving.stage.name} stands in {saving.voice.name} as{" "}
             <span className="val">{Object.values(saving.stage.designators).join(" ")}</span>.{" "}
-            <a href={`/voices/${saving.voice.id}/stages/${saving.stage.id}`}>Open it there</a>
+            <a href={`/voices/${saving.voice.id}/stages/${saving.stage.id}`}>Open it there</a>, or go back to{" "}
+            <a href={`/voices/${saving.voice.id}`}>all stages of {saving.voice.name}</a>.
           </p>
         )}
         {saving.kind === "failed" && (
