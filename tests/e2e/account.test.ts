@@ -2,7 +2,7 @@ import type { Browser } from "playwright-core";
 import { afterAll, beforeAll, expect, test } from "vitest";
 import { startApp, type RunningApp } from "../support/app.ts";
 import { launchBrowser, openPage } from "../support/browser.ts";
-import { hydrated, signInAs, visit } from "./visit.ts";
+import { hydrated, openMemberPage, signInAs, visit } from "./visit.ts";
 
 let app: RunningApp;
 let browser: Browser;
@@ -77,6 +77,62 @@ test("a wrong password says so, keeps the address and takes the focus to the mes
   await message.getByText("No account has this e-mail address and password.").waitFor();
   expect(await message.evaluate((box) => box === document.activeElement)).toBe(true);
   expect(await page.getByLabel("E-mail").inputValue()).toBe("owner@demo.test");
+  await close();
+});
+
+test("a forgotten password is replaced by the mailed link, which works once", async () => {
+  const { page, consoleErrors, close } = await openPage(browser);
+  await visit(page, `${app.url}/sign-in`);
+  await page.getByRole("link", { name: "Set a new password" }).click();
+  await hydrated(page);
+  await page.getByLabel("E-mail").fill("builder@demo.test");
+  await page.getByRole("button", { name: "Send a link" }).click();
+  await page.getByText("If builder@demo.test belongs to an account").waitFor();
+
+  await page.goto(`${app.url}/mail`);
+  await page
+    .getByRole("row", { name: /builder@demo\.test/ })
+    .getByRole("link")
+    .click();
+  const link = page.locator("main").getByRole("link", { name: /reset-password/ });
+  const address = await link.getAttribute("href");
+  await link.click();
+  await page.waitForURL(/\/reset-password\?token=/);
+  await hydrated(page);
+  await page.getByLabel("New password").fill("short");
+  await page.getByRole("button", { name: "Set the password" }).click();
+  await page.getByText("Use at least 8 characters.").waitFor();
+  await page.getByLabel("New password").fill("a quieter phrase");
+  await page.getByRole("button", { name: "Set the password" }).click();
+  await page.getByText("The new password is set. Sign in with it.").waitFor();
+  await hydrated(page);
+  expect(consoleErrors.splice(0)).toEqual([]);
+
+  await page.getByLabel("E-mail").fill("builder@demo.test");
+  await page.getByLabel("Password").fill("clatter-demo-1");
+  await page.getByRole("button", { name: "Sign in", exact: true }).click();
+  await page.getByText("No account has this e-mail address and password.").waitFor();
+  await page.getByLabel("Password").fill("a quieter phrase");
+  await page.getByRole("button", { name: "Sign in", exact: true }).click();
+  await page.waitForURL(`${app.url}/voices`);
+
+  await page.goto(address ?? "");
+  await page.waitForURL(/\/reset-password\?error=INVALID_TOKEN/);
+  await close();
+});
+
+test("the account menu closes on Escape and by a press elsewhere", async () => {
+  const { page, consoleErrors, close } = await openMemberPage(browser, app.url, "reviewer");
+  const menu = page.locator("details.menu");
+  await menu.locator("summary").press("Enter");
+  await page.getByRole("link", { name: "Your account" }).focus();
+  await page.keyboard.press("Escape");
+  expect(await menu.getAttribute("open")).toBeNull();
+  expect(await menu.locator("summary").evaluate((summary) => summary === document.activeElement)).toBe(true);
+  await menu.locator("summary").click();
+  await page.getByRole("heading", { level: 1 }).click();
+  expect(await menu.getAttribute("open")).toBeNull();
+  expect(consoleErrors).toEqual([]);
   await close();
 });
 

@@ -2,7 +2,7 @@ import type { Browser, Page } from "playwright-core";
 import { afterAll, beforeAll, expect, test } from "vitest";
 import { startApp, type RunningApp } from "../support/app.ts";
 import { launchBrowser, openPage } from "../support/browser.ts";
-import { hydrated, signInAs, visit } from "./visit.ts";
+import { hydrated, openMemberPage, visit } from "./visit.ts";
 
 let app: RunningApp;
 let browser: Browser;
@@ -63,15 +63,14 @@ test("from targets without an account to a stage saved in a voice, and found aga
 });
 
 test("nothing typed is lost to a colleague's save, a lost connection or an expired sign-in", async () => {
-  const { page, close } = await openPage(browser);
-  await signInAs(page, app.url, "designer");
+  const { page, close } = await openMemberPage(browser, app.url, "designer");
   await page.getByRole("link", { name: "Woodpeck" }).click();
   await page.locator("main table a").first().click();
   await page.getByRole("heading", { name: "Targets" }).waitFor();
   await hydrated(page);
   const address = page.url();
   const copy = `/api${new URL(address).pathname.replace(/\/stages\/.*/, "")}/working-copy`;
-  const input = field(page, /input/);
+  const input = field(page, /^R\d+ input/);
   const save = page.getByRole("button", { name: "Save stage" });
 
   await input.fill("18k");
@@ -107,13 +106,86 @@ test("nothing typed is lost to a colleague's save, a lost connection or an expir
   await save.click();
   await page.getByText("Saved in the working copy").waitFor();
   await visit(page, address);
-  expect(await field(page, /input/).inputValue()).toBe("20k");
+  expect(await input.inputValue()).toBe("20k");
+  await close();
+});
+
+test("designators and the name are edited, refused at the field, taken back, and saved together", async () => {
+  const { page, consoleErrors, close } = await openMemberPage(browser, app.url, "designer");
+  await visit(page, `${app.url}/calculators/band-pass`);
+  await page.getByRole("button", { name: "Save to a voice" }).click();
+  await page.getByLabel("Voice", { exact: true }).selectOption({ label: "Shingle" });
+  await page.getByLabel("Name of the stage").fill("Rattle");
+  await page.getByRole("button", { name: "Save stage" }).click();
+  await page.getByRole("link", { name: "Open it there" }).click();
+  await page.getByRole("heading", { level: 1, name: "Rattle" }).waitFor();
+  await hydrated(page);
+
+  const mark = field(page, /^Designator of RA/);
+  const given = await mark.inputValue();
+  const save = page.getByRole("button", { name: "Save stage" });
+  await mark.fill("C7");
+  await save.click();
+  await page.getByText("Write R and a number, such as R12.").waitFor();
+  expect(await mark.evaluate((input) => input === document.activeElement)).toBe(true);
+  await mark.fill("r1");
+  await page.getByText(/R1 is taken in .+\. Choose another number\./).waitFor();
+  await field(page, /^Name of the stage/).fill("");
+  await page.getByText("Give the stage a name, such as Body or Snap.").waitFor();
+  await field(page, /^Quality factor/).fill("4");
+
+  await page.getByRole("button", { name: "Back to the saved values" }).click();
+  await page.getByText("As it stands in the working copy").waitFor();
+  expect(await mark.inputValue()).toBe(given);
+  expect(await field(page, /^Quality factor/).inputValue()).toBe("3");
+  expect(await field(page, /^Name of the stage/).inputValue()).toBe("Rattle");
+  expect(await save.evaluate((button) => button === document.activeElement)).toBe(true);
+
+  await mark.fill("r81");
+  await mark.press("Tab");
+  expect(await mark.inputValue()).toBe("R81");
+  await field(page, /^Name of the stage/).fill("Sizzle");
+  await save.click();
+  await page.getByText("Saved in the working copy").waitFor();
+  await page.getByRole("heading", { level: 1, name: "Sizzle" }).waitFor();
+  await visit(page, page.url());
+  expect(await mark.inputValue()).toBe("R81");
+  await page.getByRole("heading", { level: 1, name: "Sizzle" }).waitFor();
+  expect(consoleErrors).toEqual([]);
+  await close();
+});
+
+test("a voice asks for a stage, and signing in on the way keeps the voice and the values", async () => {
+  const member = await openMemberPage(browser, app.url, "designer");
+  await member.page.getByRole("link", { name: "Woodpeck" }).click();
+  await member.page.getByRole("link", { name: "Band-pass", exact: true }).click();
+  await member.page.waitForURL(/\/calculators\/band-pass\?voice=/);
+  const address = member.page.url();
+  await member.close();
+
+  const { page, consoleErrors, close } = await openPage(browser);
+  await visit(page, address);
+  await field(page, /input/).fill("13k7");
+  await page.getByRole("link", { name: "Sign in to save to a voice" }).click();
+  await hydrated(page);
+  await page.getByRole("button", { name: "designer", exact: true }).click();
+  await page.getByRole("button", { name: "Sign in", exact: true }).click();
+  await page.waitForURL(/\/calculators\/band-pass/);
+  await hydrated(page);
+  expect(await field(page, /input/).inputValue()).toBe("13k7");
+  await page.getByRole("button", { name: "Save to a voice" }).click();
+  const voice = page.getByLabel("Voice", { exact: true });
+  expect(await voice.locator("option:checked").textContent()).toBe("Woodpeck");
+  await page.getByLabel("Name of the stage").fill("Knock");
+  await page.getByRole("button", { name: "Save stage" }).click();
+  await page.getByRole("link", { name: "all stages of Woodpeck" }).click();
+  await page.getByRole("row", { name: /Knock/ }).waitFor();
+  expect(consoleErrors).toEqual([]);
   await close();
 });
 
 test("a reviewer reads the stage and cannot change it", async () => {
-  const { page, consoleErrors, close } = await openPage(browser);
-  await signInAs(page, app.url, "reviewer");
+  const { page, consoleErrors, close } = await openMemberPage(browser, app.url, "reviewer");
   await page.getByRole("link", { name: "Woodpeck" }).click();
   await page.locator("main table a").first().click();
   await page.getByText("As reviewer you read this working copy.").waitFor();

@@ -1,8 +1,8 @@
 import type { Browser, Page } from "playwright-core";
 import { afterAll, beforeAll, expect, test } from "vitest";
 import { startApp, type RunningApp } from "../support/app.ts";
-import { launchBrowser, openPage } from "../support/browser.ts";
-import { hydrated, signInAs, visit } from "./visit.ts";
+import { launchBrowser } from "../support/browser.ts";
+import { hydrated, openMemberPage, visit } from "./visit.ts";
 
 let app: RunningApp;
 let browser: Browser;
@@ -60,8 +60,7 @@ async function saveStageBeside(page: Page, path: string, id: string): Promise<vo
 }
 
 test("a voice is created, found in the list, renamed and deleted", async () => {
-  const { page, consoleErrors, close } = await openPage(browser);
-  await signInAs(page, app.url, "designer");
+  const { page, consoleErrors, close } = await openMemberPage(browser, app.url, "designer");
   await createVoice(page, "Tin roof");
   await page.getByText("No stage yet.").waitFor();
 
@@ -92,19 +91,19 @@ test("a voice is created, found in the list, renamed and deleted", async () => {
 });
 
 test("removing a stage keeps what somebody else saved meanwhile", async () => {
-  const { page, consoleErrors, close } = await openPage(browser);
-  await signInAs(page, app.url, "designer");
+  const { page, consoleErrors, close } = await openMemberPage(browser, app.url, "designer");
   const path = await createVoice(page, "Shared bench");
   await saveStageBeside(page, path, "first");
   await visit(page, app.url + path);
   await saveStageBeside(page, path, "second");
 
+  await page.getByRole("button", { name: "Rename, move or remove" }).click();
   await page
     .getByRole("row", { name: /Band first/ })
     .getByRole("button", { name: "Remove" })
     .click();
   await page.getByRole("button", { name: "Remove it" }).click();
-  await page.getByText("Band first was removed.").waitFor();
+  await page.getByText("Band first was removed. Somebody else saved this voice meanwhile").waitFor();
   await visit(page, app.url + path);
   await page.getByRole("link", { name: "Band second" }).waitFor();
   expect(await page.getByRole("link", { name: "Band first" }).count()).toBe(0);
@@ -113,9 +112,59 @@ test("removing a stage keeps what somebody else saved meanwhile", async () => {
   await close();
 });
 
+test("stages are moved by the keyboard, renamed, and stay so", async () => {
+  const { page, consoleErrors, close } = await openMemberPage(browser, app.url, "designer");
+  const path = await createVoice(page, "Order of play");
+  await saveStageBeside(page, path, "one");
+  await saveStageBeside(page, path, "two");
+  await saveStageBeside(page, path, "three");
+  await visit(page, app.url + path);
+  const names = () => page.locator("tbody th > a").allTextContents();
+
+  await page.getByRole("button", { name: "Rename, move or remove" }).click();
+  const up = page.getByRole("group", { name: "Change Band three" }).getByRole("button", { name: "Move up" });
+  await up.focus();
+  await page.keyboard.press("Enter");
+  await page.getByText("Band three stands one place earlier.").waitFor();
+  expect(await names()).toEqual(["Band one", "Band three", "Band two"]);
+  await page.waitForFunction(() => document.activeElement?.textContent === "Move up");
+  await page.keyboard.press("Enter");
+  await page.waitForFunction(() => document.querySelector("tbody th > a")?.textContent === "Band three");
+  expect(await up.getAttribute("aria-disabled")).toBe("true");
+
+  await page.getByRole("group", { name: "Change Band two" }).getByRole("button", { name: "Rename" }).click();
+  const field = page.getByLabel("Name of the stage");
+  await field.fill(" ");
+  await page.getByRole("button", { name: "Rename", exact: true }).last().click();
+  await page.getByText("Give the stage a name, such as Body or Snap.").waitFor();
+  await field.fill("Tail");
+  await field.press("Enter");
+  await page.getByText("Band two is now Tail.").waitFor();
+
+  await visit(page, app.url + path);
+  expect(await names()).toEqual(["Band three", "Band one", "Tail"]);
+  expect(consoleErrors).toEqual([]);
+  await close();
+});
+
+test("names of 120 letters without a space fit, wide and narrow", async () => {
+  const { page, close } = await openMemberPage(browser, app.url, "designer");
+  const path = await createVoice(page, "W".repeat(120));
+  await saveStageBeside(page, path, "M".repeat(55));
+  for (const address of [path, `${path}/stages/${"M".repeat(55)}`, `/calculators/band-pass?voice=${path.slice(8)}`]) {
+    await visit(page, app.url + address);
+    for (const width of [1440, 1024, 390]) {
+      await page.setViewportSize({ width, height: 900 });
+      expect(await page.evaluate(() => document.documentElement.scrollWidth - window.innerWidth)).toBeLessThanOrEqual(
+        0,
+      );
+    }
+  }
+  await close();
+});
+
 test("a builder reads a voice and is offered nothing that a builder may not do", async () => {
-  const { page, consoleErrors, close } = await openPage(browser);
-  await signInAs(page, app.url, "builder");
+  const { page, consoleErrors, close } = await openMemberPage(browser, app.url, "builder");
   await page.getByText("Voices are created by a designer or an owner of the team.").waitFor();
   await page.getByRole("link", { name: "Shingle" }).click();
   await page.getByRole("heading", { name: "Stages" }).waitFor();

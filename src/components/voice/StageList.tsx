@@ -133,10 +133,12 @@ export function StageList({ voiceId, rows, copy, editable }: StageListProps) {
                   />
                 )}
               </th>
-              <td>
+              <td className="gives">
                 {row.figures.map(({ label, value, unit }) => (
-                  <span key={label} className="block whitespace-nowrap">
-                    <span className="fig">{value}</span> <span className="dim">{unit}</span>{" "}
+                  <span key={label} className="block">
+                    <span className="fig whitespace-nowrap">
+                      {value} <span className="dim">{unit}</span>
+                    </span>{" "}
                     <span className="text-small text-ink-2">{label}</span>
                   </span>
                 ))}
