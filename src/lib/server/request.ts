@@ -8,18 +8,25 @@ const bodyLimit = 1_000_000;
 const tooLarge = (limitBytes: number) =>
   new Refusal("too-large", `The body may hold at most ${Math.floor(limitBytes / 1000)} kB. Nothing was changed.`);
 
-async function readText(request: Request, limitBytes: number): Promise<string> {
-  if (Number(request.headers.get("content-length") ?? 0) > limitBytes) throw tooLarge(limitBytes);
-  if (!request.body) return "";
+async function readChunks(body: ReadableStream<Uint8Array>, limitBytes: number): Promise<Buffer> {
   const chunks: Uint8Array[] = [];
   let size = 0;
-  for await (const chunk of request.body as unknown as AsyncIterable<Uint8Array>) {
+  for await (const chunk of body as unknown as AsyncIterable<Uint8Array>) {
     size += chunk.byteLength;
     if (size > limitBytes) throw tooLarge(limitBytes);
     chunks.push(chunk);
   }
+  return Buffer.concat(chunks);
+}
+
+async function readText(request: Request, limitBytes: number): Promise<string> {
+  const announced = Number(request.headers.get("content-length") ?? 0);
+  if (announced > limitBytes) throw tooLarge(limitBytes);
+  if (!request.body) return "";
+  // An announced length is kept to by the HTTP parser, so the body can be taken in one piece, which is quicker.
+  const bytes = announced > 0 ? Buffer.from(await request.arrayBuffer()) : await readChunks(request.body, limitBytes);
   try {
-    return new TextDecoder("utf-8", { fatal: true }).decode(Buffer.concat(chunks));
+    return new TextDecoder("utf-8", { fatal: true }).decode(bytes);
   } catch {
     throw new Refusal("malformed-json", "The body is not UTF-8 text. Nothing was changed.");
   }
