@@ -67,7 +67,7 @@ export function StageList({ voiceId, rows, copy, editable }: StageListProps) {
     }
     const foreign = !sameStages(edit(current.document), outcome.copy.document);
     setCurrent(outcome.copy);
-    setMessage({ kind: "done", text: foreign ? <ForeignSave done={done} /> : done });
+    setMessage({ kind: "done", text: foreign ? <ForeignSave voiceId={voiceId} done={done} /> : done });
     return true;
   };
 
@@ -157,10 +157,11 @@ export function StageList({ voiceId, rows, copy, editable }: StageListProps) {
   );
 }
 
-function ForeignSave({ done }: { done: string }) {
+function ForeignSave({ voiceId, done }: { voiceId: string; done: string }) {
   return (
     <>
-      {done} Somebody else saved this voice meanwhile: <a href="">load the page again</a> to see their changes as well.
+      {done} Somebody else saved this voice meanwhile: <a href={`/voices/${voiceId}`}>load the page again</a> to see
+      their changes as well.
     </>
   );
 }
