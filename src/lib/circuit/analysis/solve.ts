@@ -76,7 +76,7 @@ export function solveStage(topology: AnyTopology, request: SolveRequest): Soluti
   return {
     exact: {
       parts: exactParts,
-      results: finite(topology.analyse({ parts: exactParts, conditions: conditions as never })),
+      results: finite(topology.analyse({ parts: exactParts, conditions: conditions as never }, request.targets)),
     },
     candidates: candidates.slice(0, request.count ?? 12),
     tried: combinations.length,
@@ -130,7 +130,7 @@ function weigh(
   conditions: PlainConditions,
   request: SolveRequest,
 ): Candidate | undefined {
-  const results = finite(topology.analyse({ parts, conditions: conditions as never }));
+  const results = finite(topology.analyse({ parts, conditions: conditions as never }, request.targets));
   const errors: PlainValues = {};
   let merit = impedanceWeight * impedanceCost(topology, parts);
   for (const [key, wanted] of Object.entries(request.targets)) {

@@ -5,6 +5,7 @@ import { currentMirror } from "./current-mirror/index.ts";
 import { decayEnvelope } from "./decay-envelope/index.ts";
 import { otaCell } from "./ota-cell/index.ts";
 import { triggerInput } from "./trigger-input/index.ts";
+import { trim } from "./trim/index.ts";
 import { voltageToCurrent } from "./voltage-to-current/index.ts";
 
 /** Every stage kind, in the order a voice is built. Adding one: its folder and a line here. */
@@ -14,6 +15,7 @@ export const stageKinds: readonly StageKind[] = [
   burstEnvelope,
   voltageToCurrent,
   currentMirror,
+  trim,
   bandPass,
   otaCell,
 ];

@@ -29,7 +29,7 @@ export interface AnalysisRequest {
 export function analyseStage(topology: AnyTopology, request: AnalysisRequest): Analysis {
   const parts = request.parts;
   const conditions = completeConditions(topology, request.conditions);
-  const raw = topology.analyse({ parts, conditions: conditions as never });
+  const raw = topology.analyse({ parts, conditions: conditions as never }, request.targets);
   const results: Analysis["results"] = {};
   const warnings: Warning[] = [];
   for (const [key, value] of Object.entries(raw)) {

@@ -74,8 +74,11 @@ export interface Topology<
   /**
    * Results of these parts under these conditions.
    * Pure; figures that have no meaning are left out rather than given as NaN.
+   *
+   * @param wanted the targets given, for figures that only have a meaning against them: how much of a knob's travel lies
+   *   inside the window
    */
-  analyse(state: State<P, C>): ResultValues<R>;
+  analyse(state: State<P, C>, wanted?: Partial<TargetValues<T>>): ResultValues<R>;
   /** Exact parts for the targets. */
   design(request: DesignRequest<P, C, T>): PartValues<P> | DesignRefusal;
   /** Parts that the designer chooses first and `design` takes as given; `follows` keeps one equal to another. */
