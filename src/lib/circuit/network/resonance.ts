@@ -101,3 +101,14 @@ function peakOf({ top, bottom }: { top: number[]; bottom: number[] }): number | 
 
 /** Frequency in Hz of x = (ω/unit)². */
 const hertz = (x: number, unit: number) => (Math.sqrt(x) * unit) / (2 * Math.PI);
+
+/** The greatest |H| over all frequencies of a response that need not be a band-pass: its peaks and its two ends compared. */
+export function greatestGain(transfer: Transfer): number {
+  const { top, bottom, unit } = scaledPower(transfer);
+  const slope = add(multiply(differentiate(top), bottom), multiply([-1], top, differentiate(bottom)));
+  const peaks = positiveRoots(slope).map((x) => magnitudeAt(transfer, hertz(x, unit)));
+  const { numerator, denominator } = transfer;
+  const low = Math.abs((numerator[0] ?? 0) / denominator[0]!);
+  const high = numerator.length < denominator.length ? 0 : Math.abs(numerator.at(-1)! / denominator.at(-1)!);
+  return Math.max(low, high, ...peaks);
+}

@@ -1,3 +1,4 @@
+import { electricalAngle } from "../../parts/electricalAngle.ts";
 import type { Curve, Line } from "../../stage/curve.ts";
 import { magnitudeDbAt, phaseDegrees, type Transfer } from "../../network/transfer.ts";
 
@@ -54,8 +55,34 @@ export function responseCurves<S>(
   ];
 }
 
+/** The centre over the rotation of the retune pot. */
+export function retuneCurve<S>(
+  centreAt: (state: S, rotation: number) => number,
+  rotationOf: (state: S) => number,
+): Curve<S> {
+  return {
+    id: "retune",
+    name: "Centre over rotation",
+    x: { quantity: "Rotation", unit: "", scale: "linear", shown: { unit: "°", factor: electricalAngle } },
+    y: { quantity: "Centre frequency", unit: "Hz", scale: "linear" },
+    domain: () => [0, 1],
+    defined: [0, 1],
+    lines: (state) => [{ id: "now", label: "as set", at: (rotation) => centreAt(state, rotation) }],
+    mark: (state) => ({ x: rotationOf(state), label: "as set" }),
+    window: ({ centreFrequency }) => centreFrequency && { y: [centreFrequency.least, centreFrequency.most] },
+  };
+}
+
+/** The pot at its two ends, as companions of a response. */
+export function potEnds<S>(atRotation: (rotation: number) => S): Companion<S>[] {
+  return [
+    { id: "pot-out", label: "pot at 0°", state: atRotation(0) },
+    { id: "pot-in", label: `pot at ${electricalAngle}°`, state: atRotation(1) },
+  ];
+}
+
 /** A decade below to a decade above, on whole 1-2-5 steps, so that the axis does not crawl while a value is turned. */
-function roundDecades(centre: number): readonly [number, number] {
+export function roundDecades(centre: number): readonly [number, number] {
   const step = (value: number) => {
     const decade = 10 ** Math.floor(Math.log10(value));
     return [5, 2, 1].find((m) => value / decade >= m * (1 - 1e-9))! * decade;

@@ -1,6 +1,10 @@
 import { defineStageKind } from "../../stage/kind.ts";
 import { reference } from "./reference.ts";
+import { bridgedT } from "./topologies/bridged-t/index.ts";
 import { multipleFeedback } from "./topologies/multiple-feedback/index.ts";
+import { passive } from "./topologies/passive/index.ts";
+import { sallenKey } from "./topologies/sallen-key/index.ts";
+import { twoIntegrator } from "./topologies/two-integrator/index.ts";
 
 export const bandPass = defineStageKind({
   id: "band-pass",
@@ -11,7 +15,7 @@ export const bandPass = defineStageKind({
     { id: "in", label: "audio in", sort: "audio", direction: "in" },
     { id: "out", label: "audio out", sort: "audio", direction: "out" },
   ],
-  topologies: [multipleFeedback],
+  topologies: [multipleFeedback, sallenKey, twoIntegrator, bridgedT, passive],
   telling: ["centreFrequency", "qualityFactor"],
   reference,
   version: 1,

@@ -1,4 +1,5 @@
 import { readResonance, type Resonance } from "../../network/resonance.ts";
+import { potFraction, type PotLaw } from "../../parts/potLaw.ts";
 import { isStable, type Transfer } from "../../network/transfer.ts";
 
 export interface Response extends Resonance {
@@ -30,4 +31,33 @@ export function responseOf(transfer: Transfer, inverting: boolean): Partial<Resp
 export function noiseAfter(sourceRms: number, sourceCorner: number, peakGain: number, noiseBandwidth: number): number {
   const density = sourceRms / Math.sqrt((Math.PI / 2) * sourceCorner);
   return density * peakGain * Math.sqrt(noiseBandwidth);
+}
+
+/** {@link noiseAfter} of what the conditions feed in, where they do and the response has a band. */
+export function outputNoiseOf(
+  response: Partial<Pick<Response, "peakGain" | "noiseBandwidth">>,
+  { sourceRms, sourceBandwidth }: { sourceRms: number | null; sourceBandwidth: number },
+): { outputRms?: number } {
+  const { peakGain, noiseBandwidth } = response;
+  if (sourceRms === null || peakGain === undefined || noiseBandwidth === undefined) return {};
+  return { outputRms: noiseAfter(sourceRms, sourceBandwidth, peakGain, noiseBandwidth) };
+}
+
+/** A fixed resistor and the share of the rheostat in series with it that the rotation leaves in circuit, Ω. */
+export function withRheostat(fixed: number, pot: number, law: PotLaw, rotation: number): number {
+  return fixed + pot * potFraction(law, rotation);
+}
+
+/**
+ * 1/A(s) of an op amp with a single pole, constant term first: 1/A0 + s/(2π·ft); zero for an ideal one.
+ */
+export function inverseGain({
+  gainBandwidth,
+  openLoopGain,
+}: {
+  gainBandwidth: number | null;
+  openLoopGain: number | null;
+}): readonly [number, number] | undefined {
+  if (gainBandwidth === null) return undefined;
+  return [openLoopGain === null ? 0 : 1 / openLoopGain, 1 / (2 * Math.PI * gainBandwidth)];
 }

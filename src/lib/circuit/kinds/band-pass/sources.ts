@@ -1,8 +1,32 @@
 import type { Citation } from "../../stage/citation.ts";
 
-export const sources = [
+const sources = [
   {
     id: "mfb-derivation",
+    title: "Node equations of the network, solved by hand",
+    place: "this page; checked by nodal analysis over random parts",
+    provenance: "derived",
+  },
+  {
+    id: "sallen-key-derivation",
+    title: "Node equations of the network, solved by hand",
+    place: "this page; checked by nodal analysis over random parts",
+    provenance: "derived",
+  },
+  {
+    id: "two-integrator-derivation",
+    title: "Node equations of the network, solved by hand",
+    place: "this page; checked by nodal analysis over random parts",
+    provenance: "derived",
+  },
+  {
+    id: "bridged-t-derivation",
+    title: "Node equations of the network, solved by hand",
+    place: "this page; checked by nodal analysis over random parts",
+    provenance: "derived",
+  },
+  {
+    id: "passive-derivation",
     title: "Node equations of the network, solved by hand",
     place: "this page; checked by nodal analysis over random parts",
     provenance: "derived",
@@ -16,7 +40,7 @@ export const sources = [
   {
     id: "franco",
     title: "S. Franco, Design with Operational Amplifiers and Analog Integrated Circuits",
-    place: "example 3.15, multiple-feedback band-pass",
+    place: "examples 3.13 (Sallen-Key band-pass), 3.15 (multiple feedback)",
     provenance: "published",
   },
   {
@@ -41,3 +65,12 @@ export const sources = [
     provenance: "published",
   },
 ] as const satisfies readonly Citation[];
+
+/** Those that a topology's formulas and limits name. */
+export function sourcesOf(
+  formulas: readonly { sources: readonly string[] }[],
+  limits: readonly { source: string }[],
+): readonly Citation[] {
+  const named = new Set([...formulas.flatMap((formula) => formula.sources), ...limits.map(({ source }) => source)]);
+  return sources.filter(({ id }) => named.has(id));
+}

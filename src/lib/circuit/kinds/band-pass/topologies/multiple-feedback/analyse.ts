@@ -1,15 +1,15 @@
 import { readCentre } from "../../../../network/resonance.ts";
 import { isStable } from "../../../../network/transfer.ts";
+import { electricalAngle } from "../../../../parts/electricalAngle.ts";
 import { potFraction } from "../../../../parts/potLaw.ts";
 import type { ConditionValues, PartValues, ResultValues, State } from "../../../../stage/values.ts";
-import { noiseAfter, responseOf } from "../../model.ts";
+import { outputNoiseOf, responseOf, withRheostat } from "../../model.ts";
 import type { conditions, parts, results, targets } from "./fields.ts";
 import {
   idealCentre,
   idealResistors,
   largestGain,
   noiseGainAtCentre,
-  resistanceToGround,
   semitonesBetween,
   transferOf,
   type NetworkValues,
@@ -23,9 +23,6 @@ export type T = typeof targets;
 export type R = typeof results;
 export type MultipleFeedbackState = State<P, C>;
 
-/** Degrees of electrical travel of a usual pot: 260 to 280 occur. From memory. */
-export const electricalAngle = 270;
-
 /** Taken where the designer has not chosen one. */
 const usualCapacitor = 10e-9;
 
@@ -35,7 +32,7 @@ export function networkAt(
   surroundings: ConditionValues<C>,
   rotation = surroundings.rotation,
 ): NetworkValues {
-  return { ...values, rb: resistanceToGround(values.rb, values.rbPot, surroundings.potLaw, rotation) };
+  return { ...values, rb: withRheostat(values.rb, values.rbPot, surroundings.potLaw, rotation) };
 }
 
 /** The transfer function of a state, at its own rotation or at another. */
@@ -60,16 +57,7 @@ export function analyse(state: MultipleFeedbackState): ResultValues<R> {
     ...(parts.rbPot > 0 && retune(state)),
     noiseGain,
     ...(conditions.gainBandwidth !== null && { loopGain: conditions.gainBandwidth / (idealCentre(seen) * noiseGain) }),
-    ...(conditions.sourceRms !== null &&
-      response.peakGain !== undefined &&
-      response.noiseBandwidth !== undefined && {
-        outputRms: noiseAfter(
-          conditions.sourceRms,
-          conditions.sourceBandwidth,
-          response.peakGain,
-          response.noiseBandwidth,
-        ),
-      }),
+    ...outputNoiseOf(response, conditions),
   };
 }
 

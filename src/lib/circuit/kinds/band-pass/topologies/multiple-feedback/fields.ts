@@ -1,6 +1,15 @@
 import { common } from "../../../../stage/commonConditions.ts";
-import { capacitor, condition, pot, resistor, type ResultField } from "../../../../stage/fields.ts";
-import { centreTarget, gainTarget, qualityTarget, responseResults } from "../../fields.ts";
+import { capacitor, pot, resistor, type ResultField } from "../../../../stage/fields.ts";
+import {
+  centreTarget,
+  gainTarget,
+  noiseConditions,
+  outputNoise,
+  potConditions,
+  qualityTarget,
+  responseResults,
+  retuneResults,
+} from "../../fields.ts";
 
 export const parts = {
   ra: resistor({
@@ -49,36 +58,13 @@ export const parts = {
 export const targets = { centreFrequency: centreTarget, qualityFactor: qualityTarget, peakGain: gainTarget } as const;
 
 export const conditions = {
-  rotation: {
-    ...common.rotation,
-    label: "Retune pot, rotation",
-    help: "Share of the electrical travel; at 1 the whole pot is in circuit.",
-  },
-  potLaw: common.potLaw,
+  ...potConditions,
   gainBandwidth: common.gainBandwidth,
   openLoopGain: common.openLoopGain,
   outputResistance: common.outputResistance,
   sourceResistance: common.sourceResistance,
   loadResistance: common.loadResistance,
-  sourceRms: condition({
-    label: "Noise at the input",
-    symbol: "V_n",
-    unit: "V",
-    default: null,
-    least: 1e-3,
-    most: 10,
-    suggestion: 1,
-    help: "RMS of white noise, to see what the filter leaves of it.",
-  }),
-  sourceBandwidth: condition({
-    label: "Noise band limit",
-    symbol: "f_c",
-    unit: "Hz",
-    default: 20e3,
-    least: 1e3,
-    most: 1e6,
-    help: "Corner of the one pole that limits the noise.",
-  }),
+  ...noiseConditions,
   railPositive: common.railPositive,
   railNegative: common.railNegative,
   resistorTolerance: common.resistorTolerance,
@@ -89,31 +75,10 @@ export const conditions = {
 
 export const results = {
   ...responseResults,
-  retuneLow: {
-    label: "Retune range, lowest",
-    symbol: "f_0(1)",
-    unit: "Hz",
-    formula: "centre",
-    help: "The whole pot in circuit.",
-  },
-  retuneHigh: {
-    label: "Retune range, highest",
-    symbol: "f_0(0)",
-    unit: "Hz",
-    formula: "centre",
-    help: "The pot turned out of circuit.",
-  },
-  retuneSpan: { label: "Retune span", symbol: "", unit: "semitones", formula: "centre" },
-  retunePerDegree: {
-    label: "Retune sensitivity",
-    symbol: "",
-    unit: "cents/°",
-    formula: "centre",
-    help: "At the present rotation, over 270° of electrical travel.",
-  },
+  ...retuneResults,
   reachLow: { label: "Reached by every board, from", symbol: "", unit: "Hz", formula: "reach" },
   reachHigh: { label: "Reached by every board, to", symbol: "", unit: "Hz", formula: "reach" },
   noiseGain: { label: "Noise gain at the centre", symbol: "", unit: "", formula: "noise-gain" },
   loopGain: { label: "Loop gain at the centre", symbol: "", unit: "", formula: "noise-gain" },
-  outputRms: { label: "Noise at the output", symbol: "V_o", unit: "V", formula: "noise", help: "RMS." },
+  ...outputNoise,
 } as const satisfies Record<string, ResultField>;

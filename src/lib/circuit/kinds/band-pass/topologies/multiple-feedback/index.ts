@@ -1,16 +1,7 @@
 import { defineTopology } from "../../../../stage/topology.ts";
-import type { Curve } from "../../../../stage/curve.ts";
-import { responseCurves } from "../../curves.ts";
-import { sources } from "../../sources.ts";
-import {
-  analyse,
-  centreAt,
-  design,
-  electricalAngle,
-  networkAt,
-  transferAt,
-  type MultipleFeedbackState,
-} from "./analyse.ts";
+import { potEnds, responseCurves, retuneCurve } from "../../curves.ts";
+import { sourcesOf } from "../../sources.ts";
+import { analyse, centreAt, design, networkAt, transferAt, type MultipleFeedbackState } from "./analyse.ts";
 import { conditions, parts, results, targets } from "./fields.ts";
 import { formulas } from "./formulas.ts";
 import { limits } from "./limits.ts";
@@ -26,18 +17,6 @@ const atRotation = (state: MultipleFeedbackState, rotation: number): MultipleFee
   conditions: { ...state.conditions, rotation },
 });
 
-const retune: Curve<MultipleFeedbackState> = {
-  id: "retune",
-  name: "Centre over rotation",
-  x: { quantity: "Rotation", unit: "", scale: "linear", shown: { unit: "°", factor: electricalAngle } },
-  y: { quantity: "Centre frequency", unit: "Hz", scale: "linear" },
-  domain: () => [0, 1],
-  defined: [0, 1],
-  lines: (state) => [{ id: "now", label: "as set", at: (rotation) => centreAt(state, rotation) }],
-  mark: (state) => ({ x: state.conditions.rotation, label: "as set" }),
-  window: ({ centreFrequency }) => centreFrequency && { y: [centreFrequency.least, centreFrequency.most] },
-};
-
 export const multipleFeedback = defineTopology({
   id: "multiple-feedback",
   name: "Multiple feedback",
@@ -51,18 +30,13 @@ export const multipleFeedback = defineTopology({
   anchors: [{ part: "c1", least: 470e-12, most: 470e-9, follows: ["c2"] }],
   curves: [
     ...responseCurves(transferAt, drawnCentre, (state) =>
-      state.parts.rbPot > 0
-        ? [
-            { id: "pot-out", label: "pot at 0°", state: atRotation(state, 0) },
-            { id: "pot-in", label: `pot at ${electricalAngle}°`, state: atRotation(state, 1) },
-          ]
-        : [],
+      state.parts.rbPot > 0 ? potEnds((rotation) => atRotation(state, rotation)) : [],
     ),
-    retune,
+    retuneCurve(centreAt, (state) => state.conditions.rotation),
   ],
   limits,
   formulas,
-  sources,
+  sources: sourcesOf(formulas, limits),
   network,
   devices: [{ key: "u1", letter: "U", label: "op amp", deviceClass: "JFET-input op amp, one of two in a package" }],
   traits: [

@@ -1,6 +1,5 @@
 import { add, multiply } from "../../../../network/polynomial.ts";
 import type { Transfer } from "../../../../network/transfer.ts";
-import { potFraction, type PotLaw } from "../../../../parts/potLaw.ts";
 
 /** The network: RA from the input to node x, RB from x to ground, C1 from x to the output, C2 from x to the inverting input, RF from the output to it. */
 export interface NetworkValues {
@@ -31,11 +30,6 @@ export const idealSurroundings: Surroundings = {
   openLoopGain: null,
   outputResistance: 0,
 };
-
-/** RB in circuit: the fixed part and the share of the rheostat that the rotation leaves in. */
-export function resistanceToGround(rb: number, rbPot: number, law: PotLaw, rotation: number): number {
-  return rb + rbPot * potFraction(law, rotation);
-}
 
 /**
  * Transfer function from the source to the output: second order with an ideal op amp, third with one of finite

@@ -1,0 +1,86 @@
+import type { Curve } from "../../../../stage/curve.ts";
+import { modesOf } from "../../../../network/pulse.ts";
+import { isStable } from "../../../../network/transfer.ts";
+import { defineTopology } from "../../../../stage/topology.ts";
+import { potEnds, responseCurves, retuneCurve } from "../../curves.ts";
+import { sourcesOf } from "../../sources.ts";
+import { analyse, centreAt, design, networkAt, strikeOf, transferAt, type BridgedTState } from "./analyse.ts";
+import { conditions, parts, results, targets } from "./fields.ts";
+import { formulas } from "./formulas.ts";
+import { limits } from "./limits.ts";
+import { idealFigures, polePair } from "./model.ts";
+import { network } from "./network.ts";
+import { struckAt } from "./strike.ts";
+
+const drawnCentre = (state: BridgedTState) => centreAt(state) || idealFigures(networkAt(state)).centre;
+
+const atRotation = (state: BridgedTState, rotation: number): BridgedTState => ({
+  ...state,
+  conditions: { ...state.conditions, rotation },
+});
+
+/** Time constants that are worth drawing: to −40 dB. */
+const drawnConstants = Math.log(100);
+
+const ring: Curve<BridgedTState> = {
+  id: "ring",
+  name: "Struck ring",
+  x: { quantity: "Time", unit: "s", scale: "linear" },
+  y: { quantity: "Output", unit: "V", scale: "linear" },
+  domain: (state) => {
+    const transfer = transferAt(state);
+    const { timeConstant, centre } = polePair(transfer);
+    // Enough of a sharp ring to see its decay, and few enough periods to see each.
+    const most = Math.min(drawnConstants * timeConstant, 30 / centre);
+    return [0, state.conditions.strikeWidth + (most > 0 ? most : 30 / centre)];
+  },
+  defined: [0, Number.MAX_VALUE],
+  lines: (state) => {
+    const transfer = transferAt(state);
+    const modes = isStable(transfer) ? modesOf(transfer) : undefined;
+    const strike = strikeOf(state);
+    return [{ id: "now", label: "as set", at: (time) => (modes ? struckAt(modes, strike, time) : Number.NaN) }];
+  },
+  mark: (state) => ({ x: state.conditions.strikeWidth, label: "strike ends" }),
+};
+
+export const bridgedT = defineTopology({
+  id: "bridged-t",
+  name: "Bridged T",
+  summary:
+    "One op amp that rings when it is struck: one resistor sets the ring time, another the pitch without touching it.",
+  parts,
+  conditions,
+  targets,
+  results,
+  analyse,
+  design,
+  anchors: [{ part: "c1", least: 1e-9, most: 220e-9, follows: ["c2"] }],
+  curves: [
+    ring,
+    ...responseCurves(transferAt, drawnCentre, (state) =>
+      state.parts.r1Pot > 0 ? potEnds((rotation) => atRotation(state, rotation)) : [],
+    ),
+    retuneCurve(centreAt, (state) => state.conditions.rotation),
+  ],
+  limits,
+  formulas,
+  sources: sourcesOf(formulas, limits),
+  network,
+  devices: [{ key: "u1", letter: "U", label: "op amp", deviceClass: "JFET-input op amp, one of two in a package" }],
+  traits: [
+    { label: "Op amps", text: "1" },
+    { label: "Q range", text: "5 to 30" },
+    { label: "Single-resistor retune", text: "R_1" },
+    { label: "Constant under retune", text: "ring time" },
+    { label: "Finite gain-bandwidth", text: "centre down by Q·f0/ft" },
+    { label: "Inverts", text: "yes" },
+  ],
+  leavesOut: [
+    "clipping and slew rate, which bend the first swings of a hard strike",
+    "the op amp's output resistance, second pole and input capacitance",
+    "noise of the resistors and the op amp",
+    "losses and voltage dependence of the capacitors",
+    "the pot's end resistance",
+  ],
+});
