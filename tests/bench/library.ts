@@ -1,6 +1,6 @@
 import { analyseStage, plotStage, spacedValues, type PlainConditions } from "#lib/circuit/index.ts";
 import { multipleFeedback } from "#lib/circuit/kinds/band-pass/topologies/multiple-feedback/index.ts";
-import { nodalResponse } from "../kinds/band-pass/network.ts";
+import { nodalResponse } from "../kinds/band-pass/networks.ts";
 
 const pointsOfCurve = 400;
 
@@ -21,7 +21,7 @@ export const work: Record<string, (turn: number) => unknown> = {
   "400-point curve": (turn) =>
     plotStage(multipleFeedback, { ...subject, parts: { ...varied(turn), rbPot: 0 }, curves: ["magnitude"], at }),
   "400-point curve through mathjs": (turn) => {
-    const response = nodalResponse({ ...varied(turn), rbPot: 0 }, subject.conditions);
+    const response = nodalResponse(multipleFeedback, { ...varied(turn), rbPot: 0 }, subject.conditions);
     return at.map((frequency) => {
       const { re, im } = response(frequency);
       return 20 * Math.log10(Math.hypot(re, im));
@@ -29,7 +29,7 @@ export const work: Record<string, (turn: number) => unknown> = {
   },
   /** What mathjs would need to read a centre and two edges to 1e-12 off the network: about 3 × 40 halvings. */
   "analyse through mathjs": (turn) => {
-    const response = nodalResponse(varied(turn), subject.conditions);
+    const response = nodalResponse(multipleFeedback, varied(turn), subject.conditions);
     const gain = (f: number) => {
       const { re, im } = response(f);
       return Math.hypot(re, im);

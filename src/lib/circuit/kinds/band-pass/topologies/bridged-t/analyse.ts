@@ -37,10 +37,9 @@ export function transferAt(state: BridgedTState, rotation = state.conditions.rot
   return transferOf(networkAt(state, rotation), state.conditions);
 }
 
-/** The exact centre at a rotation; NaN where the network is not stable. */
+/** The exact centre at a rotation. */
 export function centreAt(state: BridgedTState, rotation = state.conditions.rotation): number {
-  const transfer = transferAt(state, rotation);
-  return isStable(transfer) ? polePair(transfer).centre : Number.NaN;
+  return polePair(transferAt(state, rotation)).centre;
 }
 
 export const strikeOf = ({ conditions }: BridgedTState) => ({
@@ -58,10 +57,10 @@ export function analyse(state: BridgedTState): ResultValues<R> {
     outputOffset:
       Math.abs(conditions.offsetVoltage) * (1 + network.r2 / network.rin) + conditions.biasCurrent * network.r2,
   };
-  if (!isStable(transfer)) return always;
   const { centre, quality, timeConstant, rings } = polePair(transfer);
   const peakGain = magnitudeAt(transfer, centre);
-  const noiseBandwidth = noiseIntegral(transfer) / peakGain ** 2;
+  // The network is stable whatever its parts; only rounding, far outside any sane part, can hide it.
+  const noise = isStable(transfer) ? { noiseBandwidth: noiseIntegral(transfer) / peakGain ** 2 } : {};
   return {
     ...always,
     centreFrequency: centre,
@@ -69,11 +68,11 @@ export function analyse(state: BridgedTState): ResultValues<R> {
     bandwidth: centre / quality,
     peakGain,
     peakGainDb: 20 * Math.log10(peakGain),
-    noiseBandwidth,
+    ...noise,
     inverting: 1,
     ...(rings && { timeConstant, ringTime60: to60 * timeConstant, ...struck(state, transfer, centre) }),
     ...(parts.r1Pot > 0 && retuneFigures((rotation) => centreAt(state, rotation), conditions.rotation)),
-    ...outputNoiseOf({ peakGain, noiseBandwidth }, conditions),
+    ...outputNoiseOf({ peakGain, ...noise }, conditions),
   };
 }
 

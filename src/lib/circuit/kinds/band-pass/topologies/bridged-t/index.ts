@@ -1,18 +1,15 @@
 import type { Curve } from "../../../../stage/curve.ts";
 import { modesOf } from "../../../../network/pulse.ts";
-import { isStable } from "../../../../network/transfer.ts";
 import { defineTopology } from "../../../../stage/topology.ts";
 import { potEnds, responseCurves, retuneCurve } from "../../curves.ts";
 import { sourcesOf } from "../../sources.ts";
-import { analyse, centreAt, design, networkAt, strikeOf, transferAt, type BridgedTState } from "./analyse.ts";
+import { analyse, centreAt, design, strikeOf, transferAt, type BridgedTState } from "./analyse.ts";
 import { conditions, parts, results, targets } from "./fields.ts";
 import { formulas } from "./formulas.ts";
 import { limits } from "./limits.ts";
-import { idealFigures, polePair } from "./model.ts";
+import { polePair } from "./model.ts";
 import { network } from "./network.ts";
 import { struckAt } from "./strike.ts";
-
-const drawnCentre = (state: BridgedTState) => centreAt(state) || idealFigures(networkAt(state)).centre;
 
 const atRotation = (state: BridgedTState, rotation: number): BridgedTState => ({
   ...state,
@@ -28,16 +25,13 @@ const ring: Curve<BridgedTState> = {
   x: { quantity: "Time", unit: "s", scale: "linear" },
   y: { quantity: "Output", unit: "V", scale: "linear" },
   domain: (state) => {
-    const transfer = transferAt(state);
-    const { timeConstant, centre } = polePair(transfer);
+    const { timeConstant, centre } = polePair(transferAt(state));
     // Enough of a sharp ring to see its decay, and few enough periods to see each.
-    const most = Math.min(drawnConstants * timeConstant, 30 / centre);
-    return [0, state.conditions.strikeWidth + (most > 0 ? most : 30 / centre)];
+    return [0, state.conditions.strikeWidth + Math.min(drawnConstants * timeConstant, 30 / centre)];
   },
   defined: [0, Number.MAX_VALUE],
   lines: (state) => {
-    const transfer = transferAt(state);
-    const modes = isStable(transfer) ? modesOf(transfer) : undefined;
+    const modes = modesOf(transferAt(state));
     const strike = strikeOf(state);
     return [{ id: "now", label: "as set", at: (time) => (modes ? struckAt(modes, strike, time) : Number.NaN) }];
   },
@@ -58,8 +52,10 @@ export const bridgedT = defineTopology({
   anchors: [{ part: "c1", least: 1e-9, most: 220e-9, follows: ["c2"] }],
   curves: [
     ring,
-    ...responseCurves(transferAt, drawnCentre, (state) =>
-      state.parts.r1Pot > 0 ? potEnds((rotation) => atRotation(state, rotation)) : [],
+    ...responseCurves(
+      transferAt,
+      (state) => centreAt(state),
+      (state) => (state.parts.r1Pot > 0 ? potEnds((rotation) => atRotation(state, rotation)) : []),
     ),
     retuneCurve(centreAt, (state) => state.conditions.rotation),
   ],

@@ -1,5 +1,5 @@
 import type { Limit } from "../../../../stage/topology.ts";
-import { capacitorLimits, oscillationLimit, outputLimits, retuneLimit, sourceLimit, swingOf } from "../../limits.ts";
+import { capacitorLimits, outputLimits, retuneLimit, sourceLimit, swingOf } from "../../limits.ts";
 import { withRheostat } from "../../model.ts";
 import type { C, P, R } from "./analyse.ts";
 
@@ -7,7 +7,6 @@ const source = "bridged-t-derivation";
 
 /** What the trade warns of in this network (trade brief 2.9). */
 export const limits: readonly Limit<P, C, R>[] = [
-  oscillationLimit(source, "The network does not settle with an op amp of {value}: it has no ring that dies away."),
   {
     code: "does-not-ring",
     severity: "fault",

@@ -1,23 +1,13 @@
 import type { Limit } from "../../../../stage/topology.ts";
+import { capacitorLimits, oscillationLimit, outputLimits } from "../../limits.ts";
 import { networkAt, type C, type P, type R } from "./analyse.ts";
-
-/** Volts that a usual op-amp output stays away from its rail. From memory. */
-const headroomToRail = 1.5;
-/** Noise peaks are planned for at four standard deviations; 63 ppm of a Gaussian lie beyond (trade brief 2.14). */
-const crest = 4;
 
 /** What the trade warns of in this network (trade brief 2.7). */
 export const limits: readonly Limit<P, C, R>[] = [
-  {
-    code: "oscillates",
-    severity: "fault",
-    unit: "Hz",
-    source: "mfb-derivation",
-    template:
-      "No peak with two −3 dB points can be read off this response: the network oscillates, or an op amp of {value} is far too slow for it.",
-    check: ({ conditions, results }) =>
-      results.centreFrequency === undefined ? { value: conditions.gainBandwidth ?? 0, limit: 0 } : undefined,
-  },
+  oscillationLimit(
+    "mfb-derivation",
+    "No peak with two −3 dB points can be read off this response: the network oscillates, or an op amp of {value} is far too slow for it.",
+  ),
   {
     code: "gain-near-limit",
     severity: "caution",
@@ -76,18 +66,6 @@ export const limits: readonly Limit<P, C, R>[] = [
     check: ({ parts }) => (parts.rf > 1e6 ? { value: parts.rf, limit: 1e6 } : undefined),
   },
   {
-    code: "capacitor-near-stray",
-    severity: "caution",
-    unit: "F",
-    source: "practice",
-    template:
-      "The smaller capacitor is {value}, below {limit}: stray capacitance moves the centre. Take larger capacitors and smaller resistors.",
-    check: ({ parts }) => {
-      const least = Math.min(parts.c1, parts.c2);
-      return least < 220e-12 ? { value: least, limit: 220e-12 } : undefined;
-    },
-  },
-  {
     code: "source-loads-input",
     severity: "caution",
     unit: "",
@@ -98,15 +76,6 @@ export const limits: readonly Limit<P, C, R>[] = [
       const share = conditions.sourceResistance / parts.ra;
       return share > 0.02 ? { value: share, limit: 0.02 } : undefined;
     },
-  },
-  {
-    code: "class-2-ceramic",
-    severity: "caution",
-    unit: "",
-    source: "dielectrics",
-    template:
-      "Class 2 ceramic in a filter: its capacitance falls with voltage by {value} and more (at most {limit} is sound here), ages and is microphonic. Take film or class 1.",
-    check: ({ conditions }) => (conditions.dielectric === "class-2" ? { value: 0.2, limit: 0.05 } : undefined),
   },
   {
     code: "retune-misses-target",
@@ -131,30 +100,6 @@ export const limits: readonly Limit<P, C, R>[] = [
         : undefined;
     },
   },
-  {
-    code: "output-clips",
-    severity: "caution",
-    unit: "V",
-    source: "memory",
-    template:
-      "Noise peaks of {value} (four times RMS) pass the {limit} that the op amp can swing. Lower the gain or the noise.",
-    check: ({ conditions, results }) => {
-      if (results.outputRms === undefined) return undefined;
-      const swing = Math.min(conditions.railPositive, -conditions.railNegative) - headroomToRail;
-      const peak = crest * results.outputRms;
-      return peak > swing ? { value: peak, limit: Math.max(0, swing) } : undefined;
-    },
-  },
-  {
-    code: "heavy-load",
-    severity: "caution",
-    unit: "Ω",
-    source: "jfet-op-amp",
-    template:
-      "The load is {value}; output swing is guaranteed into {limit} and more. Expect less swing, and buffer a load of a few kilohms.",
-    check: ({ conditions }) =>
-      conditions.loadResistance !== null && conditions.loadResistance < 10e3
-        ? { value: conditions.loadResistance, limit: 10e3 }
-        : undefined,
-  },
+  ...capacitorLimits,
+  ...outputLimits,
 ];

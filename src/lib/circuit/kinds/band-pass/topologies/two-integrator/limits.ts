@@ -63,7 +63,7 @@ export const limits: readonly Limit<P, C, R>[] = [
     check: ({ parts: { r1Pot, r2Pot } }) => {
       const [less, more] = [Math.min(r1Pot, r2Pot), Math.max(r1Pot, r2Pot)];
       // A gang that is left out is as if it were far smaller than any that is sold.
-      return more > 1.1 * less ? { value: more / Math.max(less, more / 1000), limit: 1.1 } : undefined;
+      return more > 1.1 * less ? { value: less > more / 1000 ? more / less : 1000, limit: 1.1 } : undefined;
     },
   },
   {
