@@ -6,6 +6,7 @@ import { existsSync, readFileSync, writeFileSync } from "node:fs";
 import { join } from "node:path";
 import { releaseCluster, startCluster } from "../../docker-less-db/cluster.mjs";
 import { checkout, ensureStateFolder } from "../../docker-less-db/place.mjs";
+import { serverArguments } from "./serverCommand.mjs";
 import { checkNode, ensureBuild, ensurePackages } from "./prepare.mjs";
 
 const developing = process.argv.includes("--dev");
@@ -46,7 +47,7 @@ function settingsOf(databaseUrl, demo) {
 function serve(env) {
   const args = developing
     ? ["--import", "tsx", join("src", "run", "develop.ts")]
-    : ["--enable-source-maps", join(env.OUT_DIR || "dist", "run", "serve.mjs")];
+    : serverArguments(env.OUT_DIR || "dist");
   return new Promise((resolve, reject) => {
     server = spawn(process.execPath, args, { cwd: checkout, env, stdio: ["ignore", "inherit", "inherit", "ipc"] });
     server.once("error", reject);

@@ -2,6 +2,7 @@ import { spawn } from "node:child_process";
 import { once } from "node:events";
 import { existsSync } from "node:fs";
 import { join } from "node:path";
+import { serverArguments } from "../../src/run/serverCommand.mjs";
 
 export interface RunningApp {
   /** Where it listens, without a closing slash. */
@@ -21,7 +22,7 @@ export async function startApp(settings: Record<string, string> = {}): Promise<R
     throw new Error(`There is no build in ${outDir}: npm run build makes one.`);
   // Told that it is being tested, the sign-in would leave out its checks of where a request comes from.
   const { PUBLIC_URL: _, NODE_ENV: __, TEST: ___, ...inherited } = process.env;
-  const child = spawn(process.execPath, [join(outDir, "run", "serve.mjs")], {
+  const child = spawn(process.execPath, serverArguments(outDir), {
     env: { ...inherited, HOST: "127.0.0.1", PORT: "0", OUT_DIR: outDir, ...settings },
     stdio: ["ignore", "pipe", "pipe", "ipc"],
   });
