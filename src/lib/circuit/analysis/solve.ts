@@ -146,7 +146,8 @@ function weigh(
 /** Squared log distance of the resistors' geometric mean from the comfortable level, and of each from 1 kΩ to 1 MΩ. */
 function impedanceCost(topology: AnyTopology, parts: PlainValues): number {
   const logs = Object.entries(topology.parts).flatMap(([key, field]) =>
-    field.partClass === "resistor" ? [Math.log(parts[key]! / comfortableResistance)] : [],
+    // A resistor of zero is one that is not fitted.
+    field.partClass === "resistor" && parts[key]! > 0 ? [Math.log(parts[key]! / comfortableResistance)] : [],
   );
   if (logs.length === 0) return 0;
   const mean = logs.reduce((sum, x) => sum + x, 0) / logs.length;

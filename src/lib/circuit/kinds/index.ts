@@ -4,6 +4,7 @@ import { burstEnvelope } from "./burst-envelope/index.ts";
 import { currentMirror } from "./current-mirror/index.ts";
 import { decayEnvelope } from "./decay-envelope/index.ts";
 import { otaCell } from "./ota-cell/index.ts";
+import { summingNode } from "./summing-node/index.ts";
 import { triggerInput } from "./trigger-input/index.ts";
 import { trim } from "./trim/index.ts";
 import { voltageToCurrent } from "./voltage-to-current/index.ts";
@@ -18,4 +19,5 @@ export const stageKinds: readonly StageKind[] = [
   trim,
   bandPass,
   otaCell,
+  summingNode,
 ];

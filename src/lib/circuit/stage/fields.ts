@@ -81,7 +81,7 @@ export function acceptedRange(field: NumberField): readonly [number, number] {
 type Defaults = { type: "number"; scale: "logarithmic" };
 const logarithmic: Defaults = { type: "number", scale: "logarithmic" };
 
-type PartInput = Named & { default: number; least?: number; most?: number; tolerance?: number };
+type PartInput = Named & { default: number; least?: number; most?: number; tolerance?: number; suggestion?: number };
 
 /** A fixed resistor; sane range 10 Ω to 10 MΩ unless said. Tolerance 1 % film. */
 export const resistor = (field: PartInput): PartField => ({

@@ -2,23 +2,24 @@ import {
   acceptedRange,
   stepAlongSeries,
   type NumberField,
+  type PartClass,
   type PartField,
   type ValueSeries,
 } from "#lib/circuit/index.ts";
 
-/** Below this a pot that need not be fitted steps down to "not fitted". */
-const smallestPot = 100;
+/** Below this a part that need not be fitted steps down to "not fitted". */
+const smallest = { pot: 100, resistor: 100, capacitor: 1e-12 } as const satisfies Record<PartClass, number>;
 
 /** A part moved `count` steps along its series, kept within what can be computed with. */
 export function stepPart(value: number, field: PartField, series: ValueSeries, direction: 1 | -1, count = 1): number {
   const [least, most] = acceptedRange(field);
   let stepped = value;
   for (let i = 0; i < count; i++) {
-    if (field.default === 0 && direction === -1 && stepped <= smallestPot) return 0;
+    if (field.default === 0 && direction === -1 && stepped <= smallest[field.partClass]) return 0;
     const next =
       stepped === 0
         ? direction === 1
-          ? (field.suggestion ?? smallestPot)
+          ? (field.suggestion ?? smallest[field.partClass])
           : 0
         : stepAlongSeries(stepped, series, direction);
     if (next < least || next > most) return stepped;
