@@ -1,5 +1,6 @@
 import { add, differentiate, evaluate, multiply } from "./polynomial.ts";
 import { noiseIntegral } from "./noiseIntegral.ts";
+import { edgesOfCubic, peakOfCubic } from "./thirdOrder.ts";
 import { magnitudeAt, naturalScale, positiveRoots, powerGain, type Transfer } from "./transfer.ts";
 
 /** What a band-pass response amounts to, read off the exact transfer function. */
@@ -58,12 +59,10 @@ function anyOrder(transfer: Transfer): Resonance | undefined {
   const scaled = scaledPower(transfer);
   const peak = peakOf(scaled);
   if (peak === undefined) return undefined;
-  const { top, bottom, unit } = scaled;
-  const half = evaluate(top, peak) / evaluate(bottom, peak) / 2;
-  const edges = positiveRoots(add(top, multiply([-half], bottom)));
-  const lower = edges.filter((x) => x < peak).at(-1);
-  const upper = edges.find((x) => x > peak);
-  if (lower === undefined || upper === undefined) return undefined;
+  const edges = edgesOf(scaled, peak);
+  if (edges === undefined) return undefined;
+  const { unit } = scaled;
+  const [lower, upper] = edges;
   const [centreFrequency, lowerEdge, upperEdge] = [hertz(peak, unit), hertz(lower, unit), hertz(upper, unit)];
   const bandwidth = upperEdge - lowerEdge;
   const peakGain = magnitudeAt(transfer, centreFrequency);
@@ -92,7 +91,26 @@ function scaledPower(transfer: Transfer) {
   return { ...powerGain(transfer, unit), unit };
 }
 
-function peakOf({ top, bottom }: { top: number[]; bottom: number[] }): number | undefined {
+interface Power {
+  top: number[];
+  bottom: number[];
+}
+
+/** A second-order band-pass behind one op amp's pole: the case that is analysed most, and needs no root finder. */
+const isCubicWithOneZero = ({ top, bottom }: Power) =>
+  bottom.length === 4 && bottom[0]! > 0 && bottom[3]! > 0 && top.slice(2).every((c) => c === 0) && top[0] === 0;
+
+function edgesOf({ top, bottom }: Power, peak: number): readonly [number, number] | undefined {
+  if (isCubicWithOneZero({ top, bottom })) return edgesOfCubic(bottom, peak);
+  const half = evaluate(top, peak) / evaluate(bottom, peak) / 2;
+  const edges = positiveRoots(add(top, multiply([-half], bottom)));
+  const lower = edges.filter((x) => x < peak).at(-1);
+  const upper = edges.find((x) => x > peak);
+  return lower === undefined || upper === undefined ? undefined : [lower, upper];
+}
+
+function peakOf({ top, bottom }: Power): number | undefined {
+  if (isCubicWithOneZero({ top, bottom })) return peakOfCubic(bottom);
   const slope = add(multiply(differentiate(top), bottom), multiply([-1], top, differentiate(bottom)));
   const gain = (x: number) => evaluate(top, x) / evaluate(bottom, x);
   const peaks = positiveRoots(slope);
