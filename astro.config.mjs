@@ -2,6 +2,7 @@ import node from "@astrojs/node";
 import react from "@astrojs/react";
 import tailwindcss from "@tailwindcss/vite";
 import { defineConfig } from "astro/config";
+import { leaveOut } from "./src/run/leaveOut.mjs";
 
 export default defineConfig({
   output: "server",
@@ -28,5 +29,9 @@ export default defineConfig({
       ],
     },
   },
-  vite: { plugins: [tailwindcss()] },
+  vite: {
+    plugins: [tailwindcss(), leaveOut()],
+    // A worker fetches the one kind it is asked about, which only modules can.
+    worker: { format: "es", plugins: () => [leaveOut()] },
+  },
 });

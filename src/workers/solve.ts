@@ -1,5 +1,5 @@
 import { solveStage, type SolveRequest } from "#lib/circuit/index.ts";
-import { stageKinds } from "#lib/circuit/kinds/index.ts";
+import { loadTopology } from "#lib/circuit/kinds/load.ts";
 
 export interface SolveTask {
   id: number;
@@ -15,7 +15,13 @@ export interface SolveReply {
 
 // Some hundred exact analyses take longer than a frame, so they are done here, beside the page.
 self.addEventListener("message", ({ data }: MessageEvent<SolveTask>) => {
-  const topology = stageKinds.find(({ id }) => id === data.kind)?.topologies.find(({ id }) => id === data.topology);
-  const reply: SolveReply = { id: data.id, outcome: topology ? solveStage(topology, data.request) : null };
-  self.postMessage(reply);
+  void answer(data).then((reply) => self.postMessage(reply));
 });
+
+async function answer({ id, kind, topology, request }: SolveTask): Promise<SolveReply> {
+  try {
+    return { id, outcome: solveStage(await loadTopology(kind, topology), request) };
+  } catch {
+    return { id, outcome: null };
+  }
+}

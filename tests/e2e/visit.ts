@@ -9,7 +9,15 @@ export async function visit(page: Page, address: string): Promise<void> {
 }
 
 export async function hydrated(page: Page): Promise<void> {
-  await page.waitForFunction(() => document.querySelector('astro-island[client="load"][ssr]') === null);
+  await page.waitForFunction(() =>
+    [...document.querySelectorAll('astro-island[client="load"]')].every(
+      // An island has begun once this is gone. One that waits for more code is alive when React has taken its elements.
+      (island) =>
+        !island.hasAttribute("ssr") &&
+        (island.firstElementChild === null ||
+          Object.keys(island.firstElementChild).some((key) => key.startsWith("__react"))),
+    ),
+  );
 }
 
 /** Signs in as one of the demo accounts, the way the sign-in page offers. */

@@ -13,15 +13,18 @@ export function FixtureSymbol({ item }: { item: FixtureItem }) {
       return <circle className="dot" cx={px(item.at[0])} cy={px(item.at[1])} r="3" />;
     case "ground":
       return <path className="line" d={`M${px(item.at[0])} ${px(item.at[1])}v5m-9 0h18m-15 4h12m-9 4h6`} />;
-    case "rail":
+    case "rail": {
+      // A negative rail hangs below its point. The name stands beside the bar, where no part of the column is.
+      const way = isNegative(item.label) ? 1 : -1;
       return (
         <g>
-          <path className="line" d={`M${px(item.at[0])} ${px(item.at[1])}v-5m-8 0h16`} />
-          <text x={px(item.at[0])} y={px(item.at[1]) - 10} textAnchor="middle">
+          <path className="line" d={`M${px(item.at[0])} ${px(item.at[1])}v${5 * way}m-8 0h16`} />
+          <text x={px(item.at[0]) + 13} y={px(item.at[1]) + 5 * way + 4}>
             {item.label}
           </text>
         </g>
       );
+    }
     case "port": {
       const x = px(item.at[0]) + (item.side === "left" ? -4 : 4);
       return (
@@ -60,3 +63,5 @@ export function FixtureSymbol({ item }: { item: FixtureItem }) {
       return <ActiveSymbol item={item} />;
   }
 }
+
+const isNegative = (rail: string) => /[\u2212-]/.test(rail);

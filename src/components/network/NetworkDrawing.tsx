@@ -1,7 +1,7 @@
 import { useId } from "react";
 import { formatPartValue, type AnyTopology, type PlainValues } from "#lib/circuit/index.ts";
+import { viewOf } from "./extent.ts";
 import { FixtureSymbol } from "./FixtureSymbol.tsx";
-import { px } from "./grid.ts";
 import { networkText, type PartMarking } from "./networkText.ts";
 import { PartSymbol } from "./PartSymbol.tsx";
 
@@ -16,7 +16,7 @@ interface NetworkDrawingProps {
 /** The topology's network as a schematic in our own hand: IEC bodies, thin wires, values beside the parts. */
 export function NetworkDrawing({ topology, parts, designators = {}, lit }: NetworkDrawingProps) {
   const id = useId();
-  const { width, height, items } = topology.network;
+  const { items } = topology.network;
   const markings = Object.fromEntries(
     Object.entries(topology.parts).map(([key, field]): [string, PartMarking] => {
       const value = parts[key]!;
@@ -27,7 +27,7 @@ export function NetworkDrawing({ topology, parts, designators = {}, lit }: Netwo
   return (
     <svg
       className="network"
-      viewBox={`0 0 ${px(width)} ${px(height)}`}
+      viewBox={viewOf(topology.network, markings)}
       role="img"
       aria-labelledby={`${id}-title`}
       aria-describedby={`${id}-text`}

@@ -1,15 +1,15 @@
 import { lazy, Suspense, useEffect, useRef, useState } from "react";
-import { stageKinds } from "#lib/circuit/kinds/index.ts";
+import { useTopology } from "#lib/client/stage/useTopology.ts";
+import type { KindBrief } from "#lib/wire/kindBrief.ts";
 import { writeAddress } from "#lib/wire/stageAddress.ts";
 import type { StageState } from "#lib/wire/stageState.ts";
 import type { VoiceChoice } from "./SaveToVoice.tsx";
 import { StageSheet } from "./StageSheet.tsx";
-import { topologyOf } from "./useStage.ts";
 
 const SaveToVoice = lazy(() => import("./SaveToVoice.tsx").then((module) => ({ default: module.SaveToVoice })));
 
 interface CalculatorProps {
-  kind: string;
+  kind: KindBrief;
   initial: StageState;
   signedIn: boolean;
   /** The voice that the stage is meant for, where this person may edit it. */
@@ -22,14 +22,18 @@ interface CalculatorProps {
 const pause = 350;
 
 /** The public calculator: a stage sheet whose state stands in the page's address, so that a link shares it. */
-export function Calculator({ kind: kindId, initial, signedIn, voice, voiceId = null }: CalculatorProps) {
-  const kind = stageKinds.find(({ id }) => id === kindId)!;
+export function Calculator(props: CalculatorProps) {
+  // The island itself must not wait: the framework calls it once, outside React, to see what it is.
+  return <AddressedStage {...props} />;
+}
+
+function AddressedStage({ kind, initial, signedIn, voice, voiceId = null }: CalculatorProps) {
+  const topology = useTopology(kind.id, initial.topology);
   const [state, setState] = useState(initial);
   const [saving, setSaving] = useState(false);
   const timer = useRef<ReturnType<typeof setTimeout>>(undefined);
-  const topology = topologyOf(kind, state.topology);
   const queryOf = (next: StageState) => {
-    const query = writeAddress(topologyOf(kind, next.topology), next);
+    const query = writeAddress(topology, next);
     return voiceId === null ? query : `${query}&voice=${encodeURIComponent(voiceId)}`;
   };
   const address = `/calculators/${kind.id}?${queryOf(state)}`;
@@ -45,7 +49,8 @@ export function Calculator({ kind: kindId, initial, signedIn, voice, voiceId = n
 
   return (
     <StageSheet
-      kind={kindId}
+      kind={kind}
+      topology={topology}
       initial={initial}
       onChange={onChange}
       actions={

@@ -9,6 +9,7 @@ import {
 import { errorText } from "#lib/wire/changeText.ts";
 import { SymbolText } from "./SymbolText.tsx";
 import { useCandidates } from "./useCandidates.ts";
+import { TextWithSymbols } from "./TextWithSymbols.tsx";
 import type { Stage } from "./useStage.ts";
 
 interface CandidatesProps {
@@ -65,7 +66,7 @@ export function Candidates({ stage, id, keep, onKeep, onClose, designators }: Ca
       </div>
       {refusal && (
         <div className="fault">
-          <strong>No parts give this.</strong> {refusal.message}
+          <strong>No parts give this.</strong> <TextWithSymbols text={refusal.message} />
         </div>
       )}
       {solution && solution.candidates.length === 0 && (

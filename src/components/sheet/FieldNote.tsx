@@ -1,4 +1,5 @@
 import { useFormState, type Control, type FieldPath } from "react-hook-form";
+import { TextWithSymbols } from "./TextWithSymbols.tsx";
 import type { StageFields } from "./fields.ts";
 
 interface NotedField {
@@ -26,7 +27,9 @@ export function FieldNote({ control, fields, id, hint, refused = false }: FieldN
   const label = faulty?.label === undefined ? "" : `${faulty.label}: `;
   return (
     <p id={id} className={faulty || refused ? "field-note error" : "field-note"} aria-live="polite">
-      {faulty ? `${label}${messageAt(errors, faulty.name)} Still ${faulty.inForce}.` : hint}
+      {faulty
+        ? `${label}${messageAt(errors, faulty.name)} Still ${faulty.inForce}.`
+        : hint !== undefined && <TextWithSymbols text={hint} />}
     </p>
   );
 }

@@ -1,6 +1,7 @@
 import { useCallback, useDeferredValue, useId } from "react";
 import { formatPartValue } from "#lib/circuit/index.ts";
-import { stageKinds } from "#lib/circuit/kinds/index.ts";
+import { useTopology } from "#lib/client/stage/useTopology.ts";
+import type { KindBrief } from "#lib/wire/kindBrief.ts";
 import { writeAddress } from "#lib/wire/stageAddress.ts";
 import { nearestParts, type StageState } from "#lib/wire/stageState.ts";
 import "../../styles/stage.css";
@@ -10,24 +11,27 @@ import { Conditions } from "./Conditions.tsx";
 import { ResultsTable } from "./ResultsTable.tsx";
 import { SymbolText } from "./SymbolText.tsx";
 import { Targets } from "./Targets.tsx";
-import { topologyOf, useStage } from "./useStage.ts";
+import { useStage } from "./useStage.ts";
 
 interface LiveStageProps {
-  /** Id of a stage kind in the registry. */
-  kind: string;
+  kind: KindBrief;
   initial: StageState;
 }
 
 /** One stage, alive on the first page: ask for something, and read the values that exist and what they give. */
-export function LiveStage({ kind: kindId, initial }: LiveStageProps) {
-  const kind = stageKinds.find(({ id }) => id === kindId)!;
-  const topology = topologyOf(kind, initial.topology);
+export function LiveStage(props: LiveStageProps) {
+  // The island itself must not wait: the framework calls it once, outside React, to see what it is.
+  return <Alive {...props} />;
+}
+
+function Alive({ kind, initial }: LiveStageProps) {
+  const topology = useTopology(kind.id, initial.topology);
   const settle = useCallback(
     (next: StageState, before: StageState) =>
       next.targets === before.targets ? next : { ...next, parts: nearestParts(topology, next) },
     [topology],
   );
-  const stage = useStage(kind, initial, { settle });
+  const stage = useStage(kind, topology, initial, { settle });
   const drawn = useDeferredValue(stage.state);
   const id = useId();
   const wanted = Object.values(topology.targets).map(({ result }) => result);

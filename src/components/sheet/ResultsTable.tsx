@@ -2,6 +2,7 @@ import { printQuantity, type Analysis, type ResultField } from "#lib/circuit/ind
 import { changeText, errorText } from "#lib/wire/changeText.ts";
 import { StateMark } from "../page/StateMark.tsx";
 import { SymbolText } from "./SymbolText.tsx";
+import { TextWithSymbols } from "./TextWithSymbols.tsx";
 import type { Stage } from "./useStage.ts";
 
 type ResultValue = Analysis["results"][string];
@@ -61,7 +62,11 @@ function ResultRow({ stage, row }: { stage: Stage; row: Figure[] }) {
     <tr>
       <th scope="row">
         {field.label}
-        {field.help !== undefined && <span className="result-help">{field.help}</span>}
+        {field.help !== undefined && (
+          <span className="result-help">
+            <TextWithSymbols text={field.help} />
+          </span>
+        )}
       </th>
       <td className="right">
         {row.map(({ key, field: { unit, words }, value }, i) => (

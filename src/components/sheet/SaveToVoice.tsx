@@ -1,13 +1,14 @@
 import { useEffect, useId, useState, type SyntheticEvent } from "react";
-import type { AnyTopology, StageKind } from "#lib/circuit/index.ts";
+import type { AnyTopology } from "#lib/circuit/index.ts";
 import { failureText, request } from "#lib/client/request.ts";
 import { appendStage } from "#lib/client/stage/appendStage.ts";
 import type { StoredStage } from "#lib/client/workingCopy.ts";
 import { longestStageName, stageNameFault } from "#lib/wire/stageName.ts";
+import type { KindBrief } from "#lib/wire/kindBrief.ts";
 import type { StageState } from "#lib/wire/stageState.ts";
 
 interface SaveToVoiceProps {
-  kind: StageKind;
+  kind: KindBrief;
   topology: AnyTopology;
   state: StageState;
   /** The voice that was left to add this stage. */
@@ -110,9 +111,15 @@ export function SaveToVoice({ kind, topology, state, meant }: SaveToVoiceProps) 
       <div aria-live="polite">
         {saving.kind === "saved" && (
           <p className="done wrap-anywhere">
-            <strong>Saved.</strong> {saving.stage.name} stands in {saving.voice.name} as{" "}
-            <span className="val">{Object.values(saving.stage.designators).join(" ")}</span>.{" "}
-            <a href={`/voices/${saving.voice.id}/stages/${saving.stage.id}`}>Open it there</a>, or go back to{" "}
+            <strong>Saved.</strong> {saving.stage.name} stands in {saving.voice.name}
+            {/* A network without parts of its own has none to name. */}
+            {Object.keys(saving.stage.designators).length > 0 && (
+              <>
+                {" "}
+                as <span className="val">{Object.values(saving.stage.designators).join(" ")}</span>
+              </>
+            )}
+            . <a href={`/voices/${saving.voice.id}/stages/${saving.stage.id}`}>Open it there</a>, or go back to{" "}
             <a href={`/voices/${saving.voice.id}`}>all stages of {saving.voice.name}</a>.
           </p>
         )}

@@ -1,5 +1,6 @@
 import { lazy, Suspense, useDeferredValue, useId, useRef, useState, type ReactNode } from "react";
-import { stageKinds } from "#lib/circuit/kinds/index.ts";
+import type { AnyTopology } from "#lib/circuit/index.ts";
+import type { KindBrief } from "#lib/wire/kindBrief.ts";
 import type { StageState } from "#lib/wire/stageState.ts";
 import "../../styles/stage.css";
 import "../../styles/plot.css";
@@ -9,14 +10,15 @@ import { Curves } from "./Curves.tsx";
 import { PartsTable, SeriesChoosers, type PartMarks } from "./PartsTable.tsx";
 import { ResultsTable } from "./ResultsTable.tsx";
 import { Targets } from "./Targets.tsx";
+import { TextWithSymbols } from "./TextWithSymbols.tsx";
 import { useStage } from "./useStage.ts";
 import { Warnings } from "./Warnings.tsx";
 
 const Candidates = lazy(() => import("./Candidates.tsx").then((module) => ({ default: module.Candidates })));
 
 export interface StageSheetProps {
-  /** Id of a stage kind in the registry. */
-  kind: string;
+  kind: KindBrief;
+  topology: AnyTopology;
   initial: StageState;
   /** Told of every change, with values that can be computed with. */
   onChange?: ((state: StageState) => void) | undefined;
@@ -32,11 +34,10 @@ export interface StageSheetProps {
 }
 
 /** One stage as the work goes: targets, parts, results, curves, and what the figures leave out. */
-export function StageSheet({ kind: kindId, initial, onChange, ...props }: StageSheetProps) {
+export function StageSheet({ kind, topology, initial, onChange, ...props }: StageSheetProps) {
   const { designators = {}, marks, readOnly = false, actions, children } = props;
-  const kind = stageKinds.find(({ id }) => id === kindId)!;
-  const stage = useStage(kind, initial, { onChange });
-  const { topology, state } = stage;
+  const stage = useStage(kind, topology, initial, { onChange });
+  const { state } = stage;
   const drawn = useDeferredValue(state);
   const [lit, setLit] = useState<string>();
   const [open, setOpen] = useState(false);
@@ -132,7 +133,7 @@ export function StageSheet({ kind: kindId, initial, onChange, ...props }: StageS
       </section>
       {topology.leavesOut.length > 0 && (
         <p className="sheet-foot">
-          <strong>Left out of these figures:</strong> {topology.leavesOut.join("; ")}.
+          <strong>Left out of these figures:</strong> <TextWithSymbols text={topology.leavesOut.join("; ")} />.
         </p>
       )}
     </div>

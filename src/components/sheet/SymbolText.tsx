@@ -1,6 +1,8 @@
+import { cutAtSubscripts } from "#lib/wire/symbols.ts";
+
 /** A formula symbol written "f_0" or "|H_0|", with its subscript set low. */
 export function SymbolText({ symbol }: { symbol: string }) {
-  const pieces = symbol.split(/_([A-Za-z0-9+\u2212-]+)/);
+  const pieces = cutAtSubscripts(symbol);
   return (
     <span className="symbol">
       {/* Every second piece is a subscript, whatever the text: its place in the row is its identity. */}

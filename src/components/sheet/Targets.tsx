@@ -4,6 +4,7 @@ import { figureText, readFigure, readWindow, windowText } from "#lib/wire/figure
 import { FieldNote } from "./FieldNote.tsx";
 import { QuantityInput } from "./QuantityInput.tsx";
 import { SymbolText } from "./SymbolText.tsx";
+import { TextWithSymbols } from "./TextWithSymbols.tsx";
 import type { Stage } from "./useStage.ts";
 
 const windowStep = 0.01;
@@ -29,7 +30,8 @@ export function Targets({ stage, id, readOnly }: { stage: Stage; id: string; rea
       <div id={`${id}-refusal`} aria-live="polite" className="target-refusal">
         {refusal && (
           <div className="fault">
-            <strong>No parts give this.</strong> {refusal.message} The parts and results beside this stay as they are.
+            <strong>No parts give this.</strong> <TextWithSymbols text={refusal.message} /> The parts and results beside
+            this stay as they are.
           </div>
         )}
       </div>

@@ -1,4 +1,5 @@
 import type { Warning } from "#lib/circuit/index.ts";
+import { TextWithSymbols } from "./TextWithSymbols.tsx";
 
 const words = { note: "Note.", caution: "Caution.", fault: "Fault." } as const;
 
@@ -8,7 +9,7 @@ export function Warnings({ warnings }: { warnings: readonly Warning[] }) {
     <div className="warnings" aria-live="polite">
       {warnings.map((warning) => (
         <p key={warning.code + warning.message} className={warning.severity}>
-          <strong>{words[warning.severity]}</strong> {warning.message}
+          <strong>{words[warning.severity]}</strong> <TextWithSymbols text={warning.message} />
         </p>
       ))}
     </div>

@@ -7,9 +7,9 @@ import {
   sensitivities,
   type AnyTopology,
   type PlainValues,
-  type StageKind,
 } from "#lib/circuit/index.ts";
 import { partText } from "#lib/wire/figureText.ts";
+import type { KindBrief } from "#lib/wire/kindBrief.ts";
 import { decidedParts, idealConditions, type SeriesChoice, type StageState } from "#lib/wire/stageState.ts";
 import { fieldsOf, type StageFields } from "./fields.ts";
 
@@ -23,8 +23,12 @@ interface StageWatcher {
 }
 
 /** A stage being worked on: what stands in its fields, the values in force, and everything that follows from them. */
-export function useStage(kind: StageKind, initial: StageState, { onChange, settle }: StageWatcher = {}) {
-  const topology = topologyOf(kind, initial.topology);
+export function useStage(
+  kind: KindBrief,
+  topology: AnyTopology,
+  initial: StageState,
+  { onChange, settle }: StageWatcher = {},
+) {
   const [state, setState] = useState(initial);
   const form = useForm<StageFields>({ defaultValues: fieldsOf(topology, initial), mode: "onChange" });
 
@@ -74,8 +78,4 @@ export function useStage(kind: StageKind, initial: StageState, { onChange, settl
   const refusal = design && isRefusal(design) ? design : undefined;
   const exact = design && !isRefusal(design) ? design : undefined;
   return { kind, topology, state, form, actions, analysis, ideal, exact, refusal, moves, telling };
-}
-
-export function topologyOf(kind: StageKind, id: string): AnyTopology {
-  return kind.topologies.find((topology) => topology.id === id) ?? kind.topologies[0]!;
 }

@@ -1,39 +1,45 @@
 import { useEffect, useRef, useState } from "react";
-import { stageKinds } from "#lib/circuit/kinds/index.ts";
 import { marksOf } from "#lib/client/stage/marks.ts";
+import { useTopology } from "#lib/client/stage/useTopology.ts";
 import { useStageSave } from "#lib/client/useStageSave.ts";
 import type { StoredStage, WorkingCopy } from "#lib/client/workingCopy.ts";
+import type { KindBrief } from "#lib/wire/kindBrief.ts";
 import { stageNameFault } from "#lib/wire/stageName.ts";
 import { stateOfSaved, type StageState } from "#lib/wire/stageState.ts";
 import { plainSymbol } from "../sheet/SymbolText.tsx";
 import { StageSheet } from "../sheet/StageSheet.tsx";
-import { topologyOf } from "../sheet/useStage.ts";
 import { MarkField } from "./MarkField.tsx";
 import { SaveLine } from "./SaveLine.tsx";
 
 interface VoiceStageProps {
   voiceId: string;
   stageId: string;
+  /** Of the stage. */
+  kind: KindBrief;
   copy: WorkingCopy;
   /** Why saving is not offered, for a role that only reads. */
   readOnly?: string | undefined;
 }
 
 /** A stage of a voice on its sheet, kept in the voice's working copy. */
-export function VoiceStage({ voiceId, stageId, copy, readOnly }: VoiceStageProps) {
+export function VoiceStage(props: VoiceStageProps) {
+  // The island itself must not wait: the framework calls it once, outside React, to see what it is.
+  return <KeptStage {...props} />;
+}
+
+function KeptStage({ voiceId, stageId, kind, copy, readOnly }: VoiceStageProps) {
   const first = copy.document.stages.find(({ id }) => id === stageId)!;
-  const kind = stageKinds.find(({ id }) => id === first.kind)!;
+  const topology = useTopology(first.kind, first.topology);
   const saving = useStageSave(voiceId, copy);
   const newest = saving.newest.document.stages;
   const stored = newest.find(({ id }) => id === stageId) ?? first;
-  const [start, setStart] = useState(() => stateOfSaved(topologyOf(kind, first.topology), first));
+  const [start, setStart] = useState(() => stateOfSaved(topology, first));
   const [state, setState] = useState(start);
   const [name, setName] = useState(first.name);
   const [typed, setTyped] = useState<Record<string, string>>({});
   const [turnsBack, setTurnsBack] = useState(0);
   const place = useRef<HTMLDivElement>(null);
 
-  const topology = topologyOf(kind, state.topology);
   const { parts, conditions, targets, windows } = state;
   const others = newest.filter(({ id }) => id !== stageId);
   const marks = marksOf({ topology, parts, saved: stored.designators, typed, others });
@@ -57,7 +63,7 @@ export function VoiceStage({ voiceId, stageId, copy, readOnly }: VoiceStageProps
   };
   const turnBack = () => {
     const saved = saving.turnBack().document.stages.find(({ id }) => id === stageId) ?? first;
-    const before = stateOfSaved(topologyOf(kind, saved.topology), saved);
+    const before = stateOfSaved(topology, saved);
     setStart(before);
     setState(before);
     setName(saved.name);
@@ -75,7 +81,8 @@ export function VoiceStage({ voiceId, stageId, copy, readOnly }: VoiceStageProps
     <div ref={place}>
       <StageSheet
         key={turnsBack}
-        kind={kind.id}
+        kind={kind}
+        topology={topology}
         initial={start}
         onChange={take}
         designators={marks.designators}

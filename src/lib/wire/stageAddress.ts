@@ -1,6 +1,6 @@
 import { seriesNames, type AnyTopology, type SeriesName } from "#lib/circuit/index.ts";
 import { figureText, partText, readFigure, readWindow, windowText } from "./figureText.ts";
-import { nearestParts, startingState, type StageState } from "./stageState.ts";
+import { nearestParts, startingState, usualSeries, type StageState } from "./stageState.ts";
 
 /**
  * A stage sheet as a query string that a person can read: ?t=multiple-feedback&centreFrequency=1k&ra=22k. Targets and
@@ -25,9 +25,8 @@ export function writeAddress(topology: AnyTopology, state: StageState): string {
     const text = field.type === "number" && typeof value === "number" ? figureText(value, field.unit) : String(value);
     query.set(names.conditions[key]!, plain(text));
   }
-  const usual = startingState(topology).series;
-  if (state.series.resistor !== usual.resistor) query.set("resistors", state.series.resistor);
-  if (state.series.capacitor !== usual.capacitor) query.set("capacitors", state.series.capacitor);
+  if (state.series.resistor !== usualSeries.resistor) query.set("resistors", state.series.resistor);
+  if (state.series.capacitor !== usualSeries.capacitor) query.set("capacitors", state.series.capacitor);
   return query.toString();
 }
 

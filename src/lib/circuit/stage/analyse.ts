@@ -1,5 +1,5 @@
 import { formatQuantity } from "../quantity/format.ts";
-import type { NumberField } from "./fields.ts";
+import type { NumberField, PartClass } from "./fields.ts";
 import { completeConditions, type PlainConditions, type PlainValues } from "./defaults.ts";
 import { targetWindows, targetStates, type TargetState, type Windows } from "./targets.ts";
 import type { AnyTopology, Limit } from "./topology.ts";
@@ -52,7 +52,7 @@ function undefinedResult(topology: AnyTopology, key: string): Warning {
   return {
     code: "no-figure",
     severity: "fault",
-    message: `${label} has no finite value with these parts.`,
+    message: `${label} has no finite value with these parts. Go back to the last values that gave a figure, or move towards the usual ones.`,
     value: 0,
     limit: 0,
     unit: "",
@@ -87,24 +87,29 @@ function unusualValues(
   conditions: PlainConditions,
   warnings: Warning[],
 ): void {
-  for (const key in topology.parts) checkUsual(topology.parts[key]!, parts[key], warnings);
+  for (const key in topology.parts) {
+    const field = topology.parts[key]!;
+    checkUsual(field, parts[key], warnings, () => `${partWords[field.partClass]} ${field.symbol} (${field.label})`);
+  }
   for (const key in topology.conditions) {
     const field = topology.conditions[key]!;
     const value = conditions[key];
-    if (field.type === "number" && typeof value === "number") checkUsual(field, value, warnings);
+    if (field.type === "number" && typeof value === "number") checkUsual(field, value, warnings, () => field.label);
   }
 }
 
 /** A hair of room, so that a value at the limit is not called beyond it for the rounding of its last digit. */
 const hair = 1e-9;
 
-function checkUsual(field: NumberField, value: number | undefined, warnings: Warning[]): void {
+const partWords: Record<PartClass, string> = { resistor: "Resistor", capacitor: "Capacitor", pot: "Pot" };
+
+function checkUsual(field: NumberField, value: number | undefined, warnings: Warning[], named: () => string): void {
   if (value === undefined) return;
   const [least, most] = [field.least - Math.abs(field.least) * hair, field.most + Math.abs(field.most) * hair];
   if (value >= least && value <= most) return;
   const limit = value < least ? field.least : field.most;
   const side = value < least ? "below" : "above";
-  const message = `${field.label} of ${formatQuantity(value, field.unit)} is ${side} the usual ${formatQuantity(limit, field.unit)}.`;
+  const message = `${named()}: ${formatQuantity(value, field.unit)} is ${side} the usual ${formatQuantity(limit, field.unit)}. It is computed as it is; check that it is meant.`;
   warnings.push({ code: "outside-usual-range", severity: "note", message, value, limit, unit: field.unit });
 }
 

@@ -1,11 +1,12 @@
-import type { AnyTopology, StageKind } from "#lib/circuit/index.ts";
+import type { AnyTopology } from "#lib/circuit/index.ts";
+import type { KindBrief } from "#lib/wire/kindBrief.ts";
 import type { StageState } from "#lib/wire/stageState.ts";
 import { failureText, request } from "../request.ts";
 import { changeWorkingCopy, withStage, type StoredStage, type WorkingCopyDocument } from "../workingCopy.ts";
 import { assignDesignators } from "./designators.ts";
 
 interface NewStage {
-  kind: StageKind;
+  kind: KindBrief;
   topology: AnyTopology;
   state: StageState;
   name: string;

@@ -76,7 +76,8 @@ export const limits: readonly Limit<P, C, R>[] = [
     severity: "caution",
     unit: "s",
     source: "practice",
-    template: "The spacing is {value}, under {limit}: the hits are heard as a buzz, not as hands.",
+    template:
+      "The spacing is {value}, under {limit}: the hits are heard as a buzz, not one by one. Lengthen the spacing.",
     check: ({ results: { spacing } }) =>
       spacing !== undefined && spacing < 5e-3 ? { value: spacing, limit: 5e-3 } : undefined,
   },
@@ -85,7 +86,8 @@ export const limits: readonly Limit<P, C, R>[] = [
     severity: "caution",
     unit: "",
     source: "practice",
-    template: "Capacitors of {value} with four hits or more: above {limit} the count is a matter of luck. Take 5 %.",
+    template:
+      "Capacitors of {value} with four hits or more: above {limit} the count is a matter of luck. Take capacitors of 5 %.",
     check: ({ conditions: { capacitorTolerance }, results: { hits } }) =>
       hits !== undefined && hits >= 4 && capacitorTolerance >= 0.1
         ? { value: capacitorTolerance, limit: 0.05 }
@@ -96,7 +98,8 @@ export const limits: readonly Limit<P, C, R>[] = [
     severity: "caution",
     unit: "s",
     source: "practice",
-    template: "The tail starts at {value}, before the last hit at {limit}: it fills the valleys.",
+    template:
+      "The tail starts at {value}, before the last hit at {limit}: it fills the valleys. Delay the tail, or shorten the burst.",
     check: ({ results: { tailStart, hitTimes } }) => {
       const last = hitTimes?.at(-1);
       return tailStart !== undefined && last !== undefined && tailStart < last
@@ -110,7 +113,7 @@ export const limits: readonly Limit<P, C, R>[] = [
     unit: "V",
     source: "derivation",
     template:
-      "The comparator's bias current drops {value} across R_T, more than {limit} (a hundredth of the upper threshold). The figures include it; parts differ.",
+      "The comparator's bias current drops {value} across R_T, more than {limit} (a hundredth of the upper threshold). The figures include it, but parts differ: take a comparator of less bias current, or a smaller R_T.",
     check: ({ conditions, results: { biasShift, thresholdShare } }) => {
       const limit = 0.01 * thresholdShare! * conditions.outputHigh;
       return biasShift! > limit ? { value: biasShift!, limit } : undefined;

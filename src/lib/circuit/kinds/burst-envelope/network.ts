@@ -75,7 +75,7 @@ export const network: Network = {
     { draw: "port", at: [1, 17], label: "trigger", side: "left" },
     { draw: "part", part: "rg", symbol: "resistor", from: [1, 17], to: [5, 17], nodes: ["s", "g"] },
     { draw: "dot", at: [5, 17] },
-    { draw: "node", at: [5, 17], label: "gate" },
+    { draw: "node", at: [6.6, 17], label: "gate" },
     { draw: "part", part: "cg", symbol: "capacitor", from: [5, 17], to: [5, 20], nodes: ["g", "0"] },
     { draw: "ground", at: [5, 20] },
     { draw: "node", at: [14, 16], label: "end of gate" },

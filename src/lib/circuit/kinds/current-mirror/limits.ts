@@ -40,7 +40,7 @@ const bendsDecay: Limit<Parts, C, R> = {
   unit: "dB",
   source: "mirror-derivation",
   template:
-    "From the peak to a hundredth of it the ratio changes by {value}, more than {limit}: the decay is bent, its times to −20 dB and −60 dB disagree. Lower the voltage across the output transistor, or take a Wilson mirror.",
+    "From the peak to a hundredth of it the ratio changes by {value}, more than {limit}: the decay is bent, and its times to −20 dB and −60 dB disagree. Lower the voltage across the output transistor, or take a Wilson mirror.",
   check: ({ results }) =>
     results.tailBendDb !== undefined && results.tailBendDb > mostBendDb
       ? { value: results.tailBendDb, limit: mostBendDb }
@@ -53,7 +53,7 @@ const errorUntrimmed: Limit<Parts, C, R> = {
   unit: "",
   source: "practice",
   template:
-    "The ratio is off by {value} (as a share of what the resistors call for), more than {limit}, and nothing downstream trims it.",
+    "The ratio is off by {value} (as a share of what the resistors call for), more than {limit}, and nothing downstream trims it. Fit a trim, or take a mirror of less error.",
   check: ({ results, conditions }) => {
     const error = results.ratioError;
     if (conditions.trim !== "none" || error === undefined || Math.abs(error) <= mostError) return undefined;

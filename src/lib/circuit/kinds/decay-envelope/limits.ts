@@ -109,7 +109,7 @@ export const limits: readonly Limit<P, C, R>[] = [
     unit: "",
     source: "derivation",
     template:
-      "The dead band is {value} of the peak, above {limit}: what is heard is the decay as heard, not the −60 dB time of the capacitor.",
+      "The dead band is {value} of the peak, above {limit}: read the decay as heard, not the −60 dB time of the capacitor.",
     check: ({ conditions, results: { peakVoltage } }) => deadBandShare(conditions.deadBand, peakVoltage, 0.01, 0.05),
   },
   {

@@ -12,7 +12,7 @@ const front: readonly DrawnItem[] = [
   },
   { draw: "part", part: "rin", symbol: "resistor", from: [2, 5], to: [5, 5], nodes: ["in", "p"] },
   { draw: "dot", at: [5, 5] },
-  { draw: "node", at: [5, 5], label: "p" },
+  { draw: "node", at: [5, 6], label: "p" },
   { draw: "part", part: "rsh", symbol: "resistor", from: [5, 5], to: [5, 9], nodes: ["p", "0"] },
   { draw: "ground", at: [5, 9] },
   {
@@ -79,16 +79,16 @@ export const transimpedanceNetwork: Network = {
       draw: "wire",
       through: [
         [14, 3],
-        [14, 1],
-        [15, 1],
+        [14, 0],
+        [15, 0],
       ],
     },
-    { draw: "part", part: "cf", symbol: "capacitor", from: [15, 1], to: [19, 1], nodes: ["x", "o"] },
+    { draw: "part", part: "cf", symbol: "capacitor", from: [15, 0], to: [19, 0], nodes: ["x", "o"] },
     {
       draw: "wire",
       through: [
-        [19, 1],
-        [22, 1],
+        [19, 0],
+        [22, 0],
         [22, 3],
       ],
     },

@@ -17,7 +17,8 @@ export function sharedLimits<P extends Parts, C extends Conditions, R extends Re
       severity: "caution",
       unit: "V",
       source: "practice",
-      template: "The threshold is {value}, below {limit}: ground noise and the tails of slow modulation fire it.",
+      template:
+        "The threshold is {value}, below {limit}: ground noise and the tails of slow modulation fire it. Raise it.",
       check: ({ results: { threshold } }) =>
         threshold !== undefined && threshold < 1 ? { value: threshold, limit: 1 } : undefined,
     },
@@ -26,7 +27,8 @@ export function sharedLimits<P extends Parts, C extends Conditions, R extends Re
       severity: "caution",
       unit: "V",
       source: "practice",
-      template: "The threshold is {value}, above {limit}: a 5 V gate that lost a little on its cable is missed.",
+      template:
+        "The threshold is {value}, above {limit}: a 5 V gate that lost a little on its cable is missed. Lower it.",
       check: ({ results: { threshold } }) =>
         threshold !== undefined && threshold > 3.5 ? { value: threshold, limit: 3.5 } : undefined,
     },
@@ -35,7 +37,8 @@ export function sharedLimits<P extends Parts, C extends Conditions, R extends Re
       severity: "caution",
       unit: "Ω",
       source: "practice",
-      template: "The input resistance is {value}, below {limit}: several inputs on one output load it down.",
+      template:
+        "The input resistance is {value}, below {limit}: several inputs on one output load it down. Take larger resistors at the input.",
       check: ({ results: { inputResistance } }) =>
         inputResistance !== undefined && inputResistance < 47e3 ? { value: inputResistance, limit: 47e3 } : undefined,
     },
@@ -45,7 +48,7 @@ export function sharedLimits<P extends Parts, C extends Conditions, R extends Re
       unit: "",
       source: "derivation",
       template:
-        "The pulse lasts {value} charging time constants, fewer than {limit}: the peak is more than 5 % short and depends on the pulse width.",
+        "The pulse lasts {value} charging time constants, fewer than {limit}: the peak is more than 5 % short and depends on the pulse width. Lengthen the pulse, or charge through less.",
       check: ({ conditions, results }) => fillLimit(conditions.chargeTimeConstant, results.pulseWidth, 0, 3),
     },
     {
@@ -54,7 +57,7 @@ export function sharedLimits<P extends Parts, C extends Conditions, R extends Re
       unit: "",
       source: "derivation",
       template:
-        "The pulse lasts {value} charging time constants, fewer than {limit}: the peak is more than 1 % short of full.",
+        "The pulse lasts {value} charging time constants, fewer than {limit}: the peak is more than 1 % short of full. Lengthen the pulse if that matters.",
       check: ({ conditions, results }) => fillLimit(conditions.chargeTimeConstant, results.pulseWidth, 3, 4.6),
     },
     {
@@ -62,7 +65,8 @@ export function sharedLimits<P extends Parts, C extends Conditions, R extends Re
       severity: "caution",
       unit: "s",
       source: "practice",
-      template: "The pulse lasts {value}, longer than {limit}: the hold is heard as a step before the decay.",
+      template:
+        "The pulse lasts {value}, longer than {limit}: the hold is heard as a step before the decay. Shorten it.",
       check: ({ results: { pulseWidth } }) =>
         pulseWidth !== undefined && pulseWidth > 10e-3 ? { value: pulseWidth, limit: 10e-3 } : undefined,
     },
@@ -72,7 +76,7 @@ export function sharedLimits<P extends Parts, C extends Conditions, R extends Re
       unit: "s",
       source: "bounce",
       template:
-        "The lock-out of {value} is shorter than {limit}: a button bounces for 1.6 ms on average and up to 6.2 ms, and a hit doubles.",
+        "The lock-out of {value} is shorter than {limit}: a button bounces for 1.6 ms on average and up to 6.2 ms, and a hit doubles. Lengthen the lock-out.",
       check: ({ conditions: { lockOut } }) =>
         lockOut !== null && lockOut < 7e-3 ? { value: lockOut, limit: 7e-3 } : undefined,
     },

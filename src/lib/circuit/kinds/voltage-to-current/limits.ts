@@ -32,7 +32,8 @@ const largePeak: Any<typeof results> = {
   severity: "caution",
   unit: "A",
   source: "practice",
-  template: "The peak is {value}; plan for {limit} at most, half of what the bias pin stands.",
+  template:
+    "The peak is {value}; plan for {limit} at most, half of what the bias pin stands. Take a larger resistor, or lower the control voltage.",
   check: (context) => {
     const value = sharedFigures(context.results).outputCurrent!;
     return value > mostBias * (1 + 1e-9) ? { value, limit: mostBias } : undefined;
@@ -62,7 +63,7 @@ export const driverLimits: readonly DriverLimit[] = [
     unit: "V",
     source: "converter-derivation",
     template:
-      "The control voltage peaks at {value} and is followed up to {limit} only: op amp or transistor saturates and the top of the envelope is cut off. Lower the voltage, or raise the rail.",
+      "The control voltage peaks at {value} and is followed up to {limit} only: the op amp or the transistor saturates, and the top of the envelope is cut off. Lower the voltage, or raise the rail.",
     check: ({ conditions, results: { reach } }) =>
       conditions.controlVoltage > reach! * (1 + 1e-12)
         ? { value: conditions.controlVoltage, limit: reach! }
@@ -73,7 +74,8 @@ export const driverLimits: readonly DriverLimit[] = [
     severity: "caution",
     unit: "V",
     source: "practice",
-    template: "Only {value} is left across the transistor at the peak; keep {limit}.",
+    template:
+      "Only {value} is left across the transistor at the peak; keep {limit}. Lower the control voltage, or raise the rail.",
     check: ({ results: { headroom } }) =>
       headroom! < leastHeadroom ? { value: headroom!, limit: leastHeadroom } : undefined,
   },
@@ -83,7 +85,7 @@ export const driverLimits: readonly DriverLimit[] = [
     unit: "V",
     source: "practice",
     template:
-      "The envelope rests at {value}, below {limit}: the op amp runs to its negative swing and must come back before the next hit.",
+      "The envelope rests at {value}, below {limit}: the op amp runs to its negative swing and must come back before the next hit. Let the envelope rest at ground.",
     check: ({ conditions: { controlRest } }) => (controlRest < 0 ? { value: controlRest, limit: 0 } : undefined),
   },
   {
@@ -125,7 +127,8 @@ export const resistorLimits: readonly Limit<Parts, typeof conditions, typeof res
     severity: "fault",
     unit: "V",
     source: "converter-derivation",
-    template: "Between control and bias pin lie {value}; the pin takes current only above {limit}.",
+    template:
+      "Between control and bias pin lie {value}; the pin takes current only above {limit}. Raise the control voltage.",
     check: ({ results: { headroom } }) => (headroom! <= 0 ? { value: headroom!, limit: 0 } : undefined),
   },
 ];

@@ -65,7 +65,7 @@ function design(
     return {
       refused: true,
       field: "ratio",
-      message: `With ${formatQuantity(r1, "Ω")} in the reference's emitter the ratio reaches ${formatQuantity(largest, "")} at most. Ask for less, or take a larger R1.`,
+      message: `With ${formatQuantity(r1, "Ω")} in the reference's emitter the ratio reaches ${formatQuantity(largest, "")} at most. Ask for less, or take a larger R_1.`,
     };
   return { r1, r2: Math.exp(solveBracketed(excess, Math.log(leastR2), Math.log(mostR2))) };
 }

@@ -57,7 +57,7 @@ const network: Network = {
       ],
     },
     { draw: "dot", at: [14, 6] },
-    { draw: "node", at: [14, 6], label: "b" },
+    { draw: "node", at: [15.2, 6.8], label: "b" },
     {
       draw: "wire",
       through: [

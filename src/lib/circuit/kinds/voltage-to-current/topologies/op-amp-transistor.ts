@@ -79,7 +79,7 @@ function design(wanted: number, given: ConditionValues<C>): PartValues<P> | Desi
   return {
     refused: true,
     field: "controlVoltage",
-    message: `A control voltage of ${formatQuantity(given.controlVoltage, "V")} is not followed at this current: op amp or transistor saturates. Lower it, or raise the positive rail.`,
+    message: `A control voltage of ${formatQuantity(given.controlVoltage, "V")} is not followed at this current: the op amp or the transistor saturates. Lower it, or raise the positive rail.`,
   };
 }
 

@@ -58,7 +58,7 @@ function design(wanted: number, given: ConditionValues<C>): PartValues<P> | Desi
   return {
     refused: true,
     field: "controlVoltage",
-    message: `The bias pin sits at ${formatQuantity(pinOf(given), "V")}; a control voltage above that is needed.`,
+    message: `The bias pin sits at ${formatQuantity(pinOf(given), "V")}; a higher control voltage is needed. Raise it.`,
   };
 }
 

@@ -14,7 +14,7 @@ export const limits: readonly Limit<P, C, R>[] = [
     unit: "",
     source: "mfb-derivation",
     template:
-      "R_B is less than a part of the network and more of a trim: 2Q²/|H0| is {value}, and below {limit} small errors of R_A move the centre. Ask for less gain or a higher Q.",
+      "R_B is less than a part of the network and more of a trim: 2Q²/|H_0| is {value}, and below {limit} small errors of R_A move the centre. Ask for less gain or a higher Q.",
     check: ({ parts, conditions }) => {
       // For any capacitors Q²(C1 + C2)/C1 over |H0| equals 1 + RA/RB.
       const { ra, rb } = networkAt(parts, conditions);
@@ -28,7 +28,7 @@ export const limits: readonly Limit<P, C, R>[] = [
     unit: "",
     source: "mfb-derivation",
     template:
-      "Q·f0/ft is {value}, above {limit}: the op amp lowers the centre and raises the Q by about this share. The figures here include it; another op amp will differ.",
+      "Q·f_0/f_t is {value}, above {limit}: the op amp lowers the centre and raises the Q by about this share. The figures here include it, but op amps of one type differ: take a faster one, or trim the centre.",
     check: ({ conditions, results }) => {
       if (conditions.gainBandwidth === null || results.centreFrequency === undefined) return undefined;
       const share = (results.qualityFactor! * results.centreFrequency) / conditions.gainBandwidth;
@@ -41,7 +41,7 @@ export const limits: readonly Limit<P, C, R>[] = [
     unit: "",
     source: "practice",
     template:
-      "The loop gain at the centre is {value}, below {limit} (26 dB): the response depends on the op amp's own gain-bandwidth.",
+      "The loop gain at the centre is {value}, below {limit} (26 dB): the response depends on the op amp's own gain-bandwidth. Take a faster op amp, or ask for less Q or gain.",
     check: ({ results }) =>
       results.loopGain !== undefined && results.loopGain < 20 ? { value: results.loopGain, limit: 20 } : undefined,
   },
@@ -50,7 +50,8 @@ export const limits: readonly Limit<P, C, R>[] = [
     severity: "caution",
     unit: "Ω",
     source: "practice",
-    template: "R_B in circuit is {value}, below {limit}: track and wiper resistance become part of it.",
+    template:
+      "R_B in circuit is {value}, below {limit}: track and wiper resistance become part of it. Ask for less Q, or take smaller capacitors.",
     check: ({ parts, conditions }) => {
       const { rb } = networkAt(parts, conditions);
       return rb < 100 ? { value: rb, limit: 100 } : undefined;
@@ -71,7 +72,7 @@ export const limits: readonly Limit<P, C, R>[] = [
     unit: "",
     source: "mfb-derivation",
     template:
-      "The source resistance is {value} of R_A, above {limit}: it lowers the gain and moves the centre. The figures here include it; a pot in front changes it as it turns.",
+      "The source resistance is {value} of R_A, above {limit}: it lowers the gain and moves the centre. The figures here include it; a pot in front changes it as it turns. Buffer the source.",
     check: ({ parts, conditions }) => {
       const share = conditions.sourceResistance / parts.ra;
       return share > 0.02 ? { value: share, limit: 0.02 } : undefined;

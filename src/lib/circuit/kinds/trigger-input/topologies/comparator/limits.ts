@@ -12,7 +12,7 @@ export const limits: readonly Limit<P, C, R>[] = [
     unit: "V",
     source: "derivation",
     template:
-      "A pulse of {value} does not give one pulse at the output: the thresholds are {limit} rising and {detail} falling, and both must lie between ground and the pulse.",
+      "A pulse of {value} does not give one pulse at the output: the thresholds are {limit} rising and {detail} falling, and both must lie between ground and the pulse. Move the threshold, or take less hysteresis.",
     check: ({ conditions, results }) =>
       results.pulseWidth === undefined
         ? {
@@ -28,7 +28,7 @@ export const limits: readonly Limit<P, C, R>[] = [
     unit: "s",
     source: "derivation",
     template:
-      "The edge takes {value}, longer than the differentiator's {limit}: less than 63 % of the step reaches the comparator.",
+      "The edge takes {value}, longer than the differentiator's {limit}: less than 63 % of the step reaches the comparator. Take a larger time constant in front.",
     check: ({ conditions: { riseTime, differentiator } }) =>
       riseTime !== null && differentiator !== null && riseTime > differentiator
         ? { value: riseTime, limit: differentiator }

@@ -41,7 +41,7 @@ export const network: Network = {
       ],
     },
     { draw: "dot", at: [19, 7] },
-    { draw: "rail", at: [5, 7], label: "+V" },
+    { draw: "rail", at: [5, 7], label: "V+" },
     { draw: "part", part: "rr1", symbol: "resistor", from: [5, 7], to: [5, 10], nodes: ["vp", "r"] },
     { draw: "dot", at: [5, 10] },
     { draw: "part", part: "rr2", symbol: "resistor", from: [5, 10], to: [5, 13], nodes: ["r", "0"] },

@@ -51,7 +51,8 @@ export const limits: readonly Limit<P, C, R>[] = [
     severity: "note",
     unit: "Ω",
     source: "practice",
-    template: "During the edge the source sees {value}, less than {limit}: an output of 1 kΩ loses more than a tenth.",
+    template:
+      "During the edge the source sees {value}, less than {limit}: an output of 1 kΩ loses more than a tenth. Raise R_A or R_D, or drive the input from a buffer.",
     check: ({ results: { edgeResistance } }) =>
       edgeResistance! < heavyEdge ? { value: edgeResistance!, limit: heavyEdge } : undefined,
   },

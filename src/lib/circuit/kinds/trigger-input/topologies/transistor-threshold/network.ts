@@ -8,7 +8,7 @@ export const network: Network = {
     { draw: "part", part: "rs", symbol: "resistor", from: [1, 7], to: [4, 7], nodes: ["tip", "jack"] },
     { draw: "part", part: "cd", symbol: "capacitor", from: [4, 7], to: [7, 7], nodes: ["jack", "a"] },
     { draw: "dot", at: [7, 7] },
-    { draw: "node", at: [7, 7], label: "a" },
+    { draw: "node", at: [7, 8], label: "a" },
     { draw: "part", part: "rd", symbol: "resistor", from: [7, 7], to: [7, 12], nodes: ["a", "0"] },
     { draw: "ground", at: [7, 12] },
     { draw: "part", part: "ra", symbol: "resistor", from: [7, 7], to: [11, 7], nodes: ["a", "b"] },
@@ -33,7 +33,7 @@ export const network: Network = {
       nodes: { base: "b", collector: "c", emitter: "0" },
     },
     { draw: "ground", at: [19, 9] },
-    { draw: "rail", at: [19, 1], label: "+V" },
+    { draw: "rail", at: [19, 1], label: "V+" },
     { draw: "part", part: "rc", symbol: "resistor", from: [19, 1], to: [19, 5], nodes: ["vp", "c"] },
     { draw: "dot", at: [19, 5] },
     {
