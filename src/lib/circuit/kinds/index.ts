@@ -4,6 +4,7 @@ import { burstEnvelope } from "./burst-envelope/index.ts";
 import { currentMirror } from "./current-mirror/index.ts";
 import { decayEnvelope } from "./decay-envelope/index.ts";
 import { otaCell } from "./ota-cell/index.ts";
+import { outputDriver } from "./output-driver/index.ts";
 import { summingNode } from "./summing-node/index.ts";
 import { triggerInput } from "./trigger-input/index.ts";
 import { trim } from "./trim/index.ts";
@@ -20,4 +21,5 @@ export const stageKinds: readonly StageKind[] = [
   bandPass,
   otaCell,
   summingNode,
+  outputDriver,
 ];
