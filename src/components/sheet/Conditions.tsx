@@ -95,14 +95,14 @@ function Named({ field }: { field: ConditionField }) {
 }
 
 function Figure({ stage, condition, field, id, readOnly }: ConditionProps<NumberField>) {
-  const { form, state, actions } = stage;
+  const { fields, state, actions } = stage;
   const value = state.conditions[condition];
   const figure = typeof value === "number" ? value : (field.suggestion ?? field.least);
   return (
     <>
       <div className="field-box">
         <QuantityInput
-          control={form.control}
+          fields={fields}
           name={`conditions.${condition}`}
           id={id}
           read={(text) => readFigure(text, field)}
@@ -115,7 +115,7 @@ function Figure({ stage, condition, field, id, readOnly }: ConditionProps<Number
         {field.unit !== "" && <span className="unit">{field.unit}</span>}
       </div>
       <FieldNote
-        control={form.control}
+        store={fields}
         fields={[{ name: `conditions.${condition}`, inForce: formatQuantity(figure, field.unit) }]}
         id={`${id}-note`}
         hint={field.help}
@@ -126,14 +126,13 @@ function Figure({ stage, condition, field, id, readOnly }: ConditionProps<Number
 
 /** Absent from an ideal world until its box is ticked; then its usual figure is offered. */
 function Surrounding({ stage, condition, field, id, readOnly }: ConditionProps<NumberField>) {
-  const { form, actions } = stage;
+  const { fields, actions } = stage;
   // Not read off the figure: on its way to 0.5k the field holds the 0 that stands for an ideal world.
   const [on, setOn] = useState((stage.state.conditions[condition] ?? null) !== field.default);
   const toggle = (next: boolean) => {
     setOn(next);
     const offered = next ? (field.suggestion ?? field.least) : field.default;
-    form.setValue(`conditions.${condition}`, offered === null ? "" : figureText(offered, field.unit));
-    form.clearErrors(`conditions.${condition}`);
+    fields.set(`conditions.${condition}`, offered === null ? "" : figureText(offered, field.unit));
     actions.setCondition(condition, offered);
   };
   return (

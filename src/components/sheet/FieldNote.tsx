@@ -1,9 +1,8 @@
-import { useFormState, type Control, type FieldPath } from "react-hook-form";
 import { TextWithSymbols } from "./TextWithSymbols.tsx";
-import type { StageFields } from "./fields.ts";
+import { useFirstFault, type FieldName, type FieldStore } from "./fieldStore.ts";
 
 interface NotedField {
-  name: FieldPath<StageFields>;
+  name: FieldName;
   /** What is computed with while the field holds no figure. */
   inForce: string;
   /** Where several fields share the note. */
@@ -11,7 +10,7 @@ interface NotedField {
 }
 
 interface FieldNoteProps {
-  control: Control<StageFields>;
+  store: FieldStore;
   /** The first of these that has a fault speaks. */
   fields: NotedField[];
   id: string;
@@ -21,23 +20,18 @@ interface FieldNoteProps {
 }
 
 /** The space under a field, always kept free: a hint, or what is wrong and what stands meanwhile. */
-export function FieldNote({ control, fields, id, hint, refused = false }: FieldNoteProps) {
-  const { errors } = useFormState({ control, name: fields.map(({ name }) => name) });
-  const faulty = fields.find(({ name }) => messageAt(errors, name) !== undefined);
+export function FieldNote({ store, fields, id, hint, refused = false }: FieldNoteProps) {
+  const first = useFirstFault(
+    store,
+    fields.map(({ name }) => name),
+  );
+  const faulty = first && fields[first.at];
   const label = faulty?.label === undefined ? "" : `${faulty.label}: `;
   return (
     <p id={id} className={faulty || refused ? "field-note error" : "field-note"} aria-live="polite">
       {faulty
-        ? `${label}${messageAt(errors, faulty.name)} Still ${faulty.inForce}.`
+        ? `${label}${first.fault} Still ${faulty.inForce}.`
         : hint !== undefined && <TextWithSymbols text={hint} />}
     </p>
   );
-}
-
-function messageAt(errors: unknown, path: string): string | undefined {
-  let place: unknown = errors;
-  for (const key of [...path.split("."), "message"]) {
-    place = typeof place === "object" && place !== null ? (place as Record<string, unknown>)[key] : undefined;
-  }
-  return typeof place === "string" && place !== "" ? place : undefined;
 }

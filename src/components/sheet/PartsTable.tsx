@@ -72,7 +72,7 @@ export function PartsTable({ stage, id, designators, marks, readOnly, onLit }: P
         </tbody>
       </table>
       <FieldNote
-        control={stage.form.control}
+        store={stage.fields}
         fields={entries.map(([key, field]) => ({
           name: `parts.${key}` as const,
           inForce: formatPartValue(stage.state.parts[key]!, field.unit),
@@ -108,7 +108,7 @@ interface PartRowProps {
 }
 
 function PartRow({ stage, part, field, id, designator, markField, exact, moves, readOnly, onLit }: PartRowProps) {
-  const { state, form, actions } = stage;
+  const { state, fields, actions } = stage;
   const value = state.parts[part]!;
   const series = seriesOf(field.partClass, state.series);
   return (
@@ -125,7 +125,7 @@ function PartRow({ stage, part, field, id, designator, markField, exact, moves, 
       <td className="right val dim">{exactText(exact, field)}</td>
       <td className="right">
         <QuantityInput
-          control={form.control}
+          fields={fields}
           name={`parts.${part}`}
           id={id}
           className="input input-cell"

@@ -1,11 +1,10 @@
 import type { KeyboardEvent } from "react";
-import { useController, type Control, type FieldPath } from "react-hook-form";
 import type { Reading } from "#lib/wire/figureText.ts";
-import type { StageFields } from "./fields.ts";
+import { useField, type FieldName, type FieldStore } from "./fieldStore.ts";
 
 interface QuantityInputProps {
-  control: Control<StageFields>;
-  name: FieldPath<StageFields>;
+  fields: FieldStore;
+  name: FieldName;
   id: string;
   /** Where no visible label points at it. */
   label?: string;
@@ -27,32 +26,18 @@ interface QuantityInputProps {
  * One figure, typed as people write it. What cannot be read stays in the field with its fault, while the last good value
  * stays in force.
  */
-export function QuantityInput({ control, name, read, print, step, onValue, ...input }: QuantityInputProps) {
-  const {
-    field: { ref, name: fieldName, value: typed, onChange, onBlur },
-    fieldState,
-  } = useController({
-    control,
-    name,
-    rules: {
-      validate: (text) => {
-        const reading = read(String(text));
-        return reading.ok || reading.message;
-      },
-    },
-  });
-  const text = String(typed);
+export function QuantityInput({ fields, name, read, print, step, onValue, ...input }: QuantityInputProps) {
+  const { text, fault } = useField(fields, name);
   const onKeyDown = (event: KeyboardEvent) => {
     if (input.readOnly || (event.key !== "ArrowUp" && event.key !== "ArrowDown")) return;
     event.preventDefault();
     const value = step(event.key === "ArrowUp" ? 1 : -1, event.shiftKey ? 10 : 1);
-    onChange(print(value));
+    fields.set(name, print(value));
     onValue(value);
   };
   return (
     <input
-      ref={ref}
-      name={fieldName}
+      name={name}
       id={input.id}
       className={input.className ?? "input"}
       type="text"
@@ -63,11 +48,11 @@ export function QuantityInput({ control, name, read, print, step, onValue, ...in
       readOnly={input.readOnly}
       value={text}
       aria-label={input.label}
-      aria-invalid={fieldState.invalid || input.refused || undefined}
+      aria-invalid={fault !== undefined || input.refused || undefined}
       aria-describedby={input.describedBy}
       onChange={(event) => {
-        onChange(event.target.value);
         const reading = read(event.target.value);
+        fields.set(name, event.target.value, reading.ok ? undefined : reading.message);
         if (reading.ok) onValue(reading.value);
       }}
       onFocus={(event) => {
@@ -76,8 +61,7 @@ export function QuantityInput({ control, name, read, print, step, onValue, ...in
       }}
       onBlur={() => {
         const reading = read(text);
-        if (reading.ok && !input.readOnly) onChange(print(reading.value));
-        onBlur();
+        if (reading.ok && !input.readOnly) fields.set(name, print(reading.value));
         input.onBlur?.();
       }}
       onKeyDown={onKeyDown}

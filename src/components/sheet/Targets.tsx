@@ -48,7 +48,7 @@ interface TargetFieldProps {
 }
 
 function TargetField({ stage, target, id, refusalId, readOnly }: TargetFieldProps) {
-  const { topology, state, form, actions, refusal } = stage;
+  const { topology, state, fields, actions, refusal } = stage;
   const field = topology.targets[target]!;
   const value = state.targets[target]!;
   const width = state.windows[target] ?? field.window;
@@ -62,7 +62,7 @@ function TargetField({ stage, target, id, refusalId, readOnly }: TargetFieldProp
       </label>
       <div className="field-box">
         <QuantityInput
-          control={form.control}
+          fields={fields}
           name={`targets.${target}`}
           id={id}
           read={(text) => readFigure(text, field)}
@@ -80,7 +80,7 @@ function TargetField({ stage, target, id, refusalId, readOnly }: TargetFieldProp
           window ±<span className="sr-only"> per cent, {field.label.toLowerCase()}</span>
         </label>
         <QuantityInput
-          control={form.control}
+          fields={fields}
           name={`windows.${target}`}
           id={`${id}-window`}
           className="input input-window"
@@ -98,7 +98,7 @@ function TargetField({ stage, target, id, refusalId, readOnly }: TargetFieldProp
         </span>
       </p>
       <FieldNote
-        control={form.control}
+        store={fields}
         fields={[
           { name: `targets.${target}`, inForce: formatQuantity(value, field.unit) },
           { name: `windows.${target}`, inForce: `± ${windowText(width)} %` },

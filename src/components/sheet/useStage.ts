@@ -1,5 +1,4 @@
 import { useCallback, useMemo, useState } from "react";
-import { useForm } from "react-hook-form";
 import {
   analyseStage,
   designExactly,
@@ -11,7 +10,8 @@ import {
 import { partText } from "#lib/wire/figureText.ts";
 import type { KindBrief } from "#lib/wire/kindBrief.ts";
 import { decidedParts, idealConditions, type SeriesChoice, type StageState } from "#lib/wire/stageState.ts";
-import { fieldsOf, type StageFields } from "./fields.ts";
+import { fieldsOf } from "./fields.ts";
+import { fieldStore } from "./fieldStore.ts";
 
 export type Stage = ReturnType<typeof useStage>;
 
@@ -30,7 +30,7 @@ export function useStage(
   { onChange, settle }: StageWatcher = {},
 ) {
   const [state, setState] = useState(initial);
-  const form = useForm<StageFields>({ defaultValues: fieldsOf(topology, initial), mode: "onChange" });
+  const [fields] = useState(() => fieldStore(fieldsOf(topology, initial)));
 
   const change = useCallback(
     (wanted: StageState) => {
@@ -40,7 +40,6 @@ export function useStage(
     },
     [onChange, settle, state],
   );
-  const { setValue } = form;
   const actions = useMemo(
     () => ({
       set: (group: "targets" | "windows" | "parts", key: string, value: number) =>
@@ -50,12 +49,12 @@ export function useStage(
       setSeries: (series: SeriesChoice) => change({ ...state, series }),
       takeParts: (parts: PlainValues) => {
         for (const [key, field] of Object.entries(topology.parts)) {
-          setValue(`parts.${key}`, partText(parts[key]!, field.unit), { shouldValidate: true });
+          fields.set(`parts.${key}`, partText(parts[key]!, field.unit));
         }
         change({ ...state, parts });
       },
     }),
-    [change, setValue, state, topology],
+    [change, fields, state, topology],
   );
 
   const analysis = useMemo(() => analyseStage(topology, state), [topology, state]);
@@ -77,5 +76,5 @@ export function useStage(
   );
   const refusal = design && isRefusal(design) ? design : undefined;
   const exact = design && !isRefusal(design) ? design : undefined;
-  return { kind, topology, state, form, actions, analysis, ideal, exact, refusal, moves, telling };
+  return { kind, topology, state, fields, actions, analysis, ideal, exact, refusal, moves, telling };
 }
