@@ -33,7 +33,8 @@ export function PartSymbol({ item, marking, lit, fitted }: PartSymbolProps) {
       >
         <SymbolTspans symbol={marking.name} />
         <tspan className="part-value" x={textX} dy="15">
-          {marking.value}
+          {/* Short, since it stands where a value of a few letters does. */}
+          {fitted ? marking.value : "none"}
         </tspan>
       </text>
     </g>
@@ -47,8 +48,9 @@ function PartShape({ item, length, fitted }: { item: PartItem; length: number; f
     const [left, right] = [middle - 3.5, middle + 3.5];
     return <path className="line" d={`M0 0H${left}M${right} 0H${length}M${left} -11V11M${right} -11V11`} />;
   }
-  // One that is not fitted is bridged: the current still finds its way.
-  if (!fitted) return <path className="line" d={`M0 0H${length}`} />;
+  // A pot that is not fitted is bridged, and the current still finds its way; any other part leaves its place open.
+  if (!fitted && (item.draw === "pot" || item.symbol === "rheostat"))
+    return <path className="line" d={`M0 0H${length}`} />;
   const half = Math.min(18, middle - 6);
   return (
     <>

@@ -2,7 +2,7 @@ import type { DrawnItem, Network } from "../../stage/network.ts";
 import { paths, type Path } from "./fields.ts";
 
 /** Rows of the inputs, from the top. */
-const rowOf = (path: Path) => 6 + 2 * (path - 1);
+const rowOf = (path: Path) => 6 + 3 * (path - 1);
 const [first, last] = [rowOf(1), rowOf(8)];
 
 const inputs = paths.flatMap((path): DrawnItem[] => {
@@ -53,8 +53,8 @@ export const network: Network = {
       draw: "wire",
       through: [
         [9, first],
-        [9, 2],
-        [11, 2],
+        [9, 1],
+        [11, 1],
       ],
     },
     { draw: "dot", at: [9, 4] },
@@ -65,13 +65,13 @@ export const network: Network = {
         [11, 4],
       ],
     },
-    { draw: "part", part: "cf", symbol: "capacitor", from: [11, 2], to: [15, 2], nodes: ["o", "m"] },
+    { draw: "part", part: "cf", symbol: "capacitor", from: [11, 1], to: [15, 1], nodes: ["o", "m"] },
     { draw: "part", part: "rf", symbol: "resistor", from: [11, 4], to: [15, 4], nodes: ["o", "m"] },
     {
       draw: "wire",
       through: [
-        [15, 2],
-        [18, 2],
+        [15, 1],
+        [18, 1],
         [18, 7],
       ],
     },
