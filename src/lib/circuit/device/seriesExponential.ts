@@ -15,17 +15,17 @@ export function solvedVoltage(voltage: number, scale: number, slope: number): nu
   if (scale === 0) return voltage;
   let u = voltage > 0 ? Math.min(voltage, slope * Math.log1p(voltage / scale)) : 0;
   for (let step = 0; step < mostSteps; step++) {
-    const exponential = scale * Math.exp(u / slope);
-    const residual = u + exponential - scale - voltage;
-    const next = u - residual / (1 + exponential / slope);
-    if (next < u) {
+    const grown = scale * Math.expm1(u / slope);
+    const residual = u + grown - voltage;
+    const next = u - residual / (1 + (grown + scale) / slope);
+    if (u - next > 4 * Number.EPSILON * Math.abs(u)) {
       u = next;
       continue;
     }
-    // The fall has ended on rounding, which the exponential magnifies by u/slope.
-    const rounding =
-      Number.EPSILON * (1 + Math.abs(u / slope)) * (Math.abs(u) + exponential + scale + Math.abs(voltage));
-    if (Math.abs(residual) <= 4 * rounding) return u;
+    // What is left of the fall is rounding, which the exponential magnifies by u/slope.
+    const sizes = Math.abs(u) + Math.abs(grown) + Math.abs(voltage);
+    const rounding = Number.EPSILON * (1 + Math.abs(u / slope)) * sizes;
+    if (Math.abs(residual) <= 8 * rounding) return u;
     break;
   }
   throw new RangeError(`solvedVoltage: no root for ${voltage} V, scale ${scale} V, slope ${slope} V`);

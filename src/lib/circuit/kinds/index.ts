@@ -6,6 +6,7 @@ import { decayEnvelope } from "./decay-envelope/index.ts";
 import { otaCell } from "./ota-cell/index.ts";
 import { outputDriver } from "./output-driver/index.ts";
 import { summingNode } from "./summing-node/index.ts";
+import { transistorCell } from "./transistor-cell/index.ts";
 import { triggerInput } from "./trigger-input/index.ts";
 import { trim } from "./trim/index.ts";
 import { voltageToCurrent } from "./voltage-to-current/index.ts";
@@ -20,6 +21,7 @@ export const stageKinds: readonly StageKind[] = [
   trim,
   bandPass,
   otaCell,
+  transistorCell,
   summingNode,
   outputDriver,
 ];

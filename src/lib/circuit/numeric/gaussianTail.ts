@@ -34,3 +34,12 @@ export function shareBeyond(deviations: number): number {
 export function deviationsFor(share: number): number {
   return solveBracketed((z) => Math.log(shareBeyond(z) / share), 0, 37);
 }
+
+/** The share of time that Gaussian noise spends above this many standard deviations, of either sign. */
+export function shareAbove(deviations: number): number {
+  const oneSide = shareBeyond(deviations) / 2;
+  return deviations < 0 ? 1 - oneSide : oneSide;
+}
+
+/** Density of the standard normal distribution. */
+export const gaussianDensity = (z: number): number => Math.exp(-0.5 * z * z) / Math.sqrt(2 * Math.PI);
