@@ -3,6 +3,8 @@
  * `node --import tsx tests/golden/record.ts`. Files that exist are never written again.
  */
 import { existsSync, mkdirSync, writeFileSync } from "node:fs";
+import { fileURLToPath } from "node:url";
+import { format, resolveConfig } from "prettier";
 import {
   defaultParts,
   defaultTargets,
@@ -60,6 +62,7 @@ for (const kind of stageKinds)
       designators: designatorsOf(topology),
     };
     const revision: GoldenRevision = { libraryVersion, stage, ...recompute(topology, stage) };
-    writeFileSync(file, `${JSON.stringify(revision, null, 2)}\n`);
+    const filepath = fileURLToPath(file);
+    writeFileSync(file, await format(JSON.stringify(revision), { ...(await resolveConfig(filepath)), filepath }));
     console.log(`Recorded ${kind.id}/${topology.id} of ${libraryVersion}.`);
   }
