@@ -2,7 +2,7 @@ import type { Network } from "../../stage/network.ts";
 
 /** The envelope is the supply, so it enters from above. */
 export const network: Network = {
-  width: 24,
+  width: 26,
   height: 14,
   items: [
     { draw: "port", at: [1, 8], label: "noise", side: "left" },
@@ -37,17 +37,24 @@ export const network: Network = {
     { draw: "part", part: "rc", symbol: "resistor", from: [13, 2], to: [13, 6], nodes: ["env", "c"] },
     { draw: "dot", at: [13, 6] },
     { draw: "node", at: [13, 6], label: "c" },
-    { draw: "part", part: "co", symbol: "capacitor", from: [13, 6], to: [17, 6], nodes: ["c", "y"] },
-    { draw: "dot", at: [19, 6] },
     {
       draw: "wire",
       through: [
+        [13, 6],
         [17, 6],
-        [23, 6],
       ],
     },
-    { draw: "part", part: "ro", symbol: "resistor", from: [19, 6], to: [19, 11], nodes: ["y", "0"] },
-    { draw: "ground", at: [19, 11] },
-    { draw: "port", at: [23, 6], label: "out", side: "right" },
+    { draw: "part", part: "co", symbol: "capacitor", from: [17, 6], to: [20, 6], nodes: ["c", "y"] },
+    { draw: "dot", at: [21, 6] },
+    {
+      draw: "wire",
+      through: [
+        [20, 6],
+        [25, 6],
+      ],
+    },
+    { draw: "part", part: "ro", symbol: "resistor", from: [21, 6], to: [21, 11], nodes: ["y", "0"] },
+    { draw: "ground", at: [21, 11] },
+    { draw: "port", at: [25, 6], label: "out", side: "right" },
   ],
 };
