@@ -9,7 +9,17 @@ export default defineConfig({
         // Needs nothing: pure functions, and the repository's own files.
         test: {
           name: "unit",
-          include: folders("circuit", "kinds", "policy", "wire", "reference", "golden", "client", "project"),
+          include: folders(
+            "circuit",
+            "kinds",
+            "policy",
+            "wire",
+            "reference",
+            "golden",
+            "client",
+            "components",
+            "project",
+          ),
           testTimeout: 20_000,
         },
       },

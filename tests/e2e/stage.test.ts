@@ -62,6 +62,20 @@ test("from targets without an account to a stage saved in a voice, and found aga
   await close();
 });
 
+test("what cannot be fetched takes nothing off the sheet, and comes when asked again", async () => {
+  const { page, close } = await openPage(browser);
+  await visit(page, `${app.url}/calculators/band-pass`);
+  await field(page, /^Centre frequency/).fill("1234");
+  await page.route("**/_astro/Candidates.*.js", (route) => route.abort());
+  await page.getByRole("button", { name: "Work out parts" }).click();
+  await page.getByText("This part of the page could not be loaded").waitFor();
+  expect(await field(page, /^Centre frequency/).inputValue()).toBe("1234");
+  await page.unroute("**/_astro/Candidates.*.js");
+  await page.getByRole("button", { name: "try again" }).click();
+  await page.getByText("combinations tried").waitFor();
+  await close();
+});
+
 test("nothing typed is lost to a colleague's save, a lost connection or an expired sign-in", async () => {
   const { page, close } = await openMemberPage(browser, app.url, "designer");
   await page.getByRole("link", { name: "Woodpeck" }).click();

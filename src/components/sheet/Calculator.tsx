@@ -1,12 +1,16 @@
-import { lazy, Suspense, useEffect, useRef, useState } from "react";
+import { useEffect, useRef, useState } from "react";
 import { useTopology } from "#lib/client/stage/useTopology.ts";
 import type { KindBrief } from "#lib/wire/kindBrief.ts";
 import { writeAddress } from "#lib/wire/stageAddress.ts";
 import type { StageState } from "#lib/wire/stageState.ts";
+import { later } from "../page/later.tsx";
 import type { VoiceChoice } from "./SaveToVoice.tsx";
 import { StageSheet } from "./StageSheet.tsx";
 
-const SaveToVoice = lazy(() => import("./SaveToVoice.tsx").then((module) => ({ default: module.SaveToVoice })));
+const SaveToVoice = later(() => import("./SaveToVoice.tsx").then((module) => module.SaveToVoice), {
+  waiting: "Looking up the team’s voices…",
+  className: "save-panel",
+});
 
 interface CalculatorProps {
   kind: KindBrief;
@@ -70,11 +74,7 @@ function AddressedStage({ kind, initial, signedIn, voice, voiceId = null }: Calc
         )
       }
     >
-      {saving && (
-        <Suspense fallback={<p className="save-panel">Looking up the team’s voices…</p>}>
-          <SaveToVoice kind={kind} topology={topology} state={state} meant={voice} />
-        </Suspense>
-      )}
+      {saving && <SaveToVoice kind={kind} topology={topology} state={state} meant={voice} />}
     </StageSheet>
   );
 }

@@ -148,7 +148,7 @@ function TakeButton({ stage, candidate, rank }: { stage: Stage; candidate: Candi
       className="btn btn-small"
       aria-label={taken ? `Number ${rank} is in use` : `Take number ${rank}`}
       aria-disabled={taken}
-      onClick={() => taken || stage.actions.takeParts(candidate.parts)}
+      onClick={() => taken || stage.actions.applyParts(candidate.parts)}
     >
       {taken ? "In use" : "Take"}
     </button>

@@ -1,20 +1,26 @@
-import { lazy, Suspense, useDeferredValue, useId, useRef, useState, type ReactNode } from "react";
+import { useDeferredValue, useId, useRef, useState, type ReactNode } from "react";
 import type { AnyTopology } from "#lib/circuit/index.ts";
 import type { KindBrief } from "#lib/wire/kindBrief.ts";
 import type { StageState } from "#lib/wire/stageState.ts";
 import "../../styles/stage.css";
 import "../../styles/plot.css";
 import { NetworkDrawing } from "../network/NetworkDrawing.tsx";
+import { later } from "../page/later.tsx";
 import { Conditions } from "./Conditions.tsx";
 import { Curves } from "./Curves.tsx";
 import { PartsTable, SeriesChoosers, type PartMarks } from "./PartsTable.tsx";
 import { ResultsTable } from "./ResultsTable.tsx";
+import { StagePanels } from "./StagePanels.tsx";
+import { stagePanels } from "./stagePanels.ts";
 import { Targets } from "./Targets.tsx";
 import { TextWithSymbols } from "./TextWithSymbols.tsx";
 import { useStage } from "./useStage.ts";
 import { Warnings } from "./Warnings.tsx";
 
-const Candidates = lazy(() => import("./Candidates.tsx").then((module) => ({ default: module.Candidates })));
+const Candidates = later(() => import("./Candidates.tsx").then((module) => module.Candidates), {
+  waiting: "Working out parts…",
+  className: "stage-candidates",
+});
 
 export interface StageSheetProps {
   kind: KindBrief;
@@ -101,19 +107,17 @@ export function StageSheet({ kind, topology, initial, onChange, ...props }: Stag
         </section>
         <div id={`${id}-candidates`} className="stage-candidates-place" hidden={!open}>
           {open && (
-            <Suspense fallback={<p className="stage-candidates">Working out parts…</p>}>
-              <Candidates
-                stage={stage}
-                id={`${id}-candidate`}
-                keep={keep}
-                onKeep={setKeep}
-                onClose={() => {
-                  setOpen(false);
-                  opener.current?.focus();
-                }}
-                designators={designators}
-              />
-            </Suspense>
+            <Candidates
+              stage={stage}
+              id={`${id}-candidate`}
+              keep={keep}
+              onKeep={setKeep}
+              onClose={() => {
+                setOpen(false);
+                opener.current?.focus();
+              }}
+              designators={designators}
+            />
           )}
         </div>
         <section className="stage-results" aria-labelledby={`${id}-results`}>
@@ -122,6 +126,10 @@ export function StageSheet({ kind, topology, initial, onChange, ...props }: Stag
           <Warnings warnings={stage.analysis.warnings} />
         </section>
       </div>
+      <StagePanels
+        panels={stagePanels}
+        stage={{ kind, topology, state, designators, readOnly, apply: stage.actions.applyParts }}
+      />
       <section className="stage-curves" aria-label="Curves and network">
         <Curves topology={topology} state={drawn} fileName={fileName} />
         <figure className="plot" aria-labelledby={`${id}-network`}>

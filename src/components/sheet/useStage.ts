@@ -47,11 +47,12 @@ export function useStage(
       setCondition: (key: string, value: number | string | null) =>
         change({ ...state, conditions: { ...state.conditions, [key]: value } }),
       setSeries: (series: SeriesChoice) => change({ ...state, series }),
-      takeParts: (parts: PlainValues) => {
-        for (const [key, field] of Object.entries(topology.parts)) {
-          fields.set(`parts.${key}`, partText(parts[key]!, field.unit));
+      /** Several parts at once, their fields with them; the others stay. */
+      applyParts: (parts: PlainValues) => {
+        for (const [key, value] of Object.entries(parts)) {
+          fields.set(`parts.${key}`, partText(value, topology.parts[key]!.unit));
         }
-        change({ ...state, parts });
+        change({ ...state, parts: { ...state.parts, ...parts } });
       },
     }),
     [change, fields, state, topology],

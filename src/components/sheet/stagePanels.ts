@@ -1,0 +1,31 @@
+import type { ComponentType } from "react";
+import type { AnyTopology, PlainValues } from "#lib/circuit/index.ts";
+import type { KindBrief } from "#lib/wire/kindBrief.ts";
+import type { StageState } from "#lib/wire/stageState.ts";
+
+/** What every panel is told, anew with each change on the sheet. */
+export interface StagePanelProps {
+  kind: KindBrief;
+  topology: AnyTopology;
+  /** Parts, conditions, targets, windows and series, always such that they can be computed with. */
+  state: StageState;
+  /** By part, where the stage stands in a voice. */
+  designators: Record<string, string>;
+  readOnly: boolean;
+  /** Puts these parts on the sheet; the others stay. */
+  apply: (parts: PlainValues) => void;
+}
+
+export interface StagePanel {
+  id: string;
+  name: string;
+  /** In one sentence, what it answers: what a designer reads before opening it. */
+  says: string;
+  /** Whether it has anything to say of this topology; where left out it always has. */
+  fits?: (topology: AnyTopology) => boolean;
+  /** Made by `later`, so that no page fetches its code before somebody opens it. Leaving the page or closing it unmounts it. */
+  View: ComponentType<StagePanelProps>;
+}
+
+/** What every stage sheet offers below its results, in this order. Adding one: its component and a line here. */
+export const stagePanels: readonly StagePanel[] = [];
