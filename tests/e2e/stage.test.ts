@@ -69,7 +69,7 @@ test("what cannot be fetched takes nothing off the sheet, and comes when asked a
   await page.route("**/_astro/Candidates.*.js", (route) => route.abort());
   await page.getByRole("button", { name: "Work out parts" }).click();
   await page.getByText("This part of the page could not be loaded").waitFor();
-  expect(await field(page, /^Centre frequency/).inputValue()).toBe("1234");
+  expect(await field(page, /^Centre frequency/).inputValue()).toBe("1.234k");
   await page.unroute("**/_astro/Candidates.*.js");
   await page.getByRole("button", { name: "try again" }).click();
   await page.getByText("combinations tried").waitFor();
