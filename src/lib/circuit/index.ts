@@ -29,3 +29,6 @@ export { meritStatement, solveStage, type Candidate, type Solution, type SolveRe
 export { designExactly, isRefusal } from "./analysis/design.ts";
 export { sensitivities } from "./analysis/sensitivity.ts";
 export { declaredChanges, libraryVersion, type DeclaredChange } from "./version.ts";
+export { topologyOf, type DocumentLink, type DocumentStage, type VoiceDocument } from "./voice/document.ts";
+export { analyseStages, type StageWarning, type VoiceAnalysis } from "./voice/analyseStages.ts";
+export * from "./compare/index.ts";

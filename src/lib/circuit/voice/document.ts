@@ -1,0 +1,37 @@
+import type { PlainConditions, PlainValues } from "../stage/defaults.ts";
+import type { StageKind } from "../stage/kind.ts";
+import type { AnyTopology } from "../stage/topology.ts";
+
+/** One stage of a saved voice. */
+export interface DocumentStage {
+  id: string;
+  kind: string;
+  topology: string;
+  name: string;
+  parts: PlainValues;
+  conditions: PlainConditions;
+  targets: PlainValues;
+  windows?: PlainValues | undefined;
+  designators: Record<string, string>;
+}
+
+export interface DocumentLink {
+  id: string;
+  from: { stage: string; port: string };
+  to: { stage: string; port: string };
+}
+
+/** A voice as it is saved: what working copies and revisions hold. */
+export interface VoiceDocument {
+  stages: readonly DocumentStage[];
+  links: readonly DocumentLink[];
+  conditions: Record<string, number | string>;
+}
+
+/** The network of a saved stage; undefined where this version of the library has none of that name. */
+export function topologyOf(
+  kinds: readonly StageKind[],
+  stage: { kind: string; topology: string },
+): AnyTopology | undefined {
+  return kinds.find(({ id }) => id === stage.kind)?.topologies.find(({ id }) => id === stage.topology);
+}
