@@ -2,6 +2,7 @@ import { actorOf } from "#lib/server/auth/actorOf.ts";
 import { settings } from "#lib/server/env.ts";
 import { secureHeaders } from "#lib/server/headers.ts";
 import { problemResponse } from "#lib/server/problem.ts";
+import { siteOf } from "#lib/server/site.ts";
 import { defineMiddleware } from "astro:middleware";
 
 // Nothing under these addresses depends on who asks, so nobody is looked up for them.
@@ -11,10 +12,12 @@ const isImpersonal = (path: string) => impersonal.some((prefix) => path.startsWi
 
 export const onRequest = defineMiddleware(async (context, next) => {
   context.locals.actor = null;
+  context.locals.site = "";
   // Prerendered pages are made at build time, where there is neither a visitor nor a setting.
   if (context.isPrerendered) return next();
 
   const { pathname } = context.url;
+  context.locals.site = siteOf(context.url);
   const cookies: string[] = [];
   let response: Response;
   try {

@@ -8,6 +8,7 @@ const promised: Record<Action, string> = {
   "voice.create": "yes yes no no no",
   "voice.rename": "yes yes no no no",
   "voice.remove": "yes yes no no no",
+  "voice.removeReleased": "yes no no no no",
   "workingCopy.read": "yes yes yes yes no",
   "workingCopy.edit": "yes yes no no no",
   "revision.readReleased": "yes yes yes yes yes",

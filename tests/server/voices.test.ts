@@ -44,7 +44,7 @@ describe("beginning a voice", () => {
   });
 
   test("is refused without a session", async () => {
-    const ctx = { db, actor: null, now: () => new Date() };
+    const ctx = { db, actor: null, now: () => new Date(), site: "http://clatterbench.test" };
     await expect(createVoice({ ctx, input: empty("No") })).rejects.toMatchObject({ code: "no-session" });
   });
 });

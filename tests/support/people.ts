@@ -26,7 +26,7 @@ export async function makeTeam(db: Database, now: () => Date = () => new Date())
         await db.insert(members).values({ id: newId("mem"), organizationId: id, userId, role });
         known.set(role, actor);
       }
-      return { db, actor, now };
+      return { db, actor, now, site: "http://clatterbench.test" };
     },
   };
 }

@@ -1,5 +1,5 @@
 import { expect, test } from "vitest";
-import { csvText } from "#lib/client/csv.ts";
+import { csvText } from "#lib/wire/csvText.ts";
 
 test("csvText quotes what needs it and ends lines as RFC 4180 does", () => {
   expect(

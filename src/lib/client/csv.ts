@@ -1,17 +1,4 @@
-type Cell = string | number;
-
-// A cell that opens with one of these would be taken for a formula by a spreadsheet.
-const formulaStart = /^[=+\-@\t\r]/;
-
-function printed(cell: Cell): string {
-  if (typeof cell === "number") return String(cell);
-  const text = formulaStart.test(cell) ? `'${cell}` : cell;
-  return /[",\n\r]/.test(text) ? `"${text.replaceAll('"', '""')}"` : text;
-}
-
-export function csvText(rows: readonly (readonly Cell[])[]): string {
-  return rows.map((row) => row.map(printed).join(",") + "\r\n").join("");
-}
+import { csvText, type Cell } from "#lib/wire/csvText.ts";
 
 /** Hands the reader a CSV file of the rows; the first row names the columns. */
 export function takeAwayCsv(fileName: string, rows: readonly (readonly Cell[])[]): void {

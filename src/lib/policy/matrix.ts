@@ -20,6 +20,7 @@ export const matrix = {
   "voice.create": { roles: drawing },
   "voice.rename": { roles: drawing },
   "voice.remove": { roles: drawing },
+  "voice.removeReleased": { roles: ["owner"] },
 
   "workingCopy.read": { roles: workshop },
   "workingCopy.edit": { roles: drawing },

@@ -8,10 +8,12 @@ export interface Context {
   db: Database;
   actor: Actor | null;
   now: () => Date;
+  /** The origin that links in mails begin with. */
+  site: string;
 }
 
 export function contextOf(locals: App.Locals): Context {
-  return { db: database(), actor: locals.actor, now: () => new Date() };
+  return { db: database(), actor: locals.actor, now: () => new Date(), site: locals.site };
 }
 
 export type Member = Actor & { team: Team };

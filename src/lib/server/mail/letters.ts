@@ -28,7 +28,7 @@ interface Content {
   closing: string;
 }
 
-function letter({ subject, greeting, paragraphs, action, closing }: Content): Letter {
+export function letter({ subject, greeting, paragraphs, action, closing }: Content): Letter {
   const text = [greeting, ...paragraphs, `${action.label}:\n${action.url}`, closing, "Clatterbench"].join("\n\n");
   const paragraph = (words: string) => `<p style="margin:0 0 14px">${escape(words)}</p>`;
   const html = `<!doctype html>

@@ -2,9 +2,16 @@ import { accountRoutes } from "./account.ts";
 import { calculatorRoutes } from "./calculators.ts";
 import type { Route } from "./route.ts";
 import { serviceRoutes } from "./service.ts";
+import { revisionRoutes } from "./revisions.ts";
 import { voiceRoutes } from "./voices.ts";
 
 /** The whole HTTP interface, in the order in which its description shows it. */
-export const routes: readonly Route[] = [...calculatorRoutes, ...voiceRoutes, ...accountRoutes, ...serviceRoutes];
+export const routes: readonly Route[] = [
+  ...calculatorRoutes,
+  ...voiceRoutes,
+  ...revisionRoutes,
+  ...accountRoutes,
+  ...serviceRoutes,
+];
 
 export type { Method, Route, RouteAnswer } from "./route.ts";

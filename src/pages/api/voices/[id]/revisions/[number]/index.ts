@@ -1,0 +1,12 @@
+import { answer, json, methodNotAllowed } from "#lib/server/answer.ts";
+import { contextOf } from "#lib/server/context.ts";
+import { numberInPath } from "#lib/server/numberInPath.ts";
+import { idInPath } from "#lib/server/request.ts";
+import { readRevision } from "#lib/server/revisions/read.ts";
+
+export const GET = answer(async ({ locals, params }) => {
+  const input = { id: idInPath(params), number: numberInPath(params) };
+  return json(await readRevision({ ctx: contextOf(locals), input }));
+});
+
+export const ALL = methodNotAllowed("GET");
