@@ -8,6 +8,8 @@ export interface Port {
   label: string;
   sort: PortSort;
   direction: "in" | "out";
+  /** May stay without a link: a jack of the panel, or an input that stands at a voltage of its own. */
+  mayStayOpen?: true;
 }
 
 /** A figure printed elsewhere, or computed by a script of `tests/reference`, that the stage must reproduce. */
@@ -52,6 +54,8 @@ export function defineStageKind(kind: StageKind): StageKind {
   for (const topology of kind.topologies) {
     for (const result of kind.telling)
       if (!(result in topology.results)) throw new Error(`${kind.id}/${topology.id}: no result ${result}`);
+    for (const port of Object.keys(topology.joints ?? {}))
+      if (!kind.ports.some(({ id }) => id === port)) throw new Error(`${kind.id}/${topology.id}: no port ${port}`);
   }
   return kind;
 }

@@ -1,5 +1,8 @@
 import type { Citation, Formula } from "./citation.ts";
 import type { Curve } from "./curve.ts";
+import type { PlainConditions } from "./defaults.ts";
+import type { Joints, JointState } from "./joint.ts";
+import type { Signal } from "./signal.ts";
 import type { Network } from "./network.ts";
 import type {
   Conditions,
@@ -90,6 +93,10 @@ export interface Topology<
   network: Network;
   /** Devices on the board besides the parts with values. */
   devices: readonly Device[];
+  /** How the kind's ports meet other stages; where given, a port that is not among them is none of this topology. */
+  joints?: Joints;
+  /** Conditions that several inputs decide together: how far the paths of a sum carry the same wave. */
+  meets?(inputs: Readonly<Record<string, Signal | undefined>>, state: JointState): PlainConditions;
   /** One row each in the comparison of a kind's topologies: op amps needed, range, what retunes it. */
   traits: readonly { label: string; text: string }[];
   /** What the figures leave out, said beside the results. */

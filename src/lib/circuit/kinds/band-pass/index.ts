@@ -13,6 +13,7 @@ export const bandPass = defineStageKind({
   place: "audio",
   ports: [
     { id: "in", label: "audio in", sort: "audio", direction: "in" },
+    { id: "strike", label: "strike", sort: "trigger", direction: "in", mayStayOpen: true },
     { id: "out", label: "audio out", sort: "audio", direction: "out" },
   ],
   topologies: [multipleFeedback, sallenKey, twoIntegrator, bridgedT, passive],

@@ -161,6 +161,16 @@ export const conditions = {
     suggestion: 1e6,
     help: "What the capacitor feeds; left out, a buffer hides the load.",
   },
+  output: choice({
+    label: "Taken from",
+    symbol: "",
+    default: "buffer",
+    options: [
+      { value: "buffer", label: "the buffer" },
+      { value: "capacitor", label: "the capacitor itself" },
+    ],
+    help: "In a voice, what it feeds discharges the capacitor only where no buffer stands between.",
+  }),
   leakageResistance: condition({
     label: "Leakage of capacitor and board",
     symbol: "R_leak",

@@ -4,6 +4,7 @@ import { analyse, design } from "./analyse.ts";
 import { curves } from "./curves.ts";
 import { conditions, parts, paths, results, targets } from "./fields.ts";
 import { formulas } from "./formulas.ts";
+import { joints, meets } from "./joints.ts";
 import { limits } from "./limits.ts";
 import { network } from "./network.ts";
 import { reference } from "./reference.ts";
@@ -25,6 +26,8 @@ const inverting = defineTopology({
   formulas,
   sources,
   network,
+  joints,
+  meets,
   devices: [{ key: "u1", letter: "U", label: "op amp", deviceClass: "JFET-input op amp, one of two in a package" }],
   traits: [
     { label: "Op amps", text: "1" },

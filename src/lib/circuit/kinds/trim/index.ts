@@ -9,8 +9,10 @@ export const trim = defineStageKind({
   summary: "Makes the useful part of a control fill its rotation, and still cover it on the worst unit.",
   place: "trigger and control",
   ports: [
-    { id: "in", label: "in", sort: "control", direction: "in" },
-    { id: "out", label: "out", sort: "control", direction: "out" },
+    { id: "in", label: "in", sort: "control", direction: "in", mayStayOpen: true },
+    { id: "out", label: "out", sort: "control", direction: "out", mayStayOpen: true },
+    { id: "soundIn", label: "sound in", sort: "audio", direction: "in", mayStayOpen: true },
+    { id: "soundOut", label: "sound out", sort: "audio", direction: "out", mayStayOpen: true },
   ],
   topologies: [rheostat, divider],
   telling: ["usefulDegrees", "centre"],

@@ -8,6 +8,7 @@ import { mirrorCurves } from "../curves.ts";
 import { results, sharedBaseConditions as conditions, targets } from "../fields.ts";
 import { mirrorFigures, worldOf, type C, type MirrorShape, type R } from "../figures.ts";
 import { degeneratedFormulas } from "../formulas.ts";
+import { joints } from "../joints.ts";
 import { pairLimits } from "../limits.ts";
 import { solvePair, type MirrorWorld } from "../model.ts";
 import { sources } from "../sources.ts";
@@ -88,6 +89,7 @@ export const degenerated = defineTopology({
   formulas: degeneratedFormulas,
   sources,
   network: pairNetwork(true),
+  joints,
   devices: [
     { key: "q1", letter: "Q", label: "reference transistor", deviceClass: "general-purpose PNP" },
     { key: "q2", letter: "Q", label: "output transistor", deviceClass: "general-purpose PNP" },

@@ -4,6 +4,7 @@ import { mirrorCurves } from "../curves.ts";
 import { results, sharedBaseConditions, targets } from "../fields.ts";
 import { mirrorFigures, worldOf, type MirrorShape } from "../figures.ts";
 import { simpleFormulas } from "../formulas.ts";
+import { joints } from "../joints.ts";
 import { pairLimits } from "../limits.ts";
 import { solvePair } from "../model.ts";
 import { refuseFixedRatio } from "../design.ts";
@@ -37,6 +38,7 @@ export const simple = defineTopology({
   formulas: simpleFormulas,
   sources,
   network: pairNetwork(false),
+  joints,
   devices: [
     {
       key: "q1",

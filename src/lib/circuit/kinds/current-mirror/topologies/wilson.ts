@@ -6,6 +6,7 @@ import { refuseFixedRatio } from "../design.ts";
 import { conditions, results, targets } from "../fields.ts";
 import { mirrorFigures, worldOf, type MirrorShape } from "../figures.ts";
 import { wilsonFormulas } from "../formulas.ts";
+import { joints } from "../joints.ts";
 import { commonLimits } from "../limits.ts";
 import { solveWilson } from "../model.ts";
 import { sources } from "../sources.ts";
@@ -121,6 +122,7 @@ export const wilson = defineTopology({
   formulas: wilsonFormulas,
   sources,
   network,
+  joints,
   devices: [
     { key: "q1", letter: "Q", label: "reference transistor", deviceClass: `${pnp}, half of a matched pair` },
     { key: "q2", letter: "Q", label: "copying transistor", deviceClass: `${pnp}, half of a matched pair` },

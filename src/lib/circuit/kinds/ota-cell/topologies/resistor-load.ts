@@ -6,6 +6,7 @@ import { otaCurves } from "../curves.ts";
 import { conditions, inputParts, targets } from "../fields.ts";
 import { inputOf, otaFigures, type OtaStage } from "../figures.ts";
 import { resistorLoadFormulas } from "../formulas.ts";
+import { cellJoints } from "../joints.ts";
 import { resistorLoadLimits } from "../limits.ts";
 import { attenuation, pairInput, swingOf } from "../model.ts";
 import { resistorLoadNetwork } from "../networks.ts";
@@ -84,6 +85,8 @@ export const resistorLoad = defineTopology({
   formulas: resistorLoadFormulas,
   sources,
   network: resistorLoadNetwork,
+  // The buffer behind the load.
+  joints: cellJoints(() => 0),
   devices: [
     {
       key: "u1",

@@ -5,6 +5,7 @@ import { outputResistorFor } from "../design.ts";
 import { conditions, results, sharedParts, targets } from "../fields.ts";
 import { figuresOf, type Amplifier, type C } from "../figures.ts";
 import { formulasFor } from "../formulas.ts";
+import { driverJoints } from "../joints.ts";
 import { limits } from "../limits.ts";
 import { cascade, invertingTransfer, jackTransfer } from "../model.ts";
 import { invertingNetwork } from "../networks.ts";
@@ -58,6 +59,7 @@ export const inverting = defineTopology({
   formulas: formulasFor(true),
   sources,
   network: invertingNetwork,
+  joints: driverJoints(({ parts: values }) => values.ri),
   devices: [{ key: "u1", letter: "U", label: "op amp", deviceClass: "JFET-input op amp, one of two in a package" }],
   traits: [
     { label: "Gain", text: "R_F/R_i, below one too" },

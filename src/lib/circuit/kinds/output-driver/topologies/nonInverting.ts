@@ -6,6 +6,7 @@ import { outputResistorFor } from "../design.ts";
 import { conditions, results, sharedParts, targets } from "../fields.ts";
 import { figuresOf, type Amplifier, type C, type R } from "../figures.ts";
 import { formulasFor } from "../formulas.ts";
+import { driverJoints } from "../joints.ts";
 import { limits } from "../limits.ts";
 import { cascade, jackTransfer, nonInvertingTransfer } from "../model.ts";
 import { nonInvertingNetwork } from "../networks.ts";
@@ -103,6 +104,7 @@ export const nonInverting = defineTopology({
   formulas: formulasFor(false),
   sources,
   network: nonInvertingNetwork,
+  joints: driverJoints(({ parts: values }) => (values.rb! > 0 ? values.rb : undefined)),
   devices: [{ key: "u1", letter: "U", label: "op amp", deviceClass: "JFET-input op amp, one of two in a package" }],
   traits: [
     { label: "Gain", text: "1 + R_F/R_i" },

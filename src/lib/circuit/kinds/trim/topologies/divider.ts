@@ -8,6 +8,7 @@ import { travelCurve } from "../curves.ts";
 import { conditions as knobConditions, trimResults } from "../fields.ts";
 import { trimFigures, windowOf } from "../figures.ts";
 import { dividerFormulas } from "../formulas.ts";
+import { dividerJoints } from "../joints.ts";
 import { limits as knobLimits } from "../limits.ts";
 import { dividerSetting, wiperResistance, type Window } from "../model.ts";
 import { dividerNetwork } from "../networks.ts";
@@ -155,6 +156,7 @@ export const divider = defineTopology({
   formulas: dividerFormulas,
   sources,
   network: dividerNetwork,
+  joints: dividerJoints,
   devices: [],
   traits: [
     { label: "Sets", text: "a voltage or a level" },

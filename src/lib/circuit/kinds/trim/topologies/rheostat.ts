@@ -124,6 +124,8 @@ export const rheostat = defineTopology({
   formulas: rheostatFormulas,
   sources,
   network: rheostatNetwork,
+  // A resistance that stands in for one of another stage: nothing passes through it.
+  joints: {},
   devices: [],
   traits: [
     { label: "Sets", text: "a resistance: current, time or frequency" },

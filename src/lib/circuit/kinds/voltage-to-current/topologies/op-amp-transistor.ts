@@ -5,6 +5,7 @@ import type { ConditionValues, PartValues, ResultValues } from "../../../stage/v
 import { currentCurve } from "../curves.ts";
 import { driverConditions as conditions, driverResults as results, targets } from "../fields.ts";
 import { driverFormulas } from "../formulas.ts";
+import { converterJoints } from "../joints.ts";
 import { driverLimits } from "../limits.ts";
 import {
   collectorEmitterVoltage,
@@ -105,6 +106,8 @@ export const opAmpTransistor = defineTopology({
   formulas: driverFormulas,
   sources,
   network: driverNetwork,
+  // The op amp takes no current to speak of.
+  joints: converterJoints(() => ({})),
   devices: [
     { key: "u1", letter: "U", label: "op amp", deviceClass: "JFET-input op amp, one of two in a package" },
     { key: "q1", letter: "Q", label: "pass transistor", deviceClass: "general-purpose NPN" },

@@ -5,6 +5,7 @@ import type { ConditionValues, PartValues, ResultValues } from "../../../stage/v
 import { currentCurve } from "../curves.ts";
 import { conditions, resistorResults as results, targets } from "../fields.ts";
 import { resistorFormulas } from "../formulas.ts";
+import { converterJoints } from "../joints.ts";
 import { resistorLimits } from "../limits.ts";
 import { pinCurrent, pinErrors } from "../model.ts";
 import { resistorNetwork } from "../networks.ts";
@@ -84,6 +85,7 @@ export const resistor = defineTopology({
   formulas: resistorFormulas,
   sources,
   network: resistorNetwork,
+  joints: converterJoints(({ parts: values }) => ({ resistance: values.r! })),
   devices: [],
   traits: [
     { label: "Devices", text: "none" },

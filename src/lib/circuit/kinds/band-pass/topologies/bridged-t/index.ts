@@ -2,6 +2,7 @@ import type { Curve } from "../../../../stage/curve.ts";
 import { modesOf } from "../../../../network/pulse.ts";
 import { defineTopology } from "../../../../stage/topology.ts";
 import { potEnds, responseCurves, retuneCurve } from "../../curves.ts";
+import { filterJoints } from "../../joints.ts";
 import { sourcesOf } from "../../sources.ts";
 import { analyse, centreAt, design, strikeOf, transferAt, type BridgedTState } from "./analyse.ts";
 import { conditions, parts, results, targets } from "./fields.ts";
@@ -63,6 +64,7 @@ export const bridgedT = defineTopology({
   formulas,
   sources: sourcesOf(formulas, limits),
   network,
+  joints: filterJoints({ input: ({ rin }) => rin!, struck: true }),
   devices: [{ key: "u1", letter: "U", label: "op amp", deviceClass: "JFET-input op amp, one of two in a package" }],
   traits: [
     { label: "Op amps", text: "1" },

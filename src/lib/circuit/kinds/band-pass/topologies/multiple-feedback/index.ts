@@ -1,5 +1,6 @@
 import { defineTopology } from "../../../../stage/topology.ts";
 import { potEnds, responseCurves, retuneCurve } from "../../curves.ts";
+import { filterJoints } from "../../joints.ts";
 import { sourcesOf } from "../../sources.ts";
 import { analyse, centreAt, design, networkAt, transferAt, type MultipleFeedbackState } from "./analyse.ts";
 import { conditions, parts, results, targets } from "./fields.ts";
@@ -38,6 +39,7 @@ export const multipleFeedback = defineTopology({
   formulas,
   sources: sourcesOf(formulas, limits),
   network,
+  joints: filterJoints({ input: ({ ra }) => ra! }),
   devices: [{ key: "u1", letter: "U", label: "op amp", deviceClass: "JFET-input op amp, one of two in a package" }],
   traits: [
     { label: "Op amps", text: "1" },

@@ -1,6 +1,7 @@
 import { readCentre } from "../../../../network/resonance.ts";
 import { defineTopology } from "../../../../stage/topology.ts";
 import { responseCurves } from "../../curves.ts";
+import { filterJoints } from "../../joints.ts";
 import { sourcesOf } from "../../sources.ts";
 import { analyse, design, type PassiveState } from "./analyse.ts";
 import { conditions, parts, results, targets } from "./fields.ts";
@@ -40,6 +41,7 @@ export const passive = defineTopology({
   formulas,
   sources: sourcesOf(formulas, limits),
   network,
+  joints: filterJoints({ input: ({ r1 }) => r1!, output: ({ r2 }) => r2!, passive: true }),
   devices: [],
   traits: [
     { label: "Op amps", text: "0" },

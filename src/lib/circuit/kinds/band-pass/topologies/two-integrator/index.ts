@@ -2,6 +2,7 @@ import type { Curve } from "../../../../stage/curve.ts";
 import { magnitudeDbAt } from "../../../../network/transfer.ts";
 import { defineTopology } from "../../../../stage/topology.ts";
 import { potEnds, responseCurves, retuneCurve, roundDecades } from "../../curves.ts";
+import { filterJoints } from "../../joints.ts";
 import { sourcesOf } from "../../sources.ts";
 import { analyse, centreAt, design, networkAt, outputsAt, type TwoIntegratorState } from "./analyse.ts";
 import { conditions, parts, results, targets } from "./fields.ts";
@@ -61,6 +62,7 @@ export const twoIntegrator = defineTopology({
   formulas,
   sources: sourcesOf(formulas, limits),
   network,
+  joints: filterJoints({ input: ({ ri }) => ri! }),
   devices: [
     { key: "u1", letter: "U", label: "summer", deviceClass: "JFET-input op amp, one of four in a package" },
     { key: "u2", letter: "U", label: "first integrator", deviceClass: "JFET-input op amp, one of four in a package" },

@@ -1,4 +1,5 @@
 import { defineTopology } from "../../../../stage/topology.ts";
+import { triggerJoints } from "../../joints.ts";
 import { sources } from "../../sources.ts";
 import { analyse, design } from "./analyse.ts";
 import { curves } from "./curves.ts";
@@ -23,6 +24,7 @@ export const comparator = defineTopology({
   formulas,
   sources,
   network,
+  joints: triggerJoints(({ conditions: around }) => around.outputHigh as number),
   devices: [{ key: "u1", letter: "U", label: "comparator", deviceClass: "JFET-input op amp, one of two in a package" }],
   traits: [
     { label: "Op amps", text: "1" },

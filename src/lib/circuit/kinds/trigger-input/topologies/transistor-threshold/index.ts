@@ -1,4 +1,5 @@
 import { defineTopology } from "../../../../stage/topology.ts";
+import { triggerJoints } from "../../joints.ts";
 import { sources } from "../../sources.ts";
 import { analyse, design } from "./analyse.ts";
 import { curves } from "./curves.ts";
@@ -23,6 +24,8 @@ export const transistorThreshold = defineTopology({
   formulas,
   sources,
   network,
+  // The collector rests at the rail that it is switched from.
+  joints: triggerJoints(({ conditions: around }) => around.railPositive as number),
   devices: [
     { key: "q1", letter: "Q", label: "threshold", deviceClass: "general-purpose NPN" },
     { key: "d1", letter: "D", label: "base clamp", deviceClass: "small-signal diode" },

@@ -1,0 +1,55 @@
+import type { Joints, JointState } from "../../stage/joint.ts";
+import { ownMix, type AudioSignal, type TriggerSignal } from "../../stage/signal.ts";
+
+/** Volts that a usual op-amp output stays away from its rail. From memory. */
+const headroomToRail = 1.5;
+
+interface Shape {
+  /** Ω that the source sees, near the centre. */
+  input: (parts: JointState["parts"]) => number;
+  /** Ω of the output; 0 for an op amp. */
+  output?: (parts: JointState["parts"]) => number;
+  /** No op amp that could clip. */
+  passive?: true;
+  /** Rings when a pulse strikes it. */
+  struck?: true;
+}
+
+const strike = {
+  takes: ({ height, width }: TriggerSignal) => ({ strikeVoltage: height, strikeWidth: width }),
+};
+
+/** Sound in, its band out: a wave of its own, for what the filter leaves has little in common with what it is fed. */
+export const filterJoints = ({ input, output, passive, struck }: Shape): Joints => ({
+  in: {
+    takes: ({ rms, signal, resistance, bandwidth }: AudioSignal) => ({
+      sourceResistance: resistance,
+      sourceRms: signal === "noise" && rms > 0 ? rms : null,
+      sourceBandwidth: bandwidth,
+    }),
+    asks: ({ parts }) => ({ resistance: input(parts) }),
+  },
+  ...(struck && { strike }),
+  out: {
+    gives({ parts, conditions, results, inputs }): AudioSignal | undefined {
+      const source = inputs.in as AudioSignal | undefined;
+      const { outputRms, ringPeak } = results;
+      const rings = inputs.strike !== undefined && typeof ringPeak === "number";
+      const rms = rings ? ringPeak / Math.SQRT2 : outputRms;
+      if (typeof rms !== "number" || (!source && !rings)) return undefined;
+      return {
+        sort: "audio",
+        rms,
+        signal: rings ? "sine" : "noise",
+        resistance: output?.(parts) ?? 0,
+        floor: source && !rings ? source.floor * (rms / source.rms) : 0,
+        ...(!passive && { clip: swing(conditions) }),
+        mix: ownMix(rms),
+      };
+    },
+    bears: ({ resistance }) => ({ loadResistance: resistance ?? null }),
+  },
+});
+
+const swing = ({ railPositive, railNegative }: JointState["conditions"]): number =>
+  Math.max(0, Math.min(railPositive as number, -(railNegative as number)) - headroomToRail);

@@ -1,0 +1,5 @@
+/** The voice as a whole. Everything here is given the kinds; the registry is never reached for. */
+export * from "./chain.ts";
+export { linkFaults, signalOrder, sortWords, type LinkFault } from "./graph.ts";
+export { computeChain, type ComputedChain, type ComputedStage } from "./compute.ts";
+export { sharedConditions, voiceConditions } from "./conditions.ts";
