@@ -19,6 +19,7 @@ describe("a working copy document", () => {
     expect(
       pathsOf({ ...emptyDocument, stages, links: [link("l", "a", "b")], conditions: { temperature: 300 } }),
     ).toEqual([]);
+    expect(pathsOf({ ...emptyDocument, stages: [{ ...stages[0], apart: true }] })).toEqual([]);
   });
 
   test("may be sent back as it was answered", () => {
@@ -41,9 +42,41 @@ describe("a working copy document", () => {
     ["a link to no stage", { stages: [bandPassStage("a")], links: [link("l", "a", "z")] }, ["links.0.to.stage"]],
     [
       "two links of one id",
-      { stages: [bandPassStage("a")], links: [link("l", "a", "a"), link("l", "a", "a")] },
+      {
+        stages: [bandPassStage("a"), bandPassStage("b"), bandPassStage("c")],
+        links: [link("l", "a", "b"), link("l", "b", "c")],
+      },
       ["links.1.id"],
     ],
+    ["a stage that feeds itself", { stages: [bandPassStage("a")], links: [link("l", "a", "a")] }, ["links.0"]],
+    [
+      "a circle",
+      { stages: [bandPassStage("a"), bandPassStage("b")], links: [link("l", "a", "b"), link("m", "b", "a")] },
+      ["links.1"],
+    ],
+    [
+      "an input fed twice",
+      {
+        stages: [bandPassStage("a"), bandPassStage("b"), bandPassStage("c")],
+        links: [link("l", "a", "c"), link("m", "b", "c")],
+      },
+      ["links.1.to.port"],
+    ],
+    [
+      "a link to no port",
+      {
+        stages: [bandPassStage("a"), bandPassStage("b")],
+        links: [{ ...link("l", "a", "b"), from: { stage: "a", port: "tail" } }],
+      },
+      ["links.0.from.port"],
+    ],
+    ["a stage of no known kind", { stages: [{ ...bandPassStage("a"), kind: "z" }] }, ["stages.0.kind"]],
+    [
+      "a designator of 300 characters",
+      { stages: [bandPassStage("a", { ra: `R${"1".repeat(299)}` })] },
+      ["stages.0.designators.ra"],
+    ],
+    ["10,000 stages", { stages: Array.from({ length: 10_000 }, () => ({})) }, ["stages"]],
     ["another format", { format: 2 }, ["format"]],
     ["an extra field", { notes: "x" }, [""]],
     ["no stages", { stages: undefined }, ["stages"]],

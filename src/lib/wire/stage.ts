@@ -27,6 +27,10 @@ const looseStage = z.strictObject({
     .record(z.string(), z.string().max(12))
     .default({})
     .meta({ description: "Reference designators by role: R14, C8, RV3" }),
+  apart: z
+    .boolean()
+    .optional()
+    .meta({ description: "Keeps its own conditions whatever it is linked to, to see its ideal self" }),
 });
 
 export interface Stage {
@@ -39,6 +43,7 @@ export interface Stage {
   targets: Record<string, number>;
   windows?: Record<string, number> | undefined;
   designators: Record<string, string>;
+  apart?: boolean | undefined;
 }
 
 type Loose = z.output<typeof looseStage>;

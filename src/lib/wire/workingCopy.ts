@@ -1,8 +1,13 @@
+import { stageKinds } from "#lib/circuit/kinds/index.ts";
+import { findIn, linkFaults } from "#lib/circuit/voice/index.ts";
 import { z } from "zod";
-import { stageSchema } from "./stage.ts";
+import { stageSchema, type Stage } from "./stage.ts";
 
 export const mostStages = 500;
 const mostLinks = 2000;
+
+/** Counted before any is read, so that a thousand bad ones cost no more than the first. */
+const stageList = z.array(z.unknown()).max(mostStages, `At most ${mostStages} stages.`).pipe(z.array(stageSchema));
 
 const word = z.string().min(1).max(60);
 
@@ -18,9 +23,11 @@ const conditionsSchema = z
   .meta({ description: "What holds for the whole voice, such as rails and temperature, in SI units" });
 
 interface Chain {
-  stages: readonly { id: string; designators?: Record<string, string> | undefined }[];
+  stages: readonly Pick<Stage, "id" | "name" | "kind" | "topology" | "designators">[];
   links: readonly Link[];
 }
+
+const find = findIn(stageKinds);
 
 type Report = (path: (string | number)[], message: string) => void;
 
@@ -47,15 +54,9 @@ function reportSharedDesignators({ stages }: Chain, report: Report) {
   });
 }
 
-function reportLooseLinks({ stages, links }: Chain, report: Report) {
-  const known = new Set(stages.map(({ id }) => id));
-  links.forEach((link, index) => {
-    for (const end of ["from", "to"] as const) {
-      if (!known.has(link[end].stage)) {
-        report(["links", index, end, "stage"], `There is no stage ${link[end].stage} in this voice.`);
-      }
-    }
-  });
+/** A link that could not be soldered: to nothing, between sorts, into a taken input, round in a circle. */
+function reportBadLinks({ stages, links }: Chain, report: Report) {
+  for (const { index, at, message } of linkFaults(stages, links, find)) report(["links", index, ...at], message);
 }
 
 const format = z.literal(1).meta({ description: "Version of this document's shape" });
@@ -64,7 +65,7 @@ const format = z.literal(1).meta({ description: "Version of this document's shap
 export const workingCopyDocument = z
   .strictObject({
     format: format.default(1),
-    stages: z.array(stageSchema).max(mostStages),
+    stages: stageList,
     links: z.array(linkSchema).max(mostLinks),
     conditions: conditionsSchema,
     // An answer may be sent back as it came: what the server keeps count of is taken and left aside.
@@ -87,7 +88,7 @@ export const workingCopyDocument = z
       report,
     );
     reportSharedDesignators(document, report);
-    reportLooseLinks(document, report);
+    reportBadLinks(document, report);
   });
 
 export const workingCopyAnswer = z.object({

@@ -16,6 +16,7 @@ export const voiceTemplates = [
         parts: { ra: 13.3e3, rb: 1650, rf: 53.6e3, c1: 10e-9, c2: 10e-9 },
       },
     ],
+    links: [],
   },
   {
     id: "struck-tone",
@@ -31,8 +32,9 @@ export const voiceTemplates = [
         parts: { ra: 71.5e3, rb: 562, rf: 143e3, c1: 100e-9, c2: 100e-9 },
       },
     ],
+    links: [],
   },
-  { id: "empty", name: "Empty", summary: "Nothing yet.", stages: [] },
+  { id: "empty", name: "Empty", summary: "Nothing yet.", stages: [], links: [] },
 ] as const satisfies readonly VoiceTemplate[];
 
 export type VoiceTemplateId = (typeof voiceTemplates)[number]["id"];

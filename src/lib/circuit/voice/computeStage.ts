@@ -1,5 +1,6 @@
 import { analyseStage } from "../stage/analyse.ts";
 import { completeConditions, isAccepted, type PlainConditions } from "../stage/defaults.ts";
+import { acceptedRange, type ConditionField } from "../stage/fields.ts";
 import type { AnalysedState, Decided, JointState } from "../stage/joint.ts";
 import { ownOrigin, type Demand, type Signal } from "../stage/signal.ts";
 import { alike } from "./alike.ts";
@@ -74,9 +75,11 @@ function decide(
   const decided: Record<string, { value: number | string | null; port: string }> = {};
   const state = { parts: stage.parts, conditions: own };
   const take = (port: string, values: Decided) => {
-    for (const [key, value] of Object.entries(values)) {
+    for (const [key, given] of Object.entries(values)) {
       const field = topology.conditions[key];
-      if (!field || value === undefined || !isAccepted(field, value)) continue;
+      if (!field || given === undefined) continue;
+      const value = withinReach(field, given);
+      if (!isAccepted(field, value)) continue;
       conditions[key] = value;
       decided[key] = { value, port };
     }
@@ -89,6 +92,13 @@ function decide(
   }
   if (topology.meets) take("", topology.meets(inputs, { parts: stage.parts, conditions }));
   return { conditions, decided };
+}
+
+/** A figure beyond what is computed stands at the bound, a thousand times past any sane value: a load of nearly nothing. */
+function withinReach(field: ConditionField, value: number | string | null): number | string | null {
+  if (field.type !== "number" || typeof value !== "number") return value;
+  const [least, most] = acceptedRange(field);
+  return Math.min(Math.max(value, least), most);
 }
 
 /** A signal with the stage's name on the wave it makes; one with a figure that is none passes nothing on. */

@@ -15,26 +15,29 @@ export function linkFaults(stages: readonly Named[], links: readonly ChainLink[]
   const feeds = new Map<string, Set<string>>();
   const fed = new Map<string, number>();
   const faults: LinkFault[] = [];
-  links.forEach((link, index) => {
+  links.forEach((link, index): void => {
     const report = (at: string[], message: string) => faults.push({ index, at, message });
     const before = faults.length;
     const from = portAt(link.from, "out", known, find, (at, message) => report(["from", at], message));
     const to = portAt(link.to, "in", known, find, (at, message) => report(["to", at], message));
     if (faults.length > before) return;
     if (from && to && from.sort !== to.sort) {
-      return report(["to", "port"], `A link joins ports of one sort: ${from.words}, but ${to.words}.`);
+      report(["to", "port"], `A link joins ports of one sort: ${from.words}, but ${to.words}.`);
+      return;
     }
     const input = JSON.stringify([link.to.stage, link.to.port]);
     const taken = fed.get(input);
     if (taken !== undefined) {
       const text = `This input is fed by link ${taken + 1} already. Take that away first, or add the two in a stage of their own.`;
-      return report(["to", "port"], text);
+      report(["to", "port"], text);
+      return;
     }
     fed.set(input, index);
     const way = pathBetween(link.to.stage, link.from.stage, feeds);
     if (way) {
       const names = [...way, link.to.stage].map((id) => known.get(id)!.name);
-      return report([], `This link closes a circle: ${names.join(" → ")}. Nothing may feed itself.`);
+      report([], `This link closes a circle: ${names.join(" → ")}. Nothing may feed itself.`);
+      return;
     }
     feeds.set(link.from.stage, (feeds.get(link.from.stage) ?? new Set()).add(link.to.stage));
   });

@@ -1,5 +1,7 @@
 import { defaultParts } from "../stage/defaults.ts";
+import type { PlainConditions } from "../stage/defaults.ts";
 import type { StageKind } from "../stage/kind.ts";
+import type { ChainLink } from "./chain.ts";
 import { nextDesignator } from "./designators.ts";
 
 export interface TemplateStage {
@@ -12,6 +14,8 @@ export interface TemplateStage {
   targets: Record<string, number>;
   /** Values that differ from the topology's own defaults. */
   parts: Record<string, number>;
+  /** Those that differ from an ideal world and that no link decides. */
+  conditions?: PlainConditions;
 }
 
 export interface VoiceTemplate {
@@ -19,10 +23,11 @@ export interface VoiceTemplate {
   name: string;
   summary: string;
   stages: readonly TemplateStage[];
+  links: readonly ChainLink[];
 }
 
 export interface BegunStage extends TemplateStage {
-  conditions: Record<string, number | string | null>;
+  conditions: PlainConditions;
   designators: Record<string, string>;
 }
 
@@ -37,6 +42,6 @@ export function beginStages(template: VoiceTemplate, kinds: readonly StageKind[]
     for (const [part, field] of Object.entries(topology.parts)) {
       if ((parts[part] ?? 0) > 0) designators[part] = nextDesignator(field.partClass, taken);
     }
-    return { ...stage, parts, conditions: {}, designators };
+    return { ...stage, parts, conditions: { ...stage.conditions }, designators };
   });
 }

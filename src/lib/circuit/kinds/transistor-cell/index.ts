@@ -4,6 +4,7 @@ import { analyse, design } from "./analyse.ts";
 import { curves } from "./curves.ts";
 import { conditions, parts, results, targets } from "./fields.ts";
 import { formulas } from "./formulas.ts";
+import { joints } from "./joints.ts";
 import { limits } from "./limits.ts";
 import { network } from "./network.ts";
 import { reference } from "./reference.ts";
@@ -25,6 +26,7 @@ const swing = defineTopology({
   formulas,
   sources,
   network,
+  joints,
   devices: [{ key: "q1", letter: "Q", label: "gain cell", deviceClass: "general-purpose NPN" }],
   traits: [
     { label: "Op amps", text: "none" },
