@@ -6,8 +6,14 @@ import { stageSchema, type Stage } from "./stage.ts";
 export const mostStages = 500;
 const mostLinks = 2000;
 
-/** Counted before any is read, so that a thousand bad ones cost no more than the first. */
-const stageList = z.array(z.unknown()).max(mostStages, `At most ${mostStages} stages.`).pipe(z.array(stageSchema));
+const { $schema: _, ...stageShape } = z.toJSONSchema(stageSchema, { io: "input", unrepresentable: "any" });
+
+/** Counted before any is read, so that ten thousand bad ones cost no more than the first; described as if they were read at once. */
+const stageList = z
+  .array(z.unknown())
+  .max(mostStages, `A voice holds at most ${mostStages} stages.`)
+  .meta({ items: stageShape })
+  .pipe(z.array(stageSchema));
 
 const word = z.string().min(1).max(60);
 
