@@ -4,8 +4,10 @@ import { join } from "node:path";
 import { build } from "esbuild";
 
 await build({
-  entryPoints: [join("src", "run", "serve.ts")],
-  outfile: join(process.env.OUT_DIR || "dist", "run", "serve.mjs"),
+  // The server, and what the threads of its pool run.
+  entryPoints: ["serve", "calculate"].map((name) => join("src", "run", `${name}.ts`)),
+  outdir: join(process.env.OUT_DIR || "dist", "run"),
+  outExtension: { ".js": ".mjs" },
   bundle: true,
   platform: "node",
   target: "node20",

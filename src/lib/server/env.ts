@@ -16,6 +16,9 @@ const common = {
   TRUST_PROXY: count(0, 10),
   RATE_LIMIT_CALCULATORS: count(60_000, 10_000_000),
   RATE_LIMIT_ACCOUNTS: count(120, 1_000_000),
+  CALCULATION_WORKERS: count(0, 64),
+  CALCULATION_QUEUE: count(16, 1000),
+  CALCULATION_SECONDS: count(20, 600).refine((value) => value > 0, "at least 1"),
   LOG_LEVEL: z.enum(["fatal", "error", "warn", "info", "debug", "trace", "silent"]).default("info"),
   OUT_DIR: z.string().default("dist"),
 };

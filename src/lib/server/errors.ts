@@ -15,6 +15,7 @@ export const errorCodes = {
   "precondition-required": { status: 428, title: "If-Match is missing" },
   "too-many-requests": { status: 429, title: "Too many requests" },
   internal: { status: 500, title: "Something went wrong here" },
+  busy: { status: 503, title: "Too much is being calculated" },
   unavailable: { status: 503, title: "The database cannot be reached" },
 } as const satisfies Record<string, { status: number; title: string }>;
 

@@ -16,7 +16,7 @@ const problemTexts: Record<number, string> = {
   422: "Some values cannot be used; `errors` names each place",
   428: "If-Match is missing",
   429: "Too many requests; Retry-After says when to go on",
-  503: "The database cannot be reached",
+  503: "The database cannot be reached, or too much is being calculated; Retry-After says when to go on",
 };
 
 function schemaOf(schema: z.ZodType, io: "input" | "output"): Json {

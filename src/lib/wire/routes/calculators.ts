@@ -1,6 +1,8 @@
+import type { AnyTopology } from "#lib/circuit/index.ts";
 import { stageKinds } from "#lib/circuit/kinds/index.ts";
 import { z } from "zod";
 import { analyseAnswer, curvesAnswer, kindsAnswer, solveAnswer, topologySchemas } from "../calculator.ts";
+import { spreadAnswer, spreadSchema } from "../spread.ts";
 import { kindAnswer } from "../kindDescription.ts";
 import type { Route } from "./route.ts";
 
@@ -13,9 +15,9 @@ const topology = {
 };
 
 /** What may be sent: one schema for each topology there is, under its own name. */
-function bodyOf(calculation: "analyse" | "solve" | "curves"): z.ZodType {
+function bodyOf(schemaOf: (network: AnyTopology) => z.ZodType): z.ZodType {
   const each = stageKinds.flatMap(({ id, topologies }) =>
-    topologies.map((network) => topologySchemas(network)[calculation].meta({ title: `${id} / ${network.id}` })),
+    topologies.map((network) => schemaOf(network).meta({ title: `${id} / ${network.id}` })),
   );
   return z.union(each);
 }
@@ -51,7 +53,7 @@ export const calculatorRoutes: readonly Route[] = [
     path: "/api/kinds/{kind}/{topology}/analyse",
     operationId: "analyseStage",
     summary: "Results and warnings of given parts",
-    body: bodyOf("analyse"),
+    body: bodyOf((network) => topologySchemas(network).analyse),
     answers: { 200: { description: "Results, warnings and the state of each target", body: analyseAnswer } },
   },
   {
@@ -59,7 +61,7 @@ export const calculatorRoutes: readonly Route[] = [
     path: "/api/kinds/{kind}/{topology}/solve",
     operationId: "solveStage",
     summary: "Parts that meet the targets",
-    body: bodyOf("solve"),
+    body: bodyOf((network) => topologySchemas(network).solve),
     answers: { 200: { description: "Exact parts, and choices of values that exist", body: solveAnswer } },
   },
   {
@@ -67,7 +69,18 @@ export const calculatorRoutes: readonly Route[] = [
     path: "/api/kinds/{kind}/{topology}/curves",
     operationId: "plotStage",
     summary: "Curves of given parts",
-    body: bodyOf("curves"),
+    body: bodyOf((network) => topologySchemas(network).curves),
     answers: { 200: { description: "Points of each curve", body: curvesAnswer } },
+  },
+  {
+    ...calculation,
+    path: "/api/kinds/{kind}/{topology}/spread",
+    operationId: "spreadStage",
+    summary: "Spread of the results over tolerances and temperature, and the yield",
+    body: bodyOf(spreadSchema),
+    answers: {
+      200: { description: "Corners, first order, random boards, and the band of a curve", body: spreadAnswer },
+    },
+    problems: [404, 429, 503],
   },
 ];
