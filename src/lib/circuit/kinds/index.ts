@@ -3,6 +3,7 @@ import { bandPass } from "./band-pass/index.ts";
 import { burstEnvelope } from "./burst-envelope/index.ts";
 import { currentMirror } from "./current-mirror/index.ts";
 import { decayEnvelope } from "./decay-envelope/index.ts";
+import { noiseSource } from "./noise-source/index.ts";
 import { otaCell } from "./ota-cell/index.ts";
 import { outputDriver } from "./output-driver/index.ts";
 import { summingNode } from "./summing-node/index.ts";
@@ -18,6 +19,7 @@ export const stageKinds: readonly StageKind[] = [
   burstEnvelope,
   voltageToCurrent,
   currentMirror,
+  noiseSource,
   trim,
   bandPass,
   otaCell,

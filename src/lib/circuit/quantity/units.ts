@@ -15,6 +15,7 @@ export const units = {
   K: { prefixed: false, spoken: "kelvins" },
   "V/s": { prefixed: true, spoken: "volts per second" },
   "V/√Hz": { prefixed: true, spoken: "volts per root hertz" },
+  "A/√Hz": { prefixed: true, spoken: "amperes per root hertz" },
   "V/K": { prefixed: true, spoken: "volts per kelvin" },
   "1/K": { prefixed: false, spoken: "per kelvin" },
   dB: { prefixed: false, spoken: "decibels" },

@@ -66,6 +66,15 @@ export const common = {
     accepts: [-1, 1],
     suggestion: 3e-3,
   }),
+  inputNoise: condition({
+    label: "Op amp voltage noise",
+    symbol: "e_n",
+    unit: "V/√Hz",
+    default: 0,
+    least: 0,
+    most: 100e-9,
+    suggestion: 18e-9,
+  }),
   sourceResistance: condition({
     label: "Source resistance",
     symbol: "R_s",

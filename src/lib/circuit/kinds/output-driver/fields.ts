@@ -131,15 +131,7 @@ export const conditions = {
   openLoopGain: common.openLoopGain,
   slewRate: common.slewRate,
   offsetVoltage: common.offsetVoltage,
-  inputNoise: condition({
-    label: "Op amp voltage noise",
-    symbol: "e_n",
-    unit: "V/√Hz",
-    default: 0,
-    least: 0,
-    most: 100e-9,
-    suggestion: 18e-9,
-  }),
+  inputNoise: common.inputNoise,
   audioBandwidth: condition({
     label: "Band of the noise floor",
     symbol: "f_c",
