@@ -1,6 +1,6 @@
 import { useMemo } from "react";
 import { CartesianGrid, Line, LineChart, ReferenceArea, ReferenceDot, ReferenceLine, XAxis, YAxis } from "recharts";
-import { colourOf, dashOf, pagePalette, strokeOf } from "./PlotDrawing.tsx";
+import { colourOf, dashOf, pagePalette, strokeOf } from "./palette.ts";
 import { margins, tickText, type PlotAxis, type PlotModel, type PlotRoom } from "./plotModel.ts";
 
 interface InteractivePlotProps {

@@ -1,36 +1,7 @@
 import { useId } from "react";
+import { PlotArea, PlotMarks } from "./PlotMarks.tsx";
 import { margins, placing, tickText, type PlotModel, type PlotRoom } from "./plotModel.ts";
-
-/** Colours as values of SVG attributes: variables on the page, plain colours in a file. */
-export interface PlotPalette {
-  curves: readonly string[];
-  ink: string;
-  faint: string;
-  rule: string;
-  sheet: string;
-  window: string;
-  windowEdge: string;
-}
-
-const orders = [1, 2, 3, 4, 5, 6];
-
-/** Okabe-Ito in a fixed order, light or dark as the page is. */
-export const pagePalette: PlotPalette = {
-  curves: orders.map((n) => `var(--c${n})`),
-  ink: "var(--ink-2)",
-  faint: "var(--ink-3)",
-  rule: "var(--rule)",
-  sheet: "var(--sheet)",
-  window: "var(--accent-soft)",
-  windowEdge: "var(--accent)",
-};
-
-/** Each line's own dash, so that a greyscale print still tells them apart. */
-const dashes = [undefined, "2 3", "7 4", "9 3 2 3", "12 4", "4 2 1 2 1 2"];
-
-export const colourOf = (palette: PlotPalette, index: number) => palette.curves[index % palette.curves.length]!;
-export const dashOf = (index: number) => dashes[index % dashes.length];
-export const strokeOf = (index: number) => (index === 0 ? 2 : 1.6);
+import { colourOf, dashOf, pagePalette, strokeOf, type PlotPalette } from "./palette.ts";
 
 interface PlotDrawingProps {
   model: PlotModel;
@@ -72,18 +43,9 @@ export function PlotDrawing({ model, room, palette = pagePalette, alone = false 
         <rect x={margins.left} y={margins.top} width={width} height={height} fill="none" />
       </g>
       <g clipPath={`url(#${clip})`} fill="none" strokeLinejoin="round">
+        <PlotArea model={model} room={room} palette={palette} />
         {model.lines
-          .map((line, i) => (
-            <path
-              key={line.id}
-              d={pathOf(model.xs, line.ys, x, y)}
-              // A tenth of a pixel may still fall the other way in the browser's arithmetic.
-              suppressHydrationWarning
-              stroke={colourOf(palette, i)}
-              strokeWidth={strokeOf(i)}
-              strokeDasharray={dashOf(i)}
-            />
-          ))
+          .map((line, i) => <PlotMarks key={line.id} model={model} room={room} palette={palette} index={i} />)
           .reverse()}
       </g>
       {model.mark && (
@@ -169,25 +131,4 @@ function FileHead({ model, palette, right }: { model: PlotModel; palette: PlotPa
       })}
     </g>
   );
-}
-
-function pathOf(
-  xs: readonly number[],
-  ys: readonly (number | null)[],
-  x: (value: number) => number,
-  y: (value: number) => number,
-): string {
-  let pen = "M";
-  return xs
-    .map((value, i) => {
-      const height = ys[i];
-      if (height === null || height === undefined) {
-        pen = "M";
-        return "";
-      }
-      const step = `${pen}${x(value)} ${y(height)}`;
-      pen = "L";
-      return step;
-    })
-    .join("");
 }

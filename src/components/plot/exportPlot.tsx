@@ -1,7 +1,8 @@
 import { flushSync } from "react-dom";
 import { createRoot } from "react-dom/client";
 import { takeAwayCsv } from "#lib/client/csv.ts";
-import { PlotDrawing, type PlotPalette } from "./PlotDrawing.tsx";
+import type { PlotPalette } from "./palette.ts";
+import { PlotDrawing } from "./PlotDrawing.tsx";
 import type { PlotModel } from "./plotModel.ts";
 
 const room = { width: 900, height: 480 };

@@ -25,6 +25,8 @@ export interface PlotLine {
   label: string;
   /** At each x of the plot; null where the curve has no value. */
   ys: (number | null)[];
+  /** Left out, a line. Bars stand on zero and fill the step between one x and the next. */
+  drawn?: "dots" | "bars";
 }
 
 /** A curve as it is drawn: figures in the units that people read (degrees of rotation, not shares). */
@@ -35,6 +37,8 @@ export interface PlotModel {
   y: PlotAxis;
   xs: number[];
   lines: PlotLine[];
+  /** Ids of two lines with the stretch between them filled. */
+  area?: readonly [string, string];
   window?: { x?: readonly [number, number]; y?: readonly [number, number] };
   mark?: { x: number; y: number; label: string };
 }
@@ -94,7 +98,7 @@ function withMark(xs: number[], mark: number | undefined): number[] {
 
 const finite = (value: number) => (Number.isFinite(value) ? value : null);
 const scaled = ([a, b]: readonly [number, number], factor: number): [number, number] => [a * factor, b * factor];
-const xRoom = ({ width }: PlotRoom) => Math.max(3, Math.floor(width / 62));
+export const xRoom = ({ width }: PlotRoom) => Math.max(3, Math.floor(width / 62));
 
 function markOf(curve: PlotCurve, state: never, factor: number, yFactor: number): Pick<PlotModel, "mark"> {
   const mark = curve.mark?.(state);
@@ -104,7 +108,7 @@ function markOf(curve: PlotCurve, state: never, factor: number, yFactor: number)
   return { mark: { x: mark.x * factor, y: y * yFactor, label: mark.label } };
 }
 
-function axisOf(axis: Axis, domain: [number, number], room: number, exact: boolean): PlotAxis {
+export function axisOf(axis: Axis, domain: [number, number], room: number, exact: boolean): PlotAxis {
   const unit = axis.shown?.unit ?? axis.unit;
   const title = unit === "" ? axis.quantity : `${axis.quantity}, ${unit}`;
   if (axis.scale === "logarithmic") {

@@ -1,11 +1,12 @@
 import { z } from "zod";
 import type { SpreadTask } from "#lib/circuit/analysis/calculations.ts";
 import { mostBoards, type Range } from "#lib/circuit/analysis/spread/index.ts";
-import { formatQuantity, type AnyTopology, type Unit } from "#lib/circuit/index.ts";
+import type { AnyTopology, Unit } from "#lib/circuit/index.ts";
 import { mostSeed } from "#lib/circuit/numeric/counterRandom.ts";
 import { partTypes, typesOf } from "#lib/circuit/parts/partTypes.ts";
 import { topologySchemas } from "./calculator.ts";
 import { figureSchema } from "./figure.ts";
+import { toleranceFault, windowFault } from "./spreadFaults.ts";
 
 const schemas = new WeakMap<AnyTopology, ReturnType<typeof build>>();
 
@@ -21,10 +22,10 @@ const mostBandPoints = 1024;
 const temperatures = { least: 200, most: 450 };
 const mostDrift = 0.01;
 
-const tolerance = z
-  .number()
-  .gt(0, "A tolerance must be more than zero. Leave the part out to take it as exact.")
-  .lt(1, "A tolerance must be below 1, which is 100 %.");
+const tolerance = z.number().superRefine((value, context) => {
+  const message = toleranceFault(value);
+  if (message !== undefined) context.addIssue({ code: "custom", message });
+});
 const drift = z.number().min(-mostDrift).max(mostDrift);
 const boards = z.int().min(1).max(mostBoards);
 const seed = z.int().min(0).max(mostSeed);
@@ -34,14 +35,8 @@ const windowOf = (unit: Unit) =>
   z
     .strictObject({ least: figureSchema(unit).optional(), most: figureSchema(unit).optional() })
     .superRefine(({ least, most }, context) => {
-      const said = (value: number) => formatQuantity(value, unit);
-      if (least === undefined && most === undefined)
-        context.addIssue({ code: "custom", message: "Give the least, the most, or both." });
-      else if (least !== undefined && most !== undefined && least >= most)
-        context.addIssue({
-          code: "custom",
-          message: `The least, ${said(least)}, must lie below the most, ${said(most)}. Exchange them.`,
-        });
+      const message = windowFault(least, most, unit);
+      if (message !== undefined) context.addIssue({ code: "custom", message });
     })
     .transform(({ least, most }): Partial<Range> => ({
       ...(least !== undefined && { least }),

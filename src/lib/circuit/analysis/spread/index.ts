@@ -14,3 +14,4 @@ export { remedyStatement, runRemedy, type Remedy } from "./remedy.ts";
 export type { Band } from "./band.ts";
 export { mostBandBoards } from "./band.ts";
 export { relativeSlopes } from "./slopes.ts";
+export { histogramOf, viewSpread, type Histogram, type SpreadLook, type SpreadView } from "./view.ts";
