@@ -61,6 +61,8 @@ const keptStage = z.object({
   targets: z.record(z.string(), z.number()),
   windows: z.record(z.string(), z.number()).optional(),
   designators: z.record(z.string(), z.string()),
+  apart: z.boolean().optional(),
+  notFitted: z.array(z.string()).optional(),
 });
 
 export const keptInputs = z.object({

@@ -31,6 +31,11 @@ const looseStage = z.strictObject({
     .boolean()
     .optional()
     .meta({ description: "Keeps its own conditions whatever it is linked to, to see its ideal self" }),
+  notFitted: z
+    .array(word)
+    .max(60)
+    .optional()
+    .meta({ description: "Roles of parts and devices that stay on the drawing and off the board" }),
 });
 
 export interface Stage {
@@ -44,6 +49,7 @@ export interface Stage {
   windows?: Record<string, number> | undefined;
   designators: Record<string, string>;
   apart?: boolean | undefined;
+  notFitted?: string[] | undefined;
 }
 
 type Loose = z.output<typeof looseStage>;
@@ -74,6 +80,10 @@ export const stageSchema: z.ZodType<Stage, z.input<typeof looseStage>> = looseSt
     ...(stage.windows && { windows: check(context, "windows", schemas.windows, stage.windows) }),
   };
   checkDesignators(context, topology, stage.designators);
+  stage.notFitted?.forEach((key, index) => {
+    if (key in topology.parts || topology.devices.some((device) => device.key === key)) return;
+    fail(context, ["notFitted", index], "There is no such part in this topology.");
+  });
   return { ...stage, ...checked } as Stage;
 });
 
@@ -87,13 +97,12 @@ function check<T>(context: Context, place: string, schema: z.ZodType<T>, value: 
 
 function checkDesignators(context: Context, topology: AnyTopology, designators: Record<string, string>): void {
   for (const [part, designator] of Object.entries(designators)) {
-    const field = topology.parts[part];
-    const fault = field ? designatorFault(field.partClass, designator) : "There is no such part in this topology.";
+    const fault = designatorFault(topology, part, designator);
     if (fault !== undefined) fail(context, ["designators", part], fault);
   }
 }
 
-function fail(context: Context, path: string[], message: string): never {
+function fail(context: Context, path: (string | number)[], message: string): never {
   context.issues.push({ code: "custom", path, message, input: undefined });
   return z.NEVER;
 }

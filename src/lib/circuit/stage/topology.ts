@@ -1,3 +1,4 @@
+import type { DeviceClass } from "../device/classes.ts";
 import type { Citation, Formula } from "./citation.ts";
 import type { Curve } from "./curve.ts";
 import type { PlainConditions } from "./defaults.ts";
@@ -25,8 +26,7 @@ export interface Device {
   /** Reference-designator class (IEEE 315). */
   letter: "D" | "Q" | "U" | "J" | "SW";
   label: string;
-  /** "JFET-input op amp, one of two", "general-purpose NPN". */
-  deviceClass: string;
+  deviceClass: DeviceClass;
 }
 
 /** Why no parts meet the targets, and which target to move to where. */

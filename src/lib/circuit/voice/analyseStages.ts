@@ -1,8 +1,10 @@
-import { analyseStage, type Analysis } from "../stage/analyse.ts";
+import type { Analysis } from "../stage/analyse.ts";
 import type { StageKind } from "../stage/kind.ts";
 import type { TargetState } from "../stage/targets.ts";
 import type { Warning } from "../stage/warning.ts";
-import { topologyOf, type VoiceDocument } from "./document.ts";
+import { findIn } from "./chain.ts";
+import { computeChain } from "./compute.ts";
+import type { VoiceDocument } from "./document.ts";
 
 export type StageWarning = Warning & { stage: string };
 
@@ -14,20 +16,22 @@ export interface VoiceAnalysis {
   warnings: StageWarning[];
 }
 
-/** Analyses each stage by itself. One whose network this version does not know has no figures, and a fault says so. */
+/**
+ * Analyses every stage of a voice under what its neighbours decide. One whose network this version does not know has no
+ * figures, and a fault says so.
+ */
 export function analyseStages(document: VoiceDocument, kinds: readonly StageKind[]): VoiceAnalysis {
+  const computed = computeChain(document, findIn(kinds));
   const analysis: VoiceAnalysis = { results: {}, states: {}, warnings: [] };
-  for (const stage of document.stages) {
-    const topology = topologyOf(kinds, stage);
-    if (!topology) {
-      analysis.warnings.push(unknownNetwork(stage.id));
+  for (const { id } of document.stages) {
+    const found = computed.stages.get(id)?.analysis;
+    if (!found) {
+      analysis.warnings.push(unknownNetwork(id));
       continue;
     }
-    const { windows, ...rest } = stage;
-    const { results, state, warnings } = analyseStage(topology, { ...rest, ...(windows && { windows }) });
-    analysis.results[stage.id] = results;
-    analysis.states[stage.id] = state;
-    analysis.warnings.push(...warnings.map((warning) => ({ stage: stage.id, ...warning })));
+    analysis.results[id] = found.results;
+    analysis.states[id] = found.state;
+    analysis.warnings.push(...found.warnings.map((warning) => ({ stage: id, ...warning })));
   }
   return analysis;
 }

@@ -1,41 +1,15 @@
-import type { PlainConditions, PlainValues } from "../stage/defaults.ts";
 import type { Port, StageKind } from "../stage/kind.ts";
 import type { AnyTopology } from "../stage/topology.ts";
+import type { DocumentLink, DocumentStage, VoiceDocument } from "./document.ts";
 
 /** One end of a link. */
-export interface LinkEnd {
-  stage: string;
-  port: string;
-}
-
+export type LinkEnd = DocumentLink["from"];
 /** An output feeding an input. */
-export interface ChainLink {
-  id: string;
-  from: LinkEnd;
-  to: LinkEnd;
-}
-
-/** A stage as a voice holds it; values are complete and were checked at the edge. */
-export interface ChainStage {
-  id: string;
-  kind: string;
-  topology: string;
-  name: string;
-  parts: PlainValues;
-  conditions: PlainConditions;
-  targets: PlainValues;
-  windows?: PlainValues | undefined;
-  designators: Record<string, string>;
-  /** Keeps its own conditions, whatever it is linked to: its ideal self. */
-  apart?: boolean | undefined;
-}
-
+export type ChainLink = DocumentLink;
+/** Values are complete and were checked at the edge. */
+export type ChainStage = DocumentStage;
 /** A voice: stages, what feeds what, and what holds for all of them. */
-export interface Chain {
-  stages: readonly ChainStage[];
-  links: readonly ChainLink[];
-  conditions: PlainConditions;
-}
+export type Chain = VoiceDocument;
 
 export interface FoundTopology {
   kind: Pick<StageKind, "id" | "name" | "ports" | "telling" | "place">;

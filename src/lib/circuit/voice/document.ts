@@ -12,7 +12,12 @@ export interface DocumentStage {
   conditions: PlainConditions;
   targets: PlainValues;
   windows?: PlainValues | undefined;
+  /** Of parts and devices, by key. */
   designators: Record<string, string>;
+  /** Keeps its own conditions, whatever it is linked to: its ideal self. */
+  apart?: boolean | undefined;
+  /** Keys of parts and devices that stay on the drawing and off the board. */
+  notFitted?: readonly string[] | undefined;
 }
 
 export interface DocumentLink {

@@ -2,6 +2,7 @@ import { designatorLetters, type AnyTopology, type PlainValues } from "#lib/circ
 
 /**
  * A reference designator for every fitted part: its own where it has one, else the next free number of its class letter.
+ * Devices keep those they have.
  *
  * @param taken designators of the voice's other stages
  */
@@ -12,15 +13,14 @@ export function assignDesignators(
   taken: Iterable<string>,
 ): Record<string, string> {
   const used = new Set([...taken, ...Object.values(own)]);
-  return Object.fromEntries(
-    Object.entries(topology.parts)
-      .filter(([key]) => parts[key]! > 0)
-      .map(([key, field]): [string, string] => {
-        const designator = own[key] ?? nextFree(designatorLetters[field.partClass], used);
-        used.add(designator);
-        return [key, designator];
-      }),
-  );
+  const marks: Record<string, string> = {};
+  for (const [key, field] of Object.entries(topology.parts)) {
+    if (!(parts[key]! > 0)) continue;
+    marks[key] = own[key] ?? nextFree(designatorLetters[field.partClass], used);
+    used.add(marks[key]);
+  }
+  for (const { key } of topology.devices) if (own[key] !== undefined) marks[key] = own[key];
+  return marks;
 }
 
 function nextFree(letters: string, used: ReadonlySet<string>): string {

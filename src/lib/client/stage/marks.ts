@@ -37,8 +37,9 @@ export function marksOf({ topology, parts, saved, typed, others }: Marked): Mark
 
   const faults: Record<string, string> = {};
   for (const [part, mark] of Object.entries(wanted)) {
+    if (!(part in topology.parts)) continue;
     const twin = Object.keys(wanted).find((other) => other !== part && wanted[other] === mark);
-    const malformed = designatorFault(topology.parts[part]!.partClass, mark);
+    const malformed = designatorFault(topology, part, mark);
     if (malformed !== undefined) faults[part] = malformed;
     else if (holders.has(mark)) faults[part] = `${mark} is taken in ${holders.get(mark)}. Choose another number.`;
     else if (twin !== undefined && part in typed) {

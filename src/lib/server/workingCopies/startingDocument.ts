@@ -8,6 +8,11 @@ export function startingDocument(templateId: VoiceTemplateId): WorkingCopyDocume
   const template = voiceTemplates.find(({ id }) => id === templateId);
   if (!template) throw new Error(`there is no template ${templateId}`);
   const stages = beginStages(template, stageKinds);
-  const { format, ...document } = workingCopyDocument.parse({ format: 1, stages, links: template.links, conditions: {} });
+  const { format, ...document } = workingCopyDocument.parse({
+    format: 1,
+    stages,
+    links: template.links,
+    conditions: {},
+  });
   return { format, stages: document.stages, links: document.links, conditions: document.conditions };
 }

@@ -4,11 +4,13 @@ import type { Route } from "./route.ts";
 import { serviceRoutes } from "./service.ts";
 import { revisionRoutes } from "./revisions.ts";
 import { voiceRoutes } from "./voices.ts";
+import { wholeVoiceRoutes } from "./wholeVoice.ts";
 
 /** The whole HTTP interface, in the order in which its description shows it. */
 export const routes: readonly Route[] = [
   ...calculatorRoutes,
   ...voiceRoutes,
+  ...wholeVoiceRoutes,
   ...revisionRoutes,
   ...accountRoutes,
   ...serviceRoutes,

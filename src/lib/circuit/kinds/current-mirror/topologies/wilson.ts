@@ -104,6 +104,7 @@ const network: Network = {
 };
 
 const pnp = "general-purpose PNP";
+const half = `${pnp}, half of a matched pair` as const;
 
 export const wilson = defineTopology({
   id: "wilson",
@@ -124,8 +125,8 @@ export const wilson = defineTopology({
   network,
   joints,
   devices: [
-    { key: "q1", letter: "Q", label: "reference transistor", deviceClass: `${pnp}, half of a matched pair` },
-    { key: "q2", letter: "Q", label: "copying transistor", deviceClass: `${pnp}, half of a matched pair` },
+    { key: "q1", letter: "Q", label: "reference transistor", deviceClass: half },
+    { key: "q2", letter: "Q", label: "copying transistor", deviceClass: half },
     { key: "q3", letter: "Q", label: "output transistor", deviceClass: pnp },
   ],
   traits: [

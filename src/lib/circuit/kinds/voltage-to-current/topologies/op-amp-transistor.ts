@@ -111,7 +111,7 @@ export const opAmpTransistor = defineTopology({
   devices: [
     { key: "u1", letter: "U", label: "op amp", deviceClass: "JFET-input op amp, one of two in a package" },
     { key: "q1", letter: "Q", label: "pass transistor", deviceClass: "general-purpose NPN" },
-    { key: "d1", letter: "D", label: "base protection", deviceClass: "small-signal silicon diode" },
+    { key: "d1", letter: "D", label: "base protection", deviceClass: "small-signal diode" },
   ],
   traits: [
     { label: "Devices", text: "1 op amp, 1 transistor, and a mirror behind it" },
