@@ -19,6 +19,7 @@ const classes = {
   "bipolar transconductance amplifier, one of two": { perPackage: 2, quiescent: transconductance },
   "bipolar transconductance amplifier with buffer, one of two": { perPackage: 2, quiescent: transconductance },
   "general-purpose NPN": { perPackage: 1 },
+  "general-purpose NPN, selected": { perPackage: 1 },
   "general-purpose PNP": { perPackage: 1 },
   "general-purpose PNP, half of a matched pair": { perPackage: 2 },
   "small-signal diode": { perPackage: 1 },

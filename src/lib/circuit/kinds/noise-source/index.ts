@@ -4,6 +4,7 @@ import { analyse, design } from "./analyse.ts";
 import { curves } from "./curves.ts";
 import { conditions, parts, results, targets } from "./fields.ts";
 import { formulas } from "./formulas.ts";
+import { joints } from "./joints.ts";
 import { limits } from "./limits.ts";
 import { network } from "./network.ts";
 import { reference } from "./reference.ts";
@@ -25,6 +26,7 @@ const measured = defineTopology({
   formulas,
   sources,
   network,
+  joints,
   devices: [
     { key: "q1", letter: "Q", label: "noise junction", deviceClass: "general-purpose NPN, selected" },
     { key: "u1", letter: "U", label: "first stage", deviceClass: "JFET-input op amp, one of two in a package" },
