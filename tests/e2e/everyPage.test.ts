@@ -97,4 +97,24 @@ describe("wide and narrow, light and dark", () => {
     expect(await faultsOf(page)).toEqual([]);
     expect(member.consoleErrors.splice(0)).toEqual([]);
   });
+
+  test("the revisions of a voice, one of them and a comparison are accessible and fit", async () => {
+    const { page } = member;
+    await visit(page, `${app.url}/voices`);
+    await page.getByRole("link", { name: "Shingle" }).click();
+    await page.getByRole("link", { name: "Revisions" }).click();
+    await page.getByRole("heading", { level: 1, name: "Revisions" }).waitFor();
+    await hydrated(page);
+    expect(await faultsOf(page)).toEqual([]);
+    await page.getByRole("link", { name: "Revision 2" }).click();
+    await page.getByRole("link", { name: "Compute them again" }).click();
+    await page.getByRole("heading", { name: "Computed again" }).waitFor();
+    await hydrated(page);
+    expect(await faultsOf(page)).toEqual([]);
+    await page.getByRole("link", { name: "Compare with the release before" }).click();
+    await page.getByRole("heading", { level: 1, name: "Revision 1 compared with revision 2" }).waitFor();
+    await hydrated(page);
+    expect(await faultsOf(page)).toEqual([]);
+    expect(member.consoleErrors.splice(0)).toEqual([]);
+  });
 });

@@ -5,7 +5,7 @@ import { PlotActions } from "./PlotActions.tsx";
 import { PlotDrawing } from "./PlotDrawing.tsx";
 import { PlotFigures } from "./PlotFigures.tsx";
 import { Cursor, Legend, readout, useWidth } from "./plotFrame.tsx";
-import { plotModel, type PlotCurve, type PlotRoom } from "./plotModel.ts";
+import { plotModel, type PlotCurve, type PlotModel, type PlotRoom } from "./plotModel.ts";
 
 interface PlotProps {
   topology: AnyTopology;
@@ -22,33 +22,58 @@ const InteractivePlot = lazy(() => import("./InteractivePlot.tsx").catch(() => (
 /** Drawn before the width is known: one for wide columns and one for phones, chosen by the stylesheet. */
 const wide: PlotRoom = { width: 640, height: 340 };
 const narrow: PlotRoom = { width: 340, height: 320 };
+const shortHeight = 190;
 
+/** One curve of a stage as it stands. */
 export function Plot({ topology, curve, stage, fileName, empty }: PlotProps) {
+  const modelIn = (room: PlotRoom) => plotModel(topology, curve, stage, room);
+  return <FramedPlot name={curve.name} fileName={fileName} empty={empty} modelIn={modelIn} />;
+}
+
+interface FramedPlotProps {
+  name: string;
+  fileName: string;
+  /** What is drawn in so much room; undefined where there is nothing to draw. */
+  modelIn: (room: PlotRoom) => PlotModel | undefined;
+  empty?: string | undefined;
+  /** Half as high: for what stands under another plot. */
+  short?: boolean;
+  /** What an address with # leads to. */
+  id?: string;
+}
+
+/** A plot with its heading, legend, readout, figures and files, whatever its lines come from. */
+export function FramedPlot({ name, fileName, modelIn, empty, short = false, id }: FramedPlotProps) {
   const box = useRef<HTMLDivElement>(null);
   const width = useWidth(box);
   const near = useNear(box);
   const [at, setAt] = useState<number | null>(null);
   const head = useId();
-  const room = width === null ? wide : { width, height: width < 480 ? narrow.height : wide.height };
-  const model = empty === undefined ? plotModel(topology, curve, stage, room) : undefined;
-  const narrowModel = width === null && empty === undefined ? plotModel(topology, curve, stage, narrow) : undefined;
+  const sized = (room: PlotRoom) => (short ? { ...room, height: shortHeight } : room);
+  const wideRoom = sized(wide);
+  const narrowRoom = sized(narrow);
+  const room = width === null ? wideRoom : sized({ width, height: width < 480 ? narrow.height : wide.height });
+  const model = empty === undefined ? modelIn(room) : undefined;
+  const narrowModel = width === null && empty === undefined ? modelIn(narrowRoom) : undefined;
 
   return (
-    <figure className="plot" aria-labelledby={head}>
+    <figure className="plot" id={id} aria-labelledby={head}>
       <figcaption className="plot-head">
-        <h3 id={head}>{curve.name}</h3>
+        <h3 id={head}>{name}</h3>
         {model && model.lines.length > 1 && <Legend model={model} />}
         {model && <PlotActions model={model} fileName={fileName} />}
       </figcaption>
-      <div ref={box} className={model ? "plot-box" : "plot-box plot-box-empty"}>
+      <div ref={box} className={`plot-box${model ? "" : " plot-box-empty"}${short ? " plot-box-short" : ""}`}>
         {model ? (
           <>
             {width === null ? (
               <>
                 <div className="plot-wide">
-                  <PlotDrawing model={model} room={wide} />
+                  <PlotDrawing model={model} room={wideRoom} />
                 </div>
-                <div className="plot-narrow">{narrowModel && <PlotDrawing model={narrowModel} room={narrow} />}</div>
+                <div className="plot-narrow">
+                  {narrowModel && <PlotDrawing model={narrowModel} room={narrowRoom} />}
+                </div>
               </>
             ) : near ? (
               <Suspense fallback={<PlotDrawing model={model} room={room} />}>
@@ -57,12 +82,12 @@ export function Plot({ topology, curve, stage, fileName, empty }: PlotProps) {
             ) : (
               <PlotDrawing model={model} room={room} />
             )}
-            <Cursor model={model} at={at} onMove={setAt} label={`${curve.name}: point along the curve`} />
+            <Cursor model={model} at={at} onMove={setAt} label={`${name}: point along the curve`} />
           </>
         ) : (
           <p className="plot-empty">
             {empty ??
-              `No curve: with these values ${curve.name.toLowerCase()} has no figure to draw. Change a part or a target.`}
+              `No curve: with these values ${name.toLowerCase()} has no figure to draw. Change a part or a target.`}
           </p>
         )}
       </div>

@@ -97,7 +97,7 @@ function withMark(xs: number[], mark: number | undefined): number[] {
 }
 
 const finite = (value: number) => (Number.isFinite(value) ? value : null);
-const scaled = ([a, b]: readonly [number, number], factor: number): [number, number] => [a * factor, b * factor];
+export const scaled = ([a, b]: readonly [number, number], factor: number): [number, number] => [a * factor, b * factor];
 export const xRoom = ({ width }: PlotRoom) => Math.max(3, Math.floor(width / 62));
 
 function markOf(curve: PlotCurve, state: never, factor: number, yFactor: number): Pick<PlotModel, "mark"> {
@@ -117,7 +117,7 @@ export function axisOf(axis: Axis, domain: [number, number], room: number, exact
   return { title, unit, scale: axis.scale, ...linearTicks(domain[0], domain[1], room, { angle: unit === "°", exact }) };
 }
 
-function yAxis(axis: Axis, values: number[], window: readonly [number, number] | undefined, room: number): PlotAxis {
+export function yAxis(axis: Axis, values: number[], window: readonly [number, number] | undefined, room: number): PlotAxis {
   let least = Infinity;
   let most = -Infinity;
   for (const value of [...values, ...(window ?? [])]) {

@@ -21,6 +21,17 @@ export function json(body: unknown, { status = 200, headers = {} }: { status?: n
   return new Response(JSON.stringify(body), { status, headers: all });
 }
 
+/** A table to be taken away as a file. */
+export function csv(fileName: string, text: string): Response {
+  return new Response(text, {
+    headers: {
+      "content-type": "text/csv; charset=utf-8",
+      "content-disposition": `attachment; filename="${fileName}"`,
+      "cache-control": "no-store",
+    },
+  });
+}
+
 /** For `export const ALL`: Astro calls it for each method a route file does not export. */
 export function methodNotAllowed(...allowed: readonly string[]): APIRoute {
   const allow = [...(allowed.includes("GET") ? ["HEAD"] : []), ...allowed].join(", ");

@@ -1,5 +1,5 @@
 import { z } from "zod";
-import { person } from "./page.ts";
+import { asFormat, person } from "./page.ts";
 import { revisionStatus, stageWarningAnswer } from "./revision.ts";
 import { linkSchema } from "./workingCopy.ts";
 
@@ -26,7 +26,7 @@ export const compareQuery = z.strictObject({
     .optional()
     .meta({ description: "Only curves of this stage, and all of them; those that differ where left out" }),
   curves: z.enum(["changed", "none"]).default("changed"),
-  format: z.enum(["json", "csv"]).optional().meta({ description: "As Accept would say" }),
+  format: asFormat,
 });
 
 export type CompareQuery = z.output<typeof compareQuery>;

@@ -6,6 +6,9 @@ export const pageQuery = {
   cursor: z.string().max(500).optional().meta({ description: "nextCursor of the page before" }),
 };
 
+/** For a link, which cannot carry an Accept header. */
+export const asFormat = z.enum(["json", "csv"]).optional().meta({ description: "As Accept would say" });
+
 export const nextCursor = z.string().nullable().meta({ description: "Null on the last page" });
 
 export const person = z.object({

@@ -1,7 +1,7 @@
 import { revisionStatuses } from "#lib/policy/index.ts";
 import { z } from "zod";
 import { warningAnswer } from "./calculator.ts";
-import { nextCursor, pageQuery, person } from "./page.ts";
+import { asFormat, nextCursor, pageQuery, person } from "./page.ts";
 import { oneLine, someLines } from "./plainText.ts";
 import { linkSchema } from "./workingCopy.ts";
 
@@ -46,6 +46,7 @@ export const revisionListQuery = z.strictObject({
   ...pageQuery,
   sort: z.enum(["newest", "oldest"]).default("newest").meta({ description: "By number" }),
   status: revisionStatus.optional().meta({ description: "Only those of this status" }),
+  format: asFormat,
 });
 
 const resultValue = z.union([z.number(), z.array(z.number())]);

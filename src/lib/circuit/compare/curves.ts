@@ -3,6 +3,7 @@ import { spacedValues, type Axis } from "../stage/curve.ts";
 import type { AnyTopology } from "../stage/topology.ts";
 import type { DocumentStage } from "../voice/document.ts";
 import type { Unit } from "../quantity/units.ts";
+import { isSameFigure } from "./values.ts";
 
 export interface CurvePair {
   stage: string;
@@ -50,7 +51,7 @@ export function overlaidCurves(from: Side, to: Side, count = usualCount): CurveP
       const [a, b] = [oldLine.at(x), newLine.at(x)];
       return Number.isFinite(a) && Number.isFinite(b) ? [[x, a, b] as const] : [];
     });
-    if (points.length < 2) return [];
+    if (points.length < 2 || turnsNothing(curve.x, points)) return [];
     const [xs, olds, news] = [0, 1, 2].map((column) => points.map((point) => point[column]!)) as [
       number[],
       number[],
@@ -64,6 +65,13 @@ export function overlaidCurves(from: Side, to: Side, count = usualCount): CurveP
       },
     ];
   });
+}
+
+/** A curve over the rotation of a pot that neither side fits. */
+function turnsNothing({ shown }: Axis, points: readonly (readonly [number, number, number])[]): boolean {
+  if (shown?.unit !== "°") return false;
+  const [, a, b] = points[0]!;
+  return points.every(([, from, to]) => isSameFigure(from, a) && isSameFigure(to, b));
 }
 
 /** The operating points are among them: a sharp peak would fall between two. */

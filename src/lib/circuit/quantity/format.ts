@@ -70,7 +70,7 @@ function engineering(value: number, digits: number): { mantissa: string; prefix:
 }
 
 function plainFigure(value: number, unit: Unit, digits: number): string {
-  if (unit === "dB" || unit === "°" || unit === "semitones" || unit === "cents/°" || unit === "K")
+  if (unit === "dB" || unit === "°" || unit === "semitones" || unit === "cents/°" || unit === "K" || unit === "%")
     return value.toFixed(2).replace(/^-(0\.00)$/, "$1");
   if (value === 0) return "0";
   const size = Math.abs(value);

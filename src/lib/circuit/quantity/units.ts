@@ -22,6 +22,8 @@ export const units = {
   "°": { prefixed: false, spoken: "degrees" },
   semitones: { prefixed: false, spoken: "semitones" },
   "cents/°": { prefixed: false, spoken: "cents per degree" },
+  /** How a relative figure is shown; stored ones are plain ratios. */
+  "%": { prefixed: false, spoken: "per cent" },
   /** A plain ratio, such as a gain or a quality factor. */
   "": { prefixed: false, spoken: "" },
 } as const satisfies Record<string, { prefixed: boolean; spoken: string }>;

@@ -10,14 +10,16 @@ import {
   type Transaction,
 } from "#lib/db/index.ts";
 import type { VoiceTemplateId } from "#lib/circuit/kinds/templates.ts";
+import type { Role } from "#lib/policy/index.ts";
 import { hashPassword } from "better-auth/crypto";
 import { and, eq } from "drizzle-orm";
 import { startingDocument } from "../workingCopies/startingDocument.ts";
 import { demoPassword, demoPeople, demoTeam } from "./accounts.ts";
+import { reviseDemoVoice } from "./revisions.ts";
 
-const demoVoices: readonly { name: string; template: VoiceTemplateId }[] = [
-  { name: "Woodpeck", template: "struck-tone" },
-  { name: "Shingle", template: "two-path-noise" },
+const demoVoices: readonly { name: string; template: VoiceTemplateId; revised: boolean }[] = [
+  { name: "Woodpeck", template: "struck-tone", revised: false },
+  { name: "Shingle", template: "two-path-noise", revised: true },
 ];
 
 async function ensurePerson(tx: Transaction, { email, name }: { email: string; name: string }): Promise<string> {
@@ -38,14 +40,20 @@ async function ensureTeam(tx: Transaction): Promise<{ id: string; isNew: boolean
   return { id, isNew: true };
 }
 
-async function beginVoices(tx: Transaction, teamId: string): Promise<void> {
-  const [designer] = await tx
-    .select({ id: members.userId })
+async function demoPerson(tx: Transaction, teamId: string, role: Role) {
+  const [person] = await tx
+    .select({ id: users.id, name: users.name })
     .from(members)
-    .where(and(eq(members.organizationId, teamId), eq(members.role, "designer")));
+    .innerJoin(users, eq(users.id, members.userId))
+    .where(and(eq(members.organizationId, teamId), eq(members.role, role)));
+  return person;
+}
+
+async function beginVoices(tx: Transaction, teamId: string): Promise<void> {
+  const [designer, reviewer] = [await demoPerson(tx, teamId, "designer"), await demoPerson(tx, teamId, "reviewer")];
   const author = designer?.id ?? null;
   const now = Date.now();
-  for (const [index, { name, template }] of demoVoices.entries()) {
+  for (const [index, { name, template, revised }] of demoVoices.entries()) {
     const id = newId("voi");
     // A minute apart, so that the list has one order.
     const at = new Date(now - (demoVoices.length - index) * 60_000);
@@ -53,6 +61,9 @@ async function beginVoices(tx: Transaction, teamId: string): Promise<void> {
     await tx.insert(voices).values({ id, teamId, name, createdBy: author, ...stamps });
     const document = startingDocument(template);
     await tx.insert(workingCopies).values({ voiceId: id, document, updatedBy: author, ...stamps });
+    if (revised && designer && reviewer) {
+      await reviseDemoVoice(tx, { voiceId: id, document, author: designer, reviewer, now });
+    }
   }
 }
 

@@ -1,4 +1,4 @@
-import { answer, json, methodNotAllowed } from "#lib/server/answer.ts";
+import { answer, csv, json, methodNotAllowed } from "#lib/server/answer.ts";
 import { compareRevisions } from "#lib/server/compare/compare.ts";
 import { contextOf, memberOf } from "#lib/server/context.ts";
 import { idInPath, readQuery } from "#lib/server/request.ts";
@@ -10,20 +10,11 @@ export const GET = answer(async ({ locals, params, request, url }) => {
   const ctx = contextOf(locals);
   memberOf(ctx);
   const { format, ...query } = readQuery(url, compareQuery);
-  const csv = wantsCsv(request, format);
-  const found = await compareRevisions({
-    ctx,
-    input: { id: idInPath(params), ...query, ...(csv ? { curves: "none" } : {}) },
-  });
-  if (!csv) return json(found);
-  const name = `compare-${found.from.revision}-${found.to.revision}.csv`;
-  return new Response(compareCsv(found), {
-    headers: {
-      "content-type": "text/csv; charset=utf-8",
-      "content-disposition": `attachment; filename="${name}"`,
-      "cache-control": "no-store",
-    },
-  });
+  const asCsv = wantsCsv(request, format);
+  const more = asCsv ? { curves: "none" as const } : {};
+  const found = await compareRevisions({ ctx, input: { id: idInPath(params), ...query, ...more } });
+  if (!asCsv) return json(found);
+  return csv(`compare-${found.from.revision}-${found.to.revision}.csv`, compareCsv(found));
 });
 
 export const ALL = methodNotAllowed("GET");

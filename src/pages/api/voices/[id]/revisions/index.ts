@@ -1,15 +1,19 @@
-import { answer, json, methodNotAllowed } from "#lib/server/answer.ts";
+import { answer, csv, json, methodNotAllowed } from "#lib/server/answer.ts";
 import { contextOf, memberOf } from "#lib/server/context.ts";
 import { idInPath, readJson, readQuery } from "#lib/server/request.ts";
 import { listRevisions } from "#lib/server/revisions/list.ts";
 import { makeRevision } from "#lib/server/revisions/make.ts";
+import { wantsCsv } from "#lib/server/wantsCsv.ts";
 import { expectedVersions } from "#lib/server/workingCopies/etag.ts";
 import { newRevision, revisionListQuery } from "#lib/wire/revision.ts";
+import { revisionsCsv } from "#lib/wire/revisionsCsv.ts";
 
-export const GET = answer(async ({ locals, params, url }) => {
+export const GET = answer(async ({ locals, params, request, url }) => {
   const ctx = contextOf(locals);
   memberOf(ctx);
-  return json(await listRevisions({ ctx, input: { id: idInPath(params), ...readQuery(url, revisionListQuery) } }));
+  const query = readQuery(url, revisionListQuery);
+  const page = await listRevisions({ ctx, input: { id: idInPath(params), ...query } });
+  return wantsCsv(request, query.format) ? csv("revisions.csv", revisionsCsv(page.revisions)) : json(page);
 });
 
 export const POST = answer(async ({ locals, params, request }) => {
