@@ -117,7 +117,12 @@ export function axisOf(axis: Axis, domain: [number, number], room: number, exact
   return { title, unit, scale: axis.scale, ...linearTicks(domain[0], domain[1], room, { angle: unit === "°", exact }) };
 }
 
-export function yAxis(axis: Axis, values: number[], window: readonly [number, number] | undefined, room: number): PlotAxis {
+export function yAxis(
+  axis: Axis,
+  values: number[],
+  window: readonly [number, number] | undefined,
+  room: number,
+): PlotAxis {
   let least = Infinity;
   let most = -Infinity;
   for (const value of [...values, ...(window ?? [])]) {
