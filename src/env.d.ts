@@ -6,5 +6,7 @@ declare namespace App {
     actor: import("#lib/policy/index.ts").Actor | null;
     /** The origin that links in mails begin with. */
     site: string;
+    /** The body, where the server has read it already; the request gives the same bytes, only far more slowly. */
+    body?: Uint8Array;
   }
 }

@@ -1,22 +1,30 @@
 import { Refusal } from "#lib/server/errors.ts";
 import { problemResponse } from "#lib/server/problem.ts";
-import { readJson } from "#lib/server/request.ts";
+import { readJson, type Received } from "#lib/server/request.ts";
 import { expectedVersions, versionsIn } from "#lib/server/workingCopies/etag.ts";
 import { describe, expect, test } from "vitest";
 import { z } from "zod";
 
 const schema = z.strictObject({ name: z.string().min(1).max(5), parts: z.strictObject({ ra: z.number() }) });
 
-const send = (body: BodyInit | undefined, type = "application/json") =>
-  new Request("http://clatterbench.test/", {
+const send = (body: BodyInit | undefined, type = "application/json"): Received => ({
+  request: new Request("http://clatterbench.test/", {
     method: "POST",
     headers: { "content-type": type },
     ...(body === undefined ? {} : { body }),
-  });
+  }),
+  locals: {},
+});
 
-async function refusalOf(request: Request): Promise<Refusal> {
+/** As the gate hands a body over: read, and found in the locals. */
+async function sendRead(body: BodyInit | undefined, type?: string): Promise<Received> {
+  const { request } = send(body, type);
+  return { request, locals: { body: new Uint8Array(await request.clone().arrayBuffer()) } };
+}
+
+async function refusalOf(received: Received): Promise<Refusal> {
   try {
-    await readJson(request, schema);
+    await readJson(received, schema);
   } catch (error) {
     if (error instanceof Refusal) return error;
     throw error;
@@ -28,6 +36,7 @@ describe("reading a JSON body", () => {
   test("gives what passed the schema", async () => {
     const good = { name: "ok", parts: { ra: 1 } };
     expect(await readJson(send(JSON.stringify(good)), schema)).toEqual(good);
+    expect(await readJson(await sendRead(JSON.stringify(good)), schema)).toEqual(good);
   });
 
   test.each([
@@ -41,6 +50,7 @@ describe("reading a JSON body", () => {
     ["null", "null", "invalid-input"],
   ])("refuses %s", async (_, body, code) => {
     expect(await refusalOf(send(body))).toMatchObject({ code });
+    expect(await refusalOf(await sendRead(body))).toMatchObject({ code });
   });
 
   test.each(["text/plain", "application/x-www-form-urlencoded", ""])("refuses the type '%s'", async (type) => {

@@ -1,4 +1,5 @@
 import { faultText } from "#lib/wire/faultText.ts";
+import type { APIContext } from "astro";
 import type { z } from "zod";
 import { notFound, Refusal } from "./errors.ts";
 import { faultsOf } from "./faults.ts";
@@ -19,12 +20,17 @@ async function readChunks(body: ReadableStream<Uint8Array>, limitBytes: number):
   return Buffer.concat(chunks);
 }
 
-async function readText(request: Request, limitBytes: number): Promise<string> {
-  const announced = Number(request.headers.get("content-length") ?? 0);
-  if (announced > limitBytes) throw tooLarge(limitBytes);
-  if (!request.body) return "";
-  // An announced length is kept to by the HTTP parser, so the body can be taken in one piece, which is quicker.
-  const bytes = announced > 0 ? Buffer.from(await request.arrayBuffer()) : await readChunks(request.body, limitBytes);
+async function readBytes({ request, locals }: Received, limitBytes: number): Promise<Uint8Array> {
+  if (locals.body) {
+    if (locals.body.byteLength > limitBytes) throw tooLarge(limitBytes);
+    return locals.body;
+  }
+  if (Number(request.headers.get("content-length") ?? 0) > limitBytes) throw tooLarge(limitBytes);
+  return request.body ? readChunks(request.body, limitBytes) : new Uint8Array();
+}
+
+async function readText(received: Received, limitBytes: number): Promise<string> {
+  const bytes = await readBytes(received, limitBytes);
   try {
     return new TextDecoder("utf-8", { fatal: true }).decode(bytes);
   } catch {
@@ -52,17 +58,20 @@ export function parseInput<Schema extends z.ZodType>(value: unknown, schema: Sch
   throw new Refusal("invalid-input", `What was sent is wrong in ${places}. Nothing was changed.`, { errors });
 }
 
+/** What of an endpoint's context is needed to read its body. */
+export type Received = Pick<APIContext, "request"> & { locals: Pick<App.Locals, "body"> };
+
 /** Reads a JSON body of bounded size and checks it. */
 export async function readJson<Schema extends z.ZodType>(
-  request: Request,
+  received: Received,
   schema: Schema,
   { limitBytes = bodyLimit }: { limitBytes?: number } = {},
 ): Promise<z.output<Schema>> {
-  const mediaType = (request.headers.get("content-type") ?? "").split(";", 1)[0]?.trim().toLowerCase() ?? "";
+  const mediaType = (received.request.headers.get("content-type") ?? "").split(";", 1)[0]?.trim().toLowerCase() ?? "";
   if (mediaType !== "application/json" && !/^application\/[\w.-]+\+json$/.test(mediaType)) {
     throw new Refusal("wrong-media-type", "Send the body as JSON, with the header Content-Type: application/json.");
   }
-  return parseInput(parseJson(await readText(request, limitBytes)), schema);
+  return parseInput(parseJson(await readText(received, limitBytes)), schema);
 }
 
 /** Reads the query of an address; a name given twice counts as its last value. */

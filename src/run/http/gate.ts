@@ -7,7 +7,13 @@ import { vouchForHeaders, type Reached } from "./forwarded.ts";
 import { isForgedWrite } from "./origin.ts";
 import { refuse } from "./problem.ts";
 
-export type Application = (request: IncomingMessage, response: ServerResponse) => Promise<void>;
+/** Astro's handler: what is given as locals is what endpoints find in theirs. */
+export type Application = (
+  request: IncomingMessage,
+  response: ServerResponse,
+  next: undefined,
+  locals: { body?: Uint8Array },
+) => Promise<void>;
 
 /** Half as much again as the largest body an endpoint reads, so that an endpoint answers for its own limit. */
 export const bodyLimit = 1.5 * 1024 * 1024;
@@ -54,19 +60,21 @@ export function gate({ files, application, ...reached }: Gate): RequestListener 
       const body = await readBody(request, bodyLimit);
       if (body.kind === "broken-off") return;
       if (body.kind === "too-large") {
-        response.setHeader("Connection", "close");
+        // The connection stays open: a sender that finds it closed while still writing may never read the answer.
+        discardBody(request);
         refuse(
           request,
           response,
           "too-large",
           "The request is larger than 1 MB. Nothing was changed; send less at once.",
         );
-        discardBody(request);
         return;
       }
       attachBody(request, body.bytes);
+      await application(request, response, undefined, { body: body.bytes });
+      return;
     }
-    await application(request, response);
+    await application(request, response, undefined, {});
   }
 
   return (request, response) => {

@@ -15,10 +15,10 @@ export function calculator<Schema extends z.ZodType>(
   schemaOf: (schemas: ReturnType<typeof topologySchemas>) => Schema,
   compute: (topology: AnyTopology, input: z.output<Schema>) => unknown,
 ) {
-  return answer(async ({ request, params, clientAddress }: APIContext) => {
+  return answer(async ({ request, locals, params, clientAddress }: APIContext) => {
     countCalculation(clientAddress, calculationCosts[cost]);
     const topology = findTopology(params["kind"], params["topology"]);
-    return json(compute(topology, await readJson(request, schemaOf(topologySchemas(topology)))));
+    return json(compute(topology, await readJson({ request, locals }, schemaOf(topologySchemas(topology)))));
   });
 }
 
@@ -32,11 +32,11 @@ export function calculatorApart<C extends Calculation, Schema extends z.ZodType<
   calculation: C,
   schemaOf: (topology: AnyTopology) => Schema,
 ) {
-  return answer(async ({ request, params, clientAddress }: APIContext) => {
+  return answer(async ({ request, locals, params, clientAddress }: APIContext) => {
     countCalculation(clientAddress, costApart);
     const { kind, topology: id } = params;
     const topology = findTopology(kind, id);
-    const asked: CalculationRequest<C> = await readJson(request, schemaOf(topology));
+    const asked: CalculationRequest<C> = await readJson({ request, locals }, schemaOf(topology));
     if ("boards" in asked) countCalculation(clientAddress, asked.boards / boardsPerAnalysis);
     return json(
       await calculateApart({ calculation, kind: kind!, topology: topology.id, request: asked }, request.signal),

@@ -14,7 +14,7 @@ export const GET = answer(async ({ locals, url }) => {
 export const POST = answer(async ({ locals, request }) => {
   const ctx = contextOf(locals);
   memberOf(ctx);
-  const voice = await createVoice({ ctx, input: await readJson(request, newVoice) });
+  const voice = await createVoice({ ctx, input: await readJson({ request, locals }, newVoice) });
   return json(voice, { status: 201, headers: { location: `/api/voices/${voice.id}` } });
 });
 

@@ -13,7 +13,7 @@ export const GET = answer(async ({ locals, params }) =>
 export const PATCH = answer(async ({ locals, params, request }) => {
   const ctx = contextOf(locals);
   memberOf(ctx);
-  const { name } = await readJson(request, voiceChange);
+  const { name } = await readJson({ request, locals }, voiceChange);
   return json(await renameVoice({ ctx, input: { id: idInPath(params), name } }));
 });
 

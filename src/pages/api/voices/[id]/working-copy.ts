@@ -18,7 +18,7 @@ export const PUT = answer(async ({ locals, params, request }) => {
   memberOf(ctx);
   const id = idInPath(params);
   const expected = expectedVersions(request.headers.get("if-match"));
-  const document = await readJson(request, workingCopyDocument);
+  const document = await readJson({ request, locals }, workingCopyDocument);
   const { copy, etag } = await saveWorkingCopy({ ctx, input: { id, document, expected } });
   return json(copy, { headers: { etag } });
 });

@@ -22,7 +22,7 @@ export const POST = answer(async ({ locals, params, request }) => {
   const id = idInPath(params);
   const ifMatch = request.headers.get("if-match");
   const expected = ifMatch === null ? null : expectedVersions(ifMatch);
-  const input = await readJson(request, newRevision);
+  const input = await readJson({ request, locals }, newRevision);
   const revision = await makeRevision({ ctx, input: { id, expected, ...input } });
   const headers = { location: `/api/voices/${id}/revisions/${revision.number}` };
   return json(revision, { status: 201, headers });
