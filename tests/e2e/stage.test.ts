@@ -79,7 +79,7 @@ test("what cannot be fetched takes nothing off the sheet, and comes when asked a
 test("nothing typed is lost to a colleague's save, a lost connection or an expired sign-in", async () => {
   const { page, close } = await openMemberPage(browser, app.url, "designer");
   await page.getByRole("link", { name: "Woodpeck" }).click();
-  await page.locator("main table a").first().click();
+  await page.getByRole("link", { name: "Resonator", exact: true }).click();
   await page.getByRole("heading", { name: "Targets" }).waitFor();
   await hydrated(page);
   const address = page.url();
@@ -201,7 +201,7 @@ test("a voice asks for a stage, and signing in on the way keeps the voice and th
 test("a reviewer reads the stage and cannot change it", async () => {
   const { page, consoleErrors, close } = await openMemberPage(browser, app.url, "reviewer");
   await page.getByRole("link", { name: "Woodpeck" }).click();
-  await page.locator("main table a").first().click();
+  await page.getByRole("link", { name: "Resonator", exact: true }).click();
   await page.getByText("As reviewer you read this working copy.").waitFor();
   await hydrated(page);
   expect(await page.getByRole("button", { name: "Save stage" }).count()).toBe(0);

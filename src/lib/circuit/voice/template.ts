@@ -26,6 +26,15 @@ export interface VoiceTemplate {
   links: readonly ChainLink[];
 }
 
+/** Links from "stage.port" to "stage.port", numbered. */
+export function linked(...pairs: readonly (readonly [from: string, to: string])[]): ChainLink[] {
+  const end = (place: string) => {
+    const at = place.indexOf(".");
+    return { stage: place.slice(0, at), port: place.slice(at + 1) };
+  };
+  return pairs.map(([from, to], index) => ({ id: `link-${index + 1}`, from: end(from), to: end(to) }));
+}
+
 export interface BegunStage extends TemplateStage {
   conditions: PlainConditions;
   designators: Record<string, string>;

@@ -1,4 +1,4 @@
-import { analyseStages, libraryVersion } from "#lib/circuit/index.ts";
+import { analyseStages, libraryVersion, stepAlongSeries } from "#lib/circuit/index.ts";
 import { stageKinds } from "#lib/circuit/kinds/index.ts";
 import { newId, revisions, type Transaction } from "#lib/db/index.ts";
 import type { WorkingCopyDocument } from "#lib/wire/workingCopy.ts";
@@ -18,12 +18,13 @@ interface DemoRevisions {
 
 const minute = 60_000;
 
-/** The document as it was before its latest change: the same targets met with the next lower resistor. */
+/** The document as it was before its latest change: the resistor that tunes the voice's band a step lower. */
 function earlier(document: WorkingCopyDocument): WorkingCopyDocument {
-  const [first, ...rest] = document.stages;
-  const [part, value] = Object.entries(first?.parts ?? {}).find(([, ohms]) => ohms > 100 && ohms < 10_000) ?? [];
-  if (!first || part === undefined || value === undefined) return document;
-  return { ...document, stages: [{ ...first, parts: { ...first.parts, [part]: value * 0.9 } }, ...rest] };
+  const tuned = document.stages.find(({ targets }) => "centreFrequency" in targets);
+  const [part, value] = Object.entries(tuned?.parts ?? {}).find(([, ohms]) => ohms > 10e3 && ohms < 50e3) ?? [];
+  if (!tuned || part === undefined || value === undefined) return document;
+  const before = { ...tuned, parts: { ...tuned.parts, [part]: stepAlongSeries(value, "E24", -1) } };
+  return { ...document, stages: document.stages.map((stage) => (stage === tuned ? before : stage)) };
 }
 
 /** What a review looks like: a release, and a later revision that waits to be decided on. */
