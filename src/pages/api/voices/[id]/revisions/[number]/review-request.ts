@@ -9,7 +9,9 @@ export const POST = answer(async ({ locals, params, request }) => {
   const ctx = contextOf(locals);
   memberOf(ctx);
   const input = { id: idInPath(params), number: numberInPath(params) };
-  return json(await askForReview({ ctx, input: { ...input, ...(await readJson({ request, locals }, reviewRequest)) } }));
+  return json(
+    await askForReview({ ctx, input: { ...input, ...(await readJson({ request, locals }, reviewRequest)) } }),
+  );
 });
 
 export const ALL = methodNotAllowed("POST");

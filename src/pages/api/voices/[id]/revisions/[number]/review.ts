@@ -9,7 +9,9 @@ export const POST = answer(async ({ locals, params, request }) => {
   const ctx = contextOf(locals);
   memberOf(ctx);
   const input = { id: idInPath(params), number: numberInPath(params) };
-  return json(await decideReview({ ctx, input: { ...input, ...(await readJson({ request, locals }, reviewDecision)) } }));
+  return json(
+    await decideReview({ ctx, input: { ...input, ...(await readJson({ request, locals }, reviewDecision)) } }),
+  );
 });
 
 export const ALL = methodNotAllowed("POST");
