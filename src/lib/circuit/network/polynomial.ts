@@ -1,25 +1,38 @@
 /**
  * Real polynomials as coefficient arrays, constant term first: [c0, c1, c2] is c0 + c1 s + c2 s².
- * Transfer functions of the linear stages are built from these.
+ * Transfer functions of the linear stages are built from these. Plain loops that fill each array once: every analysis
+ * passes here dozens of times, and what it throws away costs a server more than what it computes.
  */
 export type Polynomial = readonly number[];
 
 /** The product of polynomials. */
 export function multiply(...factors: Polynomial[]): number[] {
-  return factors.reduce<number[]>(
-    (product, factor) => {
-      const out = new Array<number>(product.length + factor.length - 1).fill(0);
-      product.forEach((a, i) => factor.forEach((b, j) => (out[i + j]! += a * b)));
-      return out;
-    },
-    [1],
-  );
+  let product = [1];
+  for (const factor of factors) product = productOf(product, factor);
+  return product;
+}
+
+function productOf(p: Polynomial, q: Polynomial): number[] {
+  if (p.length === 1 && p[0] === 1) return q.slice();
+  const out: number[] = [];
+  for (let k = 0; k < p.length + q.length - 1; k++) {
+    let sum = 0;
+    for (let i = Math.max(0, k - q.length + 1); i <= k && i < p.length; i++) sum += p[i]! * q[k - i]!;
+    out.push(sum);
+  }
+  return out;
 }
 
 /** The sum of polynomials. */
 export function add(...terms: Polynomial[]): number[] {
-  const out = new Array<number>(Math.max(...terms.map((t) => t.length))).fill(0);
-  for (const term of terms) term.forEach((c, i) => (out[i]! += c));
+  let length = 0;
+  for (const term of terms) length = Math.max(length, term.length);
+  const out: number[] = [];
+  for (let k = 0; k < length; k++) {
+    let sum = 0;
+    for (const term of terms) if (k < term.length) sum += term[k]!;
+    out.push(sum);
+  }
   return out;
 }
 
@@ -35,11 +48,18 @@ export function evaluate(p: Polynomial, x: number): number {
   return value;
 }
 
-/** Coefficients of |p(jω)|² as a polynomial in x = ω²: even part squared plus x times odd part squared. */
+/** Coefficients of |p(jω)|² = p(jω)·p(−jω) as a polynomial in x = ω²: that of xᵏ is Σᵢ (−1)^(i−k)·cᵢ·c₂ₖ₋ᵢ. */
 export function squaredMagnitude(p: Polynomial): number[] {
-  const even = p.filter((_, i) => i % 2 === 0).map((c, k) => (k % 2 === 0 ? c : -c));
-  const odd = p.filter((_, i) => i % 2 === 1).map((c, k) => (k % 2 === 0 ? c : -c));
-  return add(multiply(even, even), odd.length ? multiply([0, 1], odd, odd) : [0]);
+  const out: number[] = [];
+  for (let k = 0; k < p.length; k++) {
+    let sum = 0;
+    for (let i = Math.max(0, 2 * k - p.length + 1); i <= 2 * k && i < p.length; i++) {
+      const product = p[i]! * p[2 * k - i]!;
+      sum += (i - k) % 2 === 0 ? product : -product;
+    }
+    out.push(sum);
+  }
+  return out;
 }
 
 /** The polynomial of s/scale: q(u) = p(scale · u). Used to bring coefficients to comparable size before root finding. */

@@ -1,4 +1,4 @@
-import { evaluate, rescale, squaredMagnitude, trim, type Polynomial } from "./polynomial.ts";
+import { evaluate, rescale, squaredMagnitude, type Polynomial } from "./polynomial.ts";
 import type { Complex } from "./complex.ts";
 import { findRoots } from "./roots.ts";
 
@@ -43,10 +43,11 @@ export function zerosOf({ numerator }: Transfer): Complex[] {
 
 /** The geometric mean of the roots' sizes, or 1 where there is none: the frequency about which coefficients balance. */
 export function naturalScale(p: Polynomial): number {
-  const used = trim(p);
-  const first = used.findIndex((c) => c !== 0);
-  const order = used.length - 1 - first;
-  return order > 0 ? Math.abs(used[first]! / used.at(-1)!) ** (1 / order) : 1;
+  let last = p.length - 1;
+  while (last > 0 && p[last] === 0) last--;
+  let first = 0;
+  while (first < last && p[first] === 0) first++;
+  return last > first ? Math.abs(p[first]! / p[last]!) ** (1 / (last - first)) : 1;
 }
 
 /**
@@ -54,13 +55,19 @@ export function naturalScale(p: Polynomial): number {
  * the scaled denominator, so no root is computed.
  */
 export function isStable({ denominator }: Transfer): boolean {
-  let row = trim(rescale(denominator, naturalScale(denominator))).reverse();
-  if (row[0]! < 0) row = row.map((c) => -c);
-  while (row.length > 1) {
-    if (!(row[0]! > 0 && row[1]! > 0)) return false;
-    row = routhStep(row, row[0]! / row[1]!);
+  const scale = naturalScale(denominator);
+  let order = denominator.length - 1;
+  while (order > 0 && denominator[order] === 0) order--;
+  const sign = denominator[order]! < 0 ? -1 : 1;
+  // The table's rows, highest power first, each written over the one before: a step drops its first coefficient.
+  const row: number[] = [];
+  for (let i = order; i >= 0; i--) row.push(sign * denominator[i]! * scale ** i);
+  for (let k = 0; k < order; k++) {
+    if (!(row[k]! > 0 && row[k + 1]! > 0)) return false;
+    const share = row[k]! / row[k + 1]!;
+    for (let i = k + 2; i < order; i += 2) row[i]! -= share * row[i + 1]!;
   }
-  return row[0]! > 0;
+  return row[order]! > 0;
 }
 
 /** One reduction of the Routh table, highest power first: every second coefficient loses `share` of the next one. */

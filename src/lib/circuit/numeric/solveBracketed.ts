@@ -5,8 +5,10 @@
  * @throws RangeError where the two ends do not have opposite signs
  */
 export function solveBracketed(f: (x: number) => number, from: number, to: number, relativeTolerance = 1e-14): number {
-  let [a, b] = from < to ? [from, to] : [to, from];
-  let [fa, fb] = [f(a), f(b)];
+  let a = Math.min(from, to);
+  let b = Math.max(from, to);
+  let fa = f(a);
+  let fb = f(b);
   if (fa === 0) return a;
   if (fb === 0) return b;
   if (!(fa * fb < 0)) throw new RangeError(`solveBracketed: no change of sign between ${from} and ${to}`);
@@ -26,8 +28,13 @@ export function solveBracketed(f: (x: number) => number, from: number, to: numbe
     if (!(point > a && point < b)) break;
     const fx = f(point);
     if (fx === 0) return point;
-    if (fx * fa < 0) [b, fb] = [point, fx];
-    else [a, fa] = [point, fx];
+    if (fx * fa < 0) {
+      b = point;
+      fb = fx;
+    } else {
+      a = point;
+      fa = fx;
+    }
   }
   return (a + b) / 2;
 }

@@ -32,14 +32,15 @@ export function analyseStage(topology: AnyTopology, request: AnalysisRequest): A
   const raw = topology.analyse({ parts, conditions: conditions as never }, request.targets);
   const results: Analysis["results"] = {};
   const warnings: Warning[] = [];
-  for (const [key, value] of Object.entries(raw)) {
+  for (const key in raw) {
+    const value = raw[key];
     if (value === undefined) continue;
     if (isFiniteResult(value)) results[key] = value;
     else warnings.push(undefinedResult(topology, key));
   }
   const windows = targetWindows(topology, request.targets ?? {}, request.windows);
   unusualValues(topology, parts, conditions, warnings);
-  warnings.push(...crossedLimits(topology, { parts, conditions, results, windows }));
+  crossedLimits(topology, { parts, conditions, results, windows }, warnings);
   return { results, warnings: bySeverity(warnings), state: targetStates(topology, results, windows) };
 }
 
@@ -62,22 +63,19 @@ function undefinedResult(topology: AnyTopology, key: string): Warning {
 function crossedLimits(
   topology: AnyTopology,
   context: { parts: PlainValues; conditions: PlainConditions; results: Analysis["results"]; windows: Windows },
-): Warning[] {
-  return topology.limits.flatMap((limit: Limit<Parts, Conditions, Results>) => {
-    const found = limit.check({
-      ...context,
-      conditions: context.conditions as never,
-      results: context.results as ResultValues<Results>,
-    });
-    if (!found) return [];
+  warnings: Warning[],
+): void {
+  const checked = context as typeof context & { conditions: never; results: ResultValues<Results> };
+  for (const limit of topology.limits as readonly Limit<Parts, Conditions, Results>[]) {
+    const found = limit.check(checked);
+    if (!found) continue;
     const message = limit.template
       .replaceAll("{value}", formatQuantity(found.value, limit.unit))
       .replaceAll("{limit}", formatQuantity(found.limit, limit.unit))
       .replaceAll("{detail}", found.detail ?? "");
-    return [
-      { code: limit.code, severity: limit.severity, message, value: found.value, limit: found.limit, unit: limit.unit },
-    ];
-  });
+    const { code, severity, unit } = limit;
+    warnings.push({ code, severity, message, value: found.value, limit: found.limit, unit });
+  }
 }
 
 /** Values outside what the trade uses are computed all the same, and said. Plain loops: this runs on every analysis. */
@@ -105,7 +103,8 @@ const partWords: Record<PartClass, string> = { resistor: "Resistor", capacitor: 
 
 function checkUsual(field: NumberField, value: number | undefined, warnings: Warning[], named: () => string): void {
   if (value === undefined) return;
-  const [least, most] = [field.least - Math.abs(field.least) * hair, field.most + Math.abs(field.most) * hair];
+  const least = field.least - Math.abs(field.least) * hair;
+  const most = field.most + Math.abs(field.most) * hair;
   if (value >= least && value <= most) return;
   const limit = value < least ? field.least : field.most;
   const side = value < least ? "below" : "above";

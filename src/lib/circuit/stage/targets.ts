@@ -9,12 +9,13 @@ const closeShare = 0.8;
 
 /** Least and most of each given target: the target by (1 ± window). */
 export function targetWindows(topology: AnyTopology, targets: PlainValues, widths: PlainValues = {}): Windows {
-  return Object.fromEntries(
-    Object.entries(targets).map(([key, target]) => {
-      const width = widths[key] ?? topology.targets[key]!.window;
-      return [key, { least: target * (1 - width), most: target * (1 + width), target }];
-    }),
-  );
+  const windows: Windows = {};
+  for (const key in targets) {
+    const target = targets[key]!;
+    const width = widths[key] ?? topology.targets[key]!.window;
+    windows[key] = { least: target * (1 - width), most: target * (1 + width), target };
+  }
+  return windows;
 }
 
 /** Whether each result lies within its window, close to its edge, or outside. A missing result is outside. */
@@ -23,13 +24,15 @@ export function targetStates(
   results: Record<string, number | readonly number[]>,
   windows: Windows,
 ): Record<string, TargetState> {
-  return Object.fromEntries(
-    Object.entries(windows).map(([key, { least, most, target }]) => {
-      const value = results[topology.targets[key]!.result];
-      if (typeof value !== "number") return [key, "outside"];
-      const share = value >= target ? (value - target) / (most - target) : (target - value) / (target - least);
-      const state: TargetState = share <= closeShare ? "within" : share <= 1 ? "close" : "outside";
-      return [key, Number.isNaN(share) ? "within" : state];
-    }),
-  );
+  const states: Record<string, TargetState> = {};
+  for (const key in windows) states[key] = stateOf(results[topology.targets[key]!.result], windows[key]!);
+  return states;
+}
+
+function stateOf(value: number | readonly number[] | undefined, { least, most, target }: Windows[string]): TargetState {
+  if (typeof value !== "number") return "outside";
+  const share = value >= target ? (value - target) / (most - target) : (target - value) / (target - least);
+  // A window without width that is met exactly.
+  if (Number.isNaN(share) || share <= closeShare) return "within";
+  return share <= 1 ? "close" : "outside";
 }

@@ -1,4 +1,3 @@
-import { add, multiply } from "../../../../network/polynomial.ts";
 import type { Transfer } from "../../../../network/transfer.ts";
 
 /** The network: RA from the input to node x, RB from x to ground, C1 from x to the output, C2 from x to the inverting input, RF from the output to it. */
@@ -49,16 +48,24 @@ export function transferOf({ ra, rb, rf, c1, c2 }: NetworkValues, around: Surrou
   const gIn = 1 / (ra + around.sourceResistance);
   const g = gIn + 1 / rb;
   const gF = 1 / rf;
-  const e = [gF * g, gF * (c1 + c2), c1 * c2];
-  if (around.gainBandwidth === null) return { numerator: [0, -gIn * c2], denominator: e };
-  const sigma = [around.openLoopGain === null ? 0 : 1 / around.openLoopGain, 1 / (2 * Math.PI * around.gainBandwidth)];
+  const [e0, e1, e2] = [gF * g, gF * (c1 + c2), c1 * c2];
+  if (around.gainBandwidth === null) return { numerator: [0, -gIn * c2], denominator: [e0, e1, e2] };
+  const s0 = around.openLoopGain === null ? 0 : 1 / around.openLoopGain;
+  const s1 = 1 / (2 * Math.PI * around.gainBandwidth);
   const ro = around.outputResistance;
   const gL = around.loadResistance === null ? 0 : 1 / around.loadResistance;
-  const n = [c2 * (1 + ro * (gL + gF)) + ro * c1 * gF, ro * c1 * c2];
-  const m = ro === 0 ? [c2] : add([c2], multiply([-ro], sigma, [gF * (c1 + c2), c1 * c2]));
+  const [n0, n1] = [c2 * (1 + ro * (gL + gF)) + ro * c1 * gF, ro * c1 * c2];
+  const [a0, a1] = [1 + (1 + ro * gL) * s0, (1 + ro * gL) * s1];
+  // Multiplied out by hand: this is done three times in every analysis, and at each point of a search.
   return {
-    numerator: multiply([0, -gIn], m),
-    denominator: add(multiply(add([1], multiply([1 + ro * gL], sigma)), e), multiply([0, g], sigma, n)),
+    numerator:
+      ro === 0 ? [0, -gIn * c2] : [0, -gIn * (c2 - ro * s0 * e1), gIn * ro * (s0 * e2 + s1 * e1), gIn * ro * s1 * e2],
+    denominator: [
+      a0 * e0,
+      a0 * e1 + a1 * e0 + g * s0 * n0,
+      a0 * e2 + a1 * e1 + g * (s0 * n1 + s1 * n0),
+      a1 * e2 + g * s1 * n1,
+    ],
   };
 }
 
