@@ -71,6 +71,7 @@ export const keptInputs = z.object({
   stages: z.array(keptStage),
   links: z.array(linkSchema),
   conditions: z.record(z.string(), z.union([z.number(), z.string()])),
+  accepted: z.array(z.object({ stage: z.string(), code: z.string(), reason: z.string(), by: z.string() })).optional(),
 });
 
 export const stageWarningAnswer = warningAnswer.extend({ stage: z.string().meta({ description: "Id of the stage" }) });

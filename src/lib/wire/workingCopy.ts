@@ -1,6 +1,7 @@
 import { stageKinds } from "#lib/circuit/kinds/index.ts";
 import { findIn, linkFaults } from "#lib/circuit/voice/index.ts";
 import { z } from "zod";
+import { oneLine } from "./plainText.ts";
 import { stageSchema, type Stage } from "./stage.ts";
 
 export const mostStages = 500;
@@ -65,6 +66,18 @@ function reportBadLinks({ stages, links }: Chain, report: Report) {
   for (const { index, at, message } of linkFaults(stages, links, find)) report(["links", index, ...at], message);
 }
 
+const acceptanceSchema = z.strictObject({
+  stage: z.string().max(60).meta({ description: "Id of the stage; empty where it is about the whole voice" }),
+  code: word,
+  reason: oneLine(200, "Say in one line why it is meant to stay."),
+  by: oneLine(120, "Say who accepts it."),
+});
+
+const acceptedSchema = z
+  .array(acceptanceSchema)
+  .max(1000)
+  .meta({ description: "What the checks say that was looked at and is meant to stay" });
+
 const format = z.literal(1).meta({ description: "Version of this document's shape" });
 
 /** A voice as it stands on the bench: its stages, what feeds what, and what holds for all of them. */
@@ -74,6 +87,7 @@ export const workingCopyDocument = z
     stages: stageList,
     links: z.array(linkSchema).max(mostLinks),
     conditions: conditionsSchema,
+    accepted: acceptedSchema.optional(),
     // An answer may be sent back as it came: what the server keeps count of is taken and left aside.
     id: z.string().max(60).optional().meta({ description: "Left aside when sent" }),
     createdAt: z.iso.datetime().optional().meta({ description: "Left aside when sent" }),
@@ -105,12 +119,13 @@ export const workingCopyAnswer = z.object({
   stages: z.array(stageSchema),
   links: z.array(linkSchema),
   conditions: conditionsSchema,
+  accepted: acceptedSchema.optional(),
 });
 
 /** What is stored of a working copy. */
 export type WorkingCopyDocument = Pick<
   z.output<typeof workingCopyDocument>,
-  "format" | "stages" | "links" | "conditions"
+  "format" | "stages" | "links" | "conditions" | "accepted"
 >;
 
 export type WorkingCopyAnswer = z.output<typeof workingCopyAnswer>;

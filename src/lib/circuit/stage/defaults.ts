@@ -11,8 +11,16 @@ export function defaultParts(topology: AnyTopology): PlainValues {
 
 /** The conditions of an ideal world, overlaid with those given; a given null switches an optional one off. */
 export function completeConditions(topology: AnyTopology, given: PlainConditions = {}): PlainConditions {
+  return completeFields(topology.conditions, given);
+}
+
+/** The same for conditions that belong to no topology. */
+export function completeFields(
+  fields: Readonly<Record<string, ConditionField>>,
+  given: PlainConditions,
+): PlainConditions {
   const complete: PlainConditions = {};
-  for (const key in topology.conditions) complete[key] = given[key] ?? topology.conditions[key]!.default;
+  for (const key in fields) complete[key] = given[key] ?? fields[key]!.default;
   return complete;
 }
 

@@ -8,7 +8,9 @@ export interface Port {
   label: string;
   sort: PortSort;
   direction: "in" | "out";
-  /** May stay without a link: a jack of the panel, or an input that stands at a voltage of its own. */
+  /** A jack of the panel: linked to the rest of the rack. */
+  jack?: true;
+  /** May stay without a link though it is no jack: one of several ways to use the stage. */
   mayStayOpen?: true;
 }
 

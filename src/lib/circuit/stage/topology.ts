@@ -2,7 +2,8 @@ import type { DeviceClass } from "../device/classes.ts";
 import type { Citation, Formula } from "./citation.ts";
 import type { Curve } from "./curve.ts";
 import type { PlainConditions } from "./defaults.ts";
-import type { Joints, JointState } from "./joint.ts";
+import type { Draw } from "./draw.ts";
+import type { AnalysedState, Joints, JointState } from "./joint.ts";
 import type { Signal } from "./signal.ts";
 import type { Network } from "./network.ts";
 import type {
@@ -95,6 +96,8 @@ export interface Topology<
   devices: readonly Device[];
   /** How the kind's ports meet other stages; where given, a port that is not among them is none of this topology. */
   joints?: Joints;
+  /** What the stage draws from the rails besides what its devices draw at rest. */
+  draws?(state: AnalysedState): Draw[];
   /** Conditions that several inputs decide together: how far the paths of a sum carry the same wave. */
   meets?(inputs: Readonly<Record<string, Signal | undefined>>, state: JointState): PlainConditions;
   /** One row each in the comparison of a kind's topologies: op amps needed, range, what retunes it. */

@@ -26,11 +26,22 @@ export interface DocumentLink {
   to: { stage: string; port: string };
 }
 
+/** Something the checks say of a voice that was looked at and is meant to stay. */
+export interface Acceptance {
+  /** Id of the stage; empty where it is about the whole voice. */
+  stage: string;
+  code: string;
+  reason: string;
+  /** Who says so. */
+  by: string;
+}
+
 /** A voice as it is saved: what working copies and revisions hold. */
 export interface VoiceDocument {
   stages: readonly DocumentStage[];
   links: readonly DocumentLink[];
   conditions: Record<string, number | string>;
+  accepted?: readonly Acceptance[] | undefined;
 }
 
 /** The network of a saved stage; undefined where this version of the library has none of that name. */

@@ -15,3 +15,23 @@ export {
   type ValueGroup,
 } from "./partsList.ts";
 export { shareHints, type ShareHint } from "./sharing.ts";
+export { firstToClip, levelsOf, meetingsOf, type Level, type Meeting } from "./levels.ts";
+export {
+  knobsOf,
+  levelRanges,
+  levelsAtKnobEnds,
+  withKnob,
+  type Knob,
+  type KnobEnds,
+  type LevelRange,
+} from "./knobs.ts";
+export {
+  budgetOf,
+  supplyConditions,
+  supplyOf,
+  type BudgetEntry,
+  type RailBudget,
+  type SupplyBudget,
+  type SupplyConditions,
+} from "./supply.ts";
+export * from "./checks/index.ts";

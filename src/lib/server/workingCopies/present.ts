@@ -11,7 +11,7 @@ export interface PresentedCopy {
 
 export function presentWorkingCopy(row: WorkingCopyRow): PresentedCopy {
   // Only what passed the schema is ever stored.
-  const { format, stages, links, conditions } = row.document as WorkingCopyDocument;
+  const { format, stages, links, conditions, accepted } = row.document as WorkingCopyDocument;
   return {
     etag: etagOf(row.version),
     copy: {
@@ -22,6 +22,7 @@ export function presentWorkingCopy(row: WorkingCopyRow): PresentedCopy {
       stages,
       links,
       conditions,
+      ...(accepted && { accepted }),
     },
   };
 }

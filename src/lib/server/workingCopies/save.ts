@@ -41,11 +41,16 @@ export async function replaceWorkingCopy(
   if (!expected.includes(current.version)) throw staleCopy(current);
 
   const at = ctx.now();
-  const { format, stages, links, conditions } = document;
+  const { format, stages, links, conditions, accepted } = document;
   const version = current.version + 1;
   const [saved] = await tx
     .update(workingCopies)
-    .set({ version, document: { format, stages, links, conditions }, updatedBy: userId, updatedAt: at })
+    .set({
+      version,
+      document: { format, stages, links, conditions, ...(accepted && { accepted }) },
+      updatedBy: userId,
+      updatedAt: at,
+    })
     .where(eq(workingCopies.voiceId, voice.id))
     .returning();
   if (!saved) throw new Error(`the working copy of ${voice.id} vanished while its voice was locked`);

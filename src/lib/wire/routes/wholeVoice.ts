@@ -1,3 +1,4 @@
+import { checkAnswer, checkQuery } from "../check.ts";
 import { partsListAnswer, partsListQuery } from "../partsList.ts";
 import type { Route } from "./route.ts";
 
@@ -5,6 +6,16 @@ const common = { tag: "voices", session: true, parameters: { id: { description: 
 
 /** What is said of a voice as a whole. */
 export const wholeVoiceRoutes: readonly Route[] = [
+  {
+    ...common,
+    method: "POST",
+    path: "/api/voices/{id}/check",
+    operationId: "checkVoice",
+    summary: "Levels, supply and everything that is not right, over the whole voice",
+    query: checkQuery,
+    answers: { 200: { description: "What was found", body: checkAnswer } },
+    problems: [403, 404, 422],
+  },
   {
     ...common,
     method: "GET",

@@ -35,14 +35,16 @@ export const filterJoints = ({ input, output, passive, struck }: Shape): Joints 
       const source = inputs.in as AudioSignal | undefined;
       const { outputRms, ringPeak } = results;
       const rings = inputs.strike !== undefined && typeof ringPeak === "number";
-      const rms = rings ? ringPeak / Math.SQRT2 : outputRms;
+      // Silence in is silence out, though a level of zero is no figure that the filter computes with.
+      const passed = source?.rms === 0 ? 0 : outputRms;
+      const rms = rings ? ringPeak / Math.SQRT2 : passed;
       if (typeof rms !== "number" || (!source && !rings)) return undefined;
       return {
         sort: "audio",
         rms,
         signal: rings ? "sine" : "noise",
         resistance: output?.(parts) ?? 0,
-        floor: source && !rings ? source.floor * (rms / source.rms) : 0,
+        floor: source && !rings && source.rms > 0 ? source.floor * (rms / source.rms) : 0,
         ...(!passive && { clip: swing(conditions) }),
         mix: ownMix(rms),
       };

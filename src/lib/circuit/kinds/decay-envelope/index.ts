@@ -4,7 +4,7 @@ import { analyse, design } from "./analyse.ts";
 import { curves } from "./curves.ts";
 import { conditions, parts, results, targets } from "./fields.ts";
 import { formulas } from "./formulas.ts";
-import { joints } from "./joints.ts";
+import { chargeDraw, joints } from "./joints.ts";
 import { limits } from "./limits.ts";
 import { network } from "./network.ts";
 import { reference } from "./reference.ts";
@@ -27,6 +27,7 @@ const diodeCharged = defineTopology({
   sources,
   network,
   joints,
+  draws: chargeDraw,
   devices: [
     { key: "d1", letter: "D", label: "diode", deviceClass: "small-signal diode" },
     { key: "u1", letter: "U", label: "buffer", deviceClass: "JFET-input op amp, one of two in a package" },

@@ -1,5 +1,17 @@
-import type { Joints } from "../../stage/joint.ts";
+import type { Draw } from "../../stage/draw.ts";
+import type { AnalysedState, Joints } from "../../stage/joint.ts";
 import type { ControlSignal, TriggerSignal } from "../../stage/signal.ts";
+
+/** What charges the capacitor comes from the rail of whatever drives the pulse. */
+export function chargeDraw({ parts, conditions, results }: AnalysedState): Draw[] {
+  const { peakChargeCurrent: current, peakVoltage } = results;
+  if (typeof current !== "number" || typeof peakVoltage !== "number" || current <= 0) return [];
+  const width = conditions.pulseWidth;
+  const pulse = { current, timeConstant: parts.rs! * parts.c!, charge: parts.c! * peakVoltage };
+  return [
+    { label: "envelope", positive: 0, negative: 0, pulse: { ...pulse, ...(typeof width === "number" && { width }) } },
+  ];
+}
 
 /** A pulse in, a decaying voltage out. */
 export const joints: Joints = {

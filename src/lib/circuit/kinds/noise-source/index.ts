@@ -4,7 +4,7 @@ import { analyse, design } from "./analyse.ts";
 import { curves } from "./curves.ts";
 import { conditions, parts, results, targets } from "./fields.ts";
 import { formulas } from "./formulas.ts";
-import { joints } from "./joints.ts";
+import { joints, junctionDraw } from "./joints.ts";
 import { limits } from "./limits.ts";
 import { network } from "./network.ts";
 import { reference } from "./reference.ts";
@@ -27,6 +27,7 @@ const measured = defineTopology({
   sources,
   network,
   joints,
+  draws: junctionDraw,
   devices: [
     { key: "q1", letter: "Q", label: "noise junction", deviceClass: "general-purpose NPN, selected" },
     { key: "u1", letter: "U", label: "first stage", deviceClass: "JFET-input op amp, one of two in a package" },

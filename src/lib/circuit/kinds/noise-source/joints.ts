@@ -1,8 +1,13 @@
-import type { Joints } from "../../stage/joint.ts";
+import type { Draw } from "../../stage/draw.ts";
+import type { AnalysedState, Joints } from "../../stage/joint.ts";
 import { ownMix, type AudioSignal } from "../../stage/signal.ts";
 
 /** Noise bandwidth of one pole over its corner. */
 const onePole = Math.PI / 2;
+
+/** The junction's current runs from the upper rail to ground. */
+export const junctionDraw = ({ results: { junctionCurrent } }: AnalysedState): Draw[] =>
+  typeof junctionCurrent === "number" ? [{ label: "noise junction", positive: junctionCurrent, negative: 0 }] : [];
 
 /** Noise out: the wave that all paths of a voice share. */
 export const joints: Joints = {

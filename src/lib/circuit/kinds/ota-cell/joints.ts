@@ -1,4 +1,5 @@
 import { scaledMix, type AudioSignal, type BiasSignal } from "../../stage/signal.ts";
+import type { Draw } from "../../stage/draw.ts";
 import type { AnalysedState, Joints } from "../../stage/joint.ts";
 import { swingOf } from "./model.ts";
 
@@ -8,6 +9,11 @@ const pinAboveRail = 1.3;
 const mostNoise = 10e-3;
 /** Peak of a sine there that keeps its harmonics at 0.5 %. */
 const mostSine = 13e-3;
+
+/** The bias current passes from the upper rail through the pin to the lower one. */
+export const biasDraw = ({ conditions }: AnalysedState): Draw[] => [
+  { label: "bias", positive: conditions.biasCurrent as number, negative: conditions.biasCurrent as number },
+];
 
 /** Sound and a bias current in, sound out; the output resistance is that of the topology. */
 export const cellJoints = (outputResistance: (parts: Record<string, number>) => number): Joints => ({

@@ -10,7 +10,7 @@ export const outputDriver = defineStageKind({
   place: "audio",
   ports: [
     { id: "in", label: "audio in", sort: "audio", direction: "in" },
-    { id: "out", label: "jack", sort: "audio", direction: "out", mayStayOpen: true },
+    { id: "out", label: "jack", sort: "audio", direction: "out", jack: true },
   ],
   topologies: [inverting, nonInverting],
   telling: ["gain", "headroomDb"],

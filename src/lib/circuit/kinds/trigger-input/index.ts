@@ -9,8 +9,8 @@ export const triggerInput = defineStageKind({
   summary: "Turns a gate, a slow edge or a button into one pulse, and scales the envelope's peak with velocity.",
   place: "trigger and control",
   ports: [
-    { id: "in", label: "trigger in", sort: "trigger", direction: "in", mayStayOpen: true },
-    { id: "velocity", label: "velocity in", sort: "control", direction: "in", mayStayOpen: true },
+    { id: "in", label: "trigger in", sort: "trigger", direction: "in", jack: true },
+    { id: "velocity", label: "velocity in", sort: "control", direction: "in", jack: true },
     { id: "out", label: "pulse out", sort: "trigger", direction: "out" },
   ],
   topologies: [transistorThreshold, comparator],

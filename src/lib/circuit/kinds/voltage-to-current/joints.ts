@@ -1,5 +1,12 @@
-import type { Joint, Joints } from "../../stage/joint.ts";
+import type { Draw } from "../../stage/draw.ts";
+import type { AnalysedState, Joint, Joints } from "../../stage/joint.ts";
 import type { BiasSignal, ControlSignal } from "../../stage/signal.ts";
+
+/** The current comes from the upper rail, through what takes it up, and goes to ground. */
+export const sinkDraw = ({ results: { outputCurrent } }: AnalysedState): Draw[] =>
+  typeof outputCurrent === "number"
+    ? [{ label: "converter, in a hit", positive: outputCurrent, negative: 0, onlyInHits: true }]
+    : [];
 
 /** The envelope in, a current out. */
 export const converterJoints = (asks: NonNullable<Joint["asks"]>): Joints => ({

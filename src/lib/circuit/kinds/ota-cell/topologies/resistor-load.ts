@@ -6,7 +6,7 @@ import { otaCurves } from "../curves.ts";
 import { conditions, inputParts, targets } from "../fields.ts";
 import { inputOf, otaFigures, type OtaStage } from "../figures.ts";
 import { resistorLoadFormulas } from "../formulas.ts";
-import { cellJoints } from "../joints.ts";
+import { biasDraw, cellJoints } from "../joints.ts";
 import { resistorLoadLimits } from "../limits.ts";
 import { attenuation, pairInput, swingOf } from "../model.ts";
 import { resistorLoadNetwork } from "../networks.ts";
@@ -87,6 +87,7 @@ export const resistorLoad = defineTopology({
   network: resistorLoadNetwork,
   // The buffer behind the load.
   joints: cellJoints(() => 0),
+  draws: biasDraw,
   devices: [
     {
       key: "u1",

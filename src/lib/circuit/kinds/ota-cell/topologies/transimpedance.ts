@@ -7,7 +7,7 @@ import { otaCurves } from "../curves.ts";
 import { conditions as shared, inputParts, targets } from "../fields.ts";
 import { inputOf, otaFigures, type OtaStage } from "../figures.ts";
 import { transimpedanceFormulas } from "../formulas.ts";
-import { cellJoints } from "../joints.ts";
+import { biasDraw, cellJoints } from "../joints.ts";
 import { limits as otaLimits } from "../limits.ts";
 import { attenuation, pairInput, twoPoleBandwidth } from "../model.ts";
 import { transimpedanceNetwork } from "../networks.ts";
@@ -89,6 +89,7 @@ export const transimpedance = defineTopology({
   sources,
   network: transimpedanceNetwork,
   joints: cellJoints(() => 0),
+  draws: biasDraw,
   devices: [
     { key: "u1", letter: "U", label: "amplifier cell", deviceClass: "bipolar transconductance amplifier, one of two" },
     { key: "u2", letter: "U", label: "current to voltage", deviceClass: "JFET-input op amp, one of two in a package" },

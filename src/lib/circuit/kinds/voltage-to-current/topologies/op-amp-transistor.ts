@@ -5,7 +5,7 @@ import type { ConditionValues, PartValues, ResultValues } from "../../../stage/v
 import { currentCurve } from "../curves.ts";
 import { driverConditions as conditions, driverResults as results, targets } from "../fields.ts";
 import { driverFormulas } from "../formulas.ts";
-import { converterJoints } from "../joints.ts";
+import { converterJoints, sinkDraw } from "../joints.ts";
 import { driverLimits } from "../limits.ts";
 import {
   collectorEmitterVoltage,
@@ -108,6 +108,7 @@ export const opAmpTransistor = defineTopology({
   network: driverNetwork,
   // The op amp takes no current to speak of.
   joints: converterJoints(() => ({})),
+  draws: sinkDraw,
   devices: [
     { key: "u1", letter: "U", label: "op amp", deviceClass: "JFET-input op amp, one of two in a package" },
     { key: "q1", letter: "Q", label: "pass transistor", deviceClass: "general-purpose NPN" },

@@ -24,6 +24,13 @@ export const comparator = defineTopology({
   formulas,
   sources,
   network,
+  draws: ({ parts: values, conditions: around }) => [
+    {
+      label: "reference divider",
+      positive: (around.railPositive as number) / (values.rr1! + values.rr2!),
+      negative: 0,
+    },
+  ],
   joints: triggerJoints(({ conditions: around }) => around.outputHigh as number),
   devices: [{ key: "u1", letter: "U", label: "comparator", deviceClass: "JFET-input op amp, one of two in a package" }],
   traits: [
