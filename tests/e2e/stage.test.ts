@@ -84,7 +84,7 @@ test("nothing typed is lost to a colleague's save, a lost connection or an expir
   await hydrated(page);
   const address = page.url();
   const copy = `/api${new URL(address).pathname.replace(/\/stages\/.*/, "")}/working-copy`;
-  const input = field(page, /^R\d+ input/);
+  const input = field(page, /^R\d+ strike/);
   const save = page.getByRole("button", { name: "Save stage" });
 
   await input.fill("18k");
@@ -205,7 +205,7 @@ test("a reviewer reads the stage and cannot change it", async () => {
   await page.getByText("As reviewer you read this working copy.").waitFor();
   await hydrated(page);
   expect(await page.getByRole("button", { name: "Save stage" }).count()).toBe(0);
-  expect(await field(page, /input/).isEditable()).toBe(false);
+  expect(await field(page, /^R\d+ strike/).isEditable()).toBe(false);
   expect(consoleErrors).toEqual([]);
   await close();
 });

@@ -1,4 +1,4 @@
-import { evaluate, rescale, squaredMagnitude, type Polynomial } from "./polynomial.ts";
+import { evaluate, multiply, rescale, squaredMagnitude, type Polynomial } from "./polynomial.ts";
 import type { Complex } from "./complex.ts";
 import { findRoots } from "./roots.ts";
 
@@ -12,6 +12,14 @@ export interface Transfer {
 export function magnitudeAt({ numerator, denominator }: Transfer, frequency: number): number {
   const omega = 2 * Math.PI * frequency;
   return sizeAt(numerator, omega) / sizeAt(denominator, omega);
+}
+
+/** H1·H2·… of networks that do not load one another. */
+export function cascade(...stages: readonly Transfer[]): Transfer {
+  return {
+    numerator: multiply(...stages.map(({ numerator }) => numerator)),
+    denominator: multiply(...stages.map(({ denominator }) => denominator)),
+  };
 }
 
 /** |H| in decibels. */

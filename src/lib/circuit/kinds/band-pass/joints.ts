@@ -1,8 +1,6 @@
+import { swingOn, type Rails } from "../../device/opAmp.ts";
 import type { Joints, JointState } from "../../stage/joint.ts";
 import { ownMix, type AudioSignal, type TriggerSignal } from "../../stage/signal.ts";
-
-/** Volts that a usual op-amp output stays away from its rail. From memory. */
-const headroomToRail = 1.5;
 
 interface Shape {
   /** Ω that the source sees, near the centre. */
@@ -45,13 +43,10 @@ export const filterJoints = ({ input, output, passive, struck }: Shape): Joints 
         signal: rings ? "sine" : "noise",
         resistance: output?.(parts) ?? 0,
         floor: source && !rings && source.rms > 0 ? source.floor * (rms / source.rms) : 0,
-        ...(!passive && { clip: swing(conditions) }),
+        ...(!passive && { clip: swingOn(conditions as unknown as Rails) }),
         mix: ownMix(rms),
       };
     },
     bears: ({ resistance }) => ({ loadResistance: resistance ?? null }),
   },
 });
-
-const swing = ({ railPositive, railNegative }: JointState["conditions"]): number =>
-  Math.max(0, Math.min(railPositive as number, -(railNegative as number)) - headroomToRail);

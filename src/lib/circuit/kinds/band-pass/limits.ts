@@ -1,3 +1,5 @@
+import { swingOn } from "../../device/opAmp.ts";
+import { crestOf } from "../../stage/signal.ts";
 import type { Limit } from "../../stage/topology.ts";
 import type { Conditions, Parts } from "../../stage/values.ts";
 import type { outputNoise, potConditions, responseResults, retuneResults, surroundings } from "./fields.ts";
@@ -9,16 +11,6 @@ type SharedLimit<P extends Parts = Parts, C extends Conditions = Pick<SharedCond
   C,
   SharedResults
 >;
-
-/** Volts that a usual op-amp output stays away from its rail. From memory. */
-const headroomToRail = 1.5;
-/** Noise peaks are planned for at four standard deviations; 63 ppm of a Gaussian lie beyond (trade brief 2.14). */
-export const crest = 4;
-
-/** Volts to either side that an op amp on these rails can swing. */
-export function swingOf({ railPositive, railNegative }: { railPositive: number; railNegative: number }): number {
-  return Math.max(0, Math.min(railPositive, -railNegative) - headroomToRail);
-}
 
 /** Capacitors as they are bought and fitted; the source ids are those of `sources.ts`. */
 export const capacitorLimits: readonly SharedLimit[] = [
@@ -56,7 +48,7 @@ export const outputLimits: readonly SharedLimit<Parts, SharedConditions>[] = [
       "Noise peaks of {value} (four times RMS) pass the {limit} that the op amp can swing. Lower the gain or the noise.",
     check: ({ conditions, results }) => {
       if (results.outputRms === undefined) return undefined;
-      const [peak, swing] = [crest * results.outputRms, swingOf(conditions)];
+      const [peak, swing] = [crestOf.noise * results.outputRms, swingOn(conditions)];
       return peak > swing ? { value: peak, limit: swing } : undefined;
     },
   },

@@ -56,26 +56,8 @@ export const targets = {
 } as const;
 
 export const conditions = {
-  outputHigh: condition({
-    label: "Comparator output, high",
-    symbol: "V_oh",
-    unit: "V",
-    default: 10.5,
-    least: 1,
-    most: 12,
-    scale: "linear",
-    accepts: [0.1, 40],
-  }),
-  outputLow: condition({
-    label: "Comparator output, low",
-    symbol: "V_ol",
-    unit: "V",
-    default: -10.5,
-    least: -12,
-    most: -1,
-    scale: "linear",
-    accepts: [-40, -0.1],
-  }),
+  outputHigh: common.outputHigh,
+  outputLow: { ...common.outputLow, most: -1, accepts: [-40, -0.1] },
   restVoltage: condition({
     label: "Resting voltage of the spacing capacitor",
     symbol: "V_0",

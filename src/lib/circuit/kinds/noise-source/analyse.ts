@@ -1,6 +1,8 @@
+import { crestOf } from "../../stage/signal.ts";
+import { swingOn } from "../../device/opAmp.ts";
 import { boltzmann, elementaryCharge } from "../../device/constants.ts";
 import { noiseIntegral } from "../../network/noiseIntegral.ts";
-import type { Transfer } from "../../network/transfer.ts";
+import { cascade, type Transfer } from "../../network/transfer.ts";
 import { deviationsFor, shareBeyond } from "../../numeric/gaussianTail.ts";
 import { solveBracketed } from "../../numeric/solveBracketed.ts";
 import { formatQuantity } from "../../quantity/format.ts";
@@ -11,7 +13,6 @@ import {
   amplifier,
   averagingMeter,
   bandPassTransfer,
-  cascade,
   coupledAmplifier,
   densityOf,
   onePole,
@@ -25,10 +26,6 @@ export type T = typeof targets;
 export type R = typeof results;
 export type SourceState = State<P, C>;
 
-/** Noise peaks are planned for at four standard deviations. */
-export const crest = 4;
-/** Volts that a usual op-amp output stays away from its rail. From memory. */
-const headroomToRail = 1.5;
 /** Gain-bandwidth over gain times band limit that the trade asks for. */
 export const speedMargin = 1.5;
 /** To either side, of noise seen on a scope: outside for a thousandth of the time. */
@@ -53,10 +50,6 @@ export const bandTransferOf = ({ centreFrequency, qualityFactor, peakGain }: Con
 export const gainOf = ({ parts, conditions }: SourceState): number =>
   (parts.rf1 / (parts.r1 + conditions.sourceResistance)) * (parts.rf2 / parts.r2);
 
-/** Swing to either side, V. */
-export const swingOf = ({ railPositive, railNegative }: ConditionValues<C>): number =>
-  Math.max(0, Math.min(railPositive, -railNegative) - headroomToRail);
-
 /** RMS at the board's output, exact for the linear network. */
 export const levelOf = (state: SourceState): number =>
   sourceDensity(state.conditions) * Math.sqrt(noiseIntegral(boardTransfer(state)));
@@ -77,11 +70,11 @@ export function analyse(state: SourceState): ResultValues<R> {
   const density = sourceDensity(conditions) * gain;
   const rms = levelOf(state);
   const spread = 10 ** (conditions.deviceSpread / 20);
-  const swing = swingOf(conditions);
+  const swing = swingOn(conditions);
   return {
     density,
     rms,
-    peak4Sigma: crest * rms,
+    peak4Sigma: crestOf.noise * rms,
     peakToPeak: 2 * scopeDeviations * rms,
     meterReading: averagingMeter * rms,
     rmsLeast: rms / spread,
@@ -90,7 +83,10 @@ export function analyse(state: SourceState): ResultValues<R> {
     gainDb: decibels(gain),
     inverting: 0,
     swing,
-    ...(swing > 0 && { headroomDb: decibels(swing / (crest * rms)), clipProbability: shareBeyond(swing / rms) }),
+    ...(swing > 0 && {
+      headroomDb: decibels(swing / (crestOf.noise * rms)),
+      clipProbability: shareBeyond(swing / rms),
+    }),
     noiseBandwidth: (rms / density) ** 2,
     ...board(state),
     ...band(state, density),
@@ -130,7 +126,7 @@ function band(state: SourceState, density: number): ResultValues<R> {
   return {
     bandRms,
     bandRmsRule: density * peakGain * Math.sqrt(bandNoiseBandwidth),
-    bandPeak4Sigma: crest * bandRms,
+    bandPeak4Sigma: crestOf.noise * bandRms,
     bandNoiseBandwidth,
     statisticalBandwidth,
     hitSpread,

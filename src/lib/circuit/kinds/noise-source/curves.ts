@@ -1,18 +1,18 @@
-import { magnitudeAt } from "../../network/transfer.ts";
+import { swingOn } from "../../device/opAmp.ts";
+import { crestOf } from "../../stage/signal.ts";
+import { cascade, magnitudeAt } from "../../network/transfer.ts";
 import { shareBeyond } from "../../numeric/gaussianTail.ts";
 import type { Curve } from "../../stage/curve.ts";
 import {
   bandLevelOf,
   bandTransferOf,
   boardTransfer,
-  crest,
   hitSpreadOf,
   levelOf,
   sourceDensity,
-  swingOf,
   type SourceState,
 } from "./analyse.ts";
-import { bandPassTransfer, cascade, spreadRule } from "./model.ts";
+import { bandPassTransfer, spreadRule } from "./model.ts";
 
 const positive = [Number.MIN_VALUE, Number.MAX_VALUE] as const;
 const decibels = (ratio: number) => 20 * Math.log10(ratio);
@@ -48,7 +48,7 @@ export const curves: readonly Curve<SourceState>[] = [
       return [{ id: "now", label: "board", at: (level) => shareBeyond(level / rms) }];
     },
     mark: (state) => ({
-      x: Math.min(swingOf(state.conditions) || crest * levelOf(state), crest * levelOf(state)),
+      x: Math.min(swingOn(state.conditions) || crestOf.noise * levelOf(state), crestOf.noise * levelOf(state)),
       label: "peaks planned for",
     }),
   },

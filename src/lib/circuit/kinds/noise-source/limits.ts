@@ -1,5 +1,6 @@
 import type { Limit } from "../../stage/topology.ts";
-import { crest, type C, type P, type R } from "./analyse.ts";
+import { crestOf } from "../../stage/signal.ts";
+import type { C, P, R } from "./analyse.ts";
 
 /** What the rail should stand above the breakdown, V. */
 const railMargin = 3;
@@ -59,7 +60,7 @@ export const limits: readonly Limit<P, C, R>[] = [
     template:
       "With a loud device peaks reach {value}, past the {limit} that the op amps can swing: leave room for a trim, or select the device.",
     check: ({ results }) => {
-      const peak = crest * results.rmsMost!;
+      const peak = crestOf.noise * results.rmsMost!;
       const clips = results.peak4Sigma! > results.swing!;
       return results.swing! > 0 && !clips && peak > results.swing! ? { value: peak, limit: results.swing! } : undefined;
     },

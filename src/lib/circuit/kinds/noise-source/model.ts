@@ -1,14 +1,5 @@
 import { minus, plus, reciprocal, times, type Complex } from "../../network/complex.ts";
-import { multiply } from "../../network/polynomial.ts";
 import type { Transfer } from "../../network/transfer.ts";
-
-/** H1·H2·… of stages that do not load one another. */
-export function cascade(...stages: readonly Transfer[]): Transfer {
-  return {
-    numerator: multiply(...stages.map(({ numerator }) => numerator)),
-    denominator: multiply(...stages.map(({ denominator }) => denominator)),
-  };
-}
 
 /** 1/(1 + s/ω_c): the band limit of the source, Hz. */
 export const onePole = (corner: number): Transfer => ({

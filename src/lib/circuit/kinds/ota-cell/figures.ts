@@ -1,3 +1,5 @@
+import { electricalAngle } from "../../parts/electricalAngle.ts";
+import { crestOf } from "../../stage/signal.ts";
 import { currentShare, smallSignalTransconductance } from "../../device/ota.ts";
 import type { ConditionValues, ResultValues } from "../../stage/values.ts";
 import type { conditions } from "./fields.ts";
@@ -17,10 +19,6 @@ import type { results } from "./results.ts";
 export type C = typeof conditions;
 export type R = typeof results;
 
-/** Noise peaks are planned for at four standard deviations; 63 ppm of a Gaussian lie beyond. */
-const crest = 4;
-/** Degrees of electrical travel of a usual trimmer. From memory. */
-const electricalAngle = 270;
 const audioPole = 20e3;
 
 export interface OtaStage {
@@ -43,7 +41,7 @@ export function inputOf(parts: { rin: number; rsh: number }, given: ConditionVal
 /** Peak and RMS behind the divider; undefined without a source level. */
 export function levelsOf(input: InputNetwork, { signal, sourcePeak, sourceRms }: ConditionValues<C>) {
   const k = attenuation(input);
-  const factor = signal === "noise" ? crest : Math.SQRT2;
+  const factor = crestOf[signal];
   const peakFirst = signal === "sine" ? sourcePeak !== null : sourceRms === null;
   if (sourcePeak === null && sourceRms === null) return undefined;
   const rms = peakFirst ? sourcePeak! / factor : sourceRms!;

@@ -1,7 +1,7 @@
 import { scaledMix, type AudioSignal, type BiasSignal } from "../../stage/signal.ts";
 import type { Draw } from "../../stage/draw.ts";
 import type { AnalysedState, Joints } from "../../stage/joint.ts";
-import { swingOf } from "./model.ts";
+import { swingOn, type Rails } from "../../device/opAmp.ts";
 
 /** Volts that the bias pin stands above the negative rail: 1.2 to 1.4. From memory. */
 const pinAboveRail = 1.3;
@@ -52,7 +52,7 @@ function soundOf({ conditions, results, inputs }: AnalysedState, resistance: num
     resistance,
     // Between hits: what the rest current still lets through, and the cell's own noise at that current.
     floor: Math.hypot(source.rms * gain * openness, numberOr(noiseRms, 0) * Math.sqrt(openness)),
-    clip: Math.min(ceiling, swingOf(conditions.railPositive as number, conditions.railNegative as number)),
+    clip: Math.min(ceiling, swingOn(conditions as unknown as Rails)),
     mix: scaledMix(source.mix, inverting === 1 ? -bent : bent),
     ...(source.bandwidth !== undefined && { bandwidth: source.bandwidth }),
     ...(typeof inputRms === "number" && {

@@ -1,7 +1,7 @@
 import type { Limit } from "../../stage/topology.ts";
 import type { Parts, ResultValues } from "../../stage/values.ts";
 import type { C, R } from "./figures.ts";
-import { swingOf } from "./model.ts";
+import { swingOn } from "../../device/opAmp.ts";
 import type { resistorLoadResults } from "./results.ts";
 
 const mostSineDistortion = 5e-3;
@@ -101,7 +101,7 @@ export const limits: readonly OtaLimit[] = [
     template:
       "The ceiling of {value} lies above the {limit} that the op amp behind can swing: the op amp is the clipper. Lower the resistor that sets the gain.",
     check: ({ conditions, results: { ceiling } }) => {
-      const swing = swingOf(conditions.railPositive, conditions.railNegative);
+      const swing = swingOn(conditions);
       return ceiling! > swing ? { value: ceiling!, limit: swing } : undefined;
     },
   },

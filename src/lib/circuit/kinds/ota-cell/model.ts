@@ -65,10 +65,3 @@ export function twoPoleBandwidth(first: number, second: number): number {
   const [a, b] = [1 / first ** 2, 1 / second ** 2];
   return Math.sqrt(2 / (a + b + Math.sqrt((a + b) ** 2 + 4 * a * b)));
 }
-
-/** Volts that a usual op-amp output stays away from its rail. From memory. */
-const headroomToRail = 1.5;
-
-/** Swing of an op amp on these rails, V either way. */
-export const swingOf = (railPositive: number, railNegative: number) =>
-  Math.max(0, Math.min(railPositive, -railNegative) - headroomToRail);

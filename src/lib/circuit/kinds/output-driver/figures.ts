@@ -1,4 +1,6 @@
 import { boltzmann } from "../../device/constants.ts";
+import { swingOn } from "../../device/opAmp.ts";
+import { crestOf } from "../../stage/signal.ts";
 import { shareBeyond } from "../../numeric/gaussianTail.ts";
 import type { ConditionValues, ResultValues } from "../../stage/values.ts";
 import type { conditions, results } from "./fields.ts";
@@ -7,10 +9,6 @@ import type { Jack } from "./model.ts";
 export type C = typeof conditions;
 export type R = typeof results;
 
-/** Volts that a usual op-amp output stays away from its rail. From memory. */
-const headroomToRail = 1.5;
-/** Peaks over RMS: noise is planned for at four standard deviations, beyond which 63 ppm of a Gaussian lie. */
-const crest = { noise: 4, sine: Math.SQRT2 } as const;
 /** 0 dBu: 1 mW into 600 Ω, V. */
 const zeroDbu = Math.sqrt(0.6);
 
@@ -31,12 +29,12 @@ export interface Amplifier {
 
 /** Swing to either side, V. */
 export function swingOf({ railPositive, railNegative, elementDrop }: ConditionValues<C>): number {
-  return Math.max(0, Math.min(railPositive, -railNegative) - elementDrop - headroomToRail);
+  return swingOn({ railPositive: railPositive - elementDrop, railNegative: railNegative + elementDrop });
 }
 
 /** Peaks of the signal at the op amp's output, V. */
 export function peakOf(gain: number, { signal, sourceRms }: ConditionValues<C>): number {
-  return crest[signal] * sourceRms * gain;
+  return crestOf[signal] * sourceRms * gain;
 }
 
 export function figuresOf(
@@ -74,9 +72,9 @@ export function figuresOf(
 
 function headroom(swing: number, peak: number, signal: "noise" | "sine"): ResultValues<R> {
   return {
-    largestRms: swing / crest[signal],
+    largestRms: swing / crestOf[signal],
     headroomDb: 20 * Math.log10(swing / peak),
-    clipProbability: signal === "noise" ? shareBeyond((crest.noise * swing) / peak) : peak > swing ? 1 : 0,
+    clipProbability: signal === "noise" ? shareBeyond((crestOf.noise * swing) / peak) : peak > swing ? 1 : 0,
   };
 }
 

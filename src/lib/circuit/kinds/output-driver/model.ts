@@ -1,5 +1,5 @@
 import { add, multiply, type Polynomial } from "../../network/polynomial.ts";
-import type { Transfer } from "../../network/transfer.ts";
+import { cascade, type Transfer } from "../../network/transfer.ts";
 
 /** 1/A(s) of the op amp, constant term first; zeros for an ideal one. */
 export interface OpAmp {
@@ -69,12 +69,4 @@ export function jackTransfer({ ro, cout, load, cable }: Jack): Transfer {
   if (load === 0 && cable === 0) return { numerator: [1], denominator: [1] };
   if (cout === 0) return { numerator: [1], denominator: [1 + ro * load, ro * cable] };
   return { numerator: [0, cout], denominator: add([0, cout], multiply([1, ro * cout], [load, cable])) };
-}
-
-/** One response after another that does not load it. */
-export function cascade(first: Transfer, second: Transfer): Transfer {
-  return {
-    numerator: multiply(first.numerator, second.numerator),
-    denominator: multiply(first.denominator, second.denominator),
-  };
 }

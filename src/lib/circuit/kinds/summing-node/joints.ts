@@ -1,10 +1,9 @@
+import { headroomToRail } from "../../device/opAmp.ts";
 import { correlationOf, scaledMix, sumOfWaves, type AudioSignal, type Signal } from "../../stage/signal.ts";
 import type { AnalysedState, Joint, Joints, JointState } from "../../stage/joint.ts";
 import type { PlainConditions } from "../../stage/defaults.ts";
 import { paths } from "./fields.ts";
 
-/** Volts that a usual op-amp output stays away from its rail. From memory. */
-const headroomToRail = 1.5;
 /** The rails are no condition of this stage; those of the trade. */
 const usualRail = 12;
 

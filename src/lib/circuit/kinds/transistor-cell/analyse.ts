@@ -1,3 +1,4 @@
+import { crestOf } from "../../stage/signal.ts";
 import { thermalVoltage } from "../../device/constants.ts";
 import { shareAbove } from "../../numeric/gaussianTail.ts";
 import { solveBracketed } from "../../numeric/solveBracketed.ts";
@@ -12,9 +13,6 @@ export type C = typeof conditions;
 export type T = typeof targets;
 export type R = typeof results;
 export type CellState = State<P, C>;
-
-/** Noise peaks are planned for at four standard deviations. */
-export const crest = 4;
 
 function cellOf({ parts, conditions }: CellState, supply: number, collector: number): Cell {
   return {
@@ -82,7 +80,7 @@ export function analyse(state: CellState): ResultValues<R> {
     ...simpleLaw(state, got),
     bleedRms: bleed,
     ...(bleed > 0 && got.rms > 0 && { bleedDb: 20 * Math.log10(bleed / got.rms) }),
-    baseLowest: ((-crest * sourceRms - got.selfBias) * parts.rb) / (parts.rb + base),
+    baseLowest: ((-crestOf.noise * sourceRms - got.selfBias) * parts.rb) / (parts.rb + base),
     inputCorner: 1 / (2 * Math.PI * parts.ci * (base + parts.rb)),
     outputCorner: 1 / (2 * Math.PI * parts.co * (parts.rc + parts.ro)),
   };
@@ -108,7 +106,7 @@ function swingOf({ cell, selfBias }: Average & { cell: Cell }, sigma: number): n
     const off = (vb: number) => pointAt(cell, vb).drive - drive;
     return pointAt(cell, off(high) <= 0 ? high : solveBracketed(off, low, high, 1e-12)).collector;
   };
-  return collectorAt(-crest * sigma - selfBias) - collectorAt(crest * sigma - selfBias);
+  return collectorAt(-crestOf.noise * sigma - selfBias) - collectorAt(crestOf.noise * sigma - selfBias);
 }
 
 /** Resistances tried for the base resistor, Ω. */

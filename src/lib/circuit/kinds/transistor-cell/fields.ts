@@ -97,7 +97,7 @@ export const conditions = {
     help: "RMS of Gaussian noise.",
   }),
   sourceResistance: common.sourceResistance,
-  beta: condition({ label: "Current gain", symbol: "β", unit: "", default: 200, least: 50, most: 600 }),
+  beta: { ...common.beta, default: 200, help: "Collector over base current where it works." },
   reverseBeta: condition({
     label: "Reverse current gain",
     symbol: "β_R",
@@ -107,14 +107,7 @@ export const conditions = {
     most: 20,
     help: "Decides how far the collector falls when saturated.",
   }),
-  saturationCurrent: condition({
-    label: "Transistor saturation current",
-    symbol: "I_S",
-    unit: "A",
-    default: 1e-14,
-    least: 1e-16,
-    most: 1e-12,
-  }),
+  saturationCurrent: common.transistorSaturationCurrent,
   baseEmitterVoltage: condition({
     label: "Base-emitter voltage, for the simple law",
     symbol: "V_BE",

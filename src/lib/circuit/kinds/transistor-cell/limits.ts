@@ -1,5 +1,6 @@
 import type { Limit } from "../../stage/topology.ts";
-import { crest, type C, type P, type R } from "./analyse.ts";
+import { crestOf } from "../../stage/signal.ts";
+import type { C, P, R } from "./analyse.ts";
 
 /** Reverse voltage that a base-emitter junction stands. */
 const reverseLimit = 5;
@@ -24,7 +25,7 @@ export const limits: readonly Limit<P, C, R>[] = [
     template:
       "Noise peaks of {value} (four times RMS) stay under the {limit} that turns the transistor on: the cell is all but silent. Raise the drive.",
     check: ({ conditions, results: { onVoltage } }) => {
-      const peak = crest * conditions.sourceRms;
+      const peak = crestOf.noise * conditions.sourceRms;
       return peak < onVoltage! ? { value: peak, limit: onVoltage! } : undefined;
     },
   },

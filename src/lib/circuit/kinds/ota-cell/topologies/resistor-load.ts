@@ -8,7 +8,8 @@ import { inputOf, otaFigures, type OtaStage } from "../figures.ts";
 import { resistorLoadFormulas } from "../formulas.ts";
 import { biasDraw, cellJoints } from "../joints.ts";
 import { resistorLoadLimits } from "../limits.ts";
-import { attenuation, pairInput, swingOf } from "../model.ts";
+import { swingOn } from "../../../device/opAmp.ts";
+import { attenuation, pairInput } from "../model.ts";
 import { resistorLoadNetwork } from "../networks.ts";
 import { resistorLoadResults as results } from "../results.ts";
 import { sources } from "../sources.ts";
@@ -66,7 +67,7 @@ export const resistorLoad = defineTopology({
   analyse: (state) => ({
     ...otaFigures(stageOf(state), state.conditions),
     outputSlew: state.conditions.biasCurrent / state.parts.cl,
-    largestLoad: swingOf(state.conditions.railPositive, state.conditions.railNegative) / state.conditions.biasCurrent,
+    largestLoad: swingOn(state.conditions) / state.conditions.biasCurrent,
   }),
   design: ({ targets: { gain }, conditions: given, given: decided }) => {
     const rin = decided.rin ?? parts.rin.default;

@@ -1,3 +1,4 @@
+import { cascade } from "../../../network/transfer.ts";
 import { defineTopology } from "../../../stage/topology.ts";
 import type { PartValues, State } from "../../../stage/values.ts";
 import { driverCurves } from "../curves.ts";
@@ -7,7 +8,7 @@ import { figuresOf, type Amplifier, type C } from "../figures.ts";
 import { formulasFor } from "../formulas.ts";
 import { driverJoints } from "../joints.ts";
 import { limits } from "../limits.ts";
-import { cascade, invertingTransfer, jackTransfer } from "../model.ts";
+import { invertingTransfer, jackTransfer } from "../model.ts";
 import { invertingNetwork } from "../networks.ts";
 import { sources } from "../sources.ts";
 

@@ -1,3 +1,4 @@
+import { cascade } from "../../../network/transfer.ts";
 import { resistor } from "../../../stage/fields.ts";
 import { defineTopology, type DesignRefusal, type DesignRequest, type Limit } from "../../../stage/topology.ts";
 import type { PartValues, State } from "../../../stage/values.ts";
@@ -8,7 +9,7 @@ import { figuresOf, type Amplifier, type C, type R } from "../figures.ts";
 import { formulasFor } from "../formulas.ts";
 import { driverJoints } from "../joints.ts";
 import { limits } from "../limits.ts";
-import { cascade, jackTransfer, nonInvertingTransfer } from "../model.ts";
+import { jackTransfer, nonInvertingTransfer } from "../model.ts";
 import { nonInvertingNetwork } from "../networks.ts";
 import { sources } from "../sources.ts";
 

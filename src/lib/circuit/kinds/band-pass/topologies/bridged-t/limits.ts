@@ -1,5 +1,6 @@
+import { swingOn } from "../../../../device/opAmp.ts";
 import type { Limit } from "../../../../stage/topology.ts";
-import { capacitorLimits, outputLimits, retuneLimit, sourceLimit, swingOf } from "../../limits.ts";
+import { capacitorLimits, outputLimits, retuneLimit, sourceLimit } from "../../limits.ts";
 import { withRheostat } from "../../model.ts";
 import type { C, P, R } from "./analyse.ts";
 
@@ -45,7 +46,7 @@ export const limits: readonly Limit<P, C, R>[] = [
     template:
       "The struck ring would reach {value}, past the {limit} that the op amp can swing: it clips. Strike it lower or shorter, or raise R_in.",
     check: ({ conditions, results: { ringPeak } }) => {
-      const swing = swingOf(conditions);
+      const swing = swingOn(conditions);
       return ringPeak !== undefined && ringPeak > swing ? { value: ringPeak, limit: swing } : undefined;
     },
   },

@@ -1,13 +1,7 @@
+import { swingOn } from "../../../../device/opAmp.ts";
+import { crestOf } from "../../../../stage/signal.ts";
 import type { Limit } from "../../../../stage/topology.ts";
-import {
-  capacitorLimits,
-  crest,
-  oscillationLimit,
-  outputLimits,
-  retuneLimit,
-  sourceLimit,
-  swingOf,
-} from "../../limits.ts";
+import { capacitorLimits, oscillationLimit, outputLimits, retuneLimit, sourceLimit } from "../../limits.ts";
 import type { C, P, R } from "./analyse.ts";
 
 const source = "two-integrator-derivation";
@@ -75,7 +69,7 @@ export const limits: readonly Limit<P, C, R>[] = [
       "Noise peaks of {value} (four times RMS) at the {detail} output pass the {limit} that an op amp can swing, while the band-pass output may look fine. Lower the level or Q.",
     check: ({ conditions, results: { highPassRms, lowPassRms } }) => {
       if (highPassRms === undefined || lowPassRms === undefined) return undefined;
-      const [peak, swing] = [crest * Math.max(highPassRms, lowPassRms), swingOf(conditions)];
+      const [peak, swing] = [crestOf.noise * Math.max(highPassRms, lowPassRms), swingOn(conditions)];
       const detail = highPassRms > lowPassRms ? "high-pass" : "low-pass";
       return peak > swing ? { value: peak, limit: swing, detail } : undefined;
     },

@@ -1,3 +1,4 @@
+import { common } from "../../../../stage/commonConditions.ts";
 import { condition, resistor, target, type ResultField } from "../../../../stage/fields.ts";
 import { inputConditions, inputResults, thresholdTarget } from "../../fields.ts";
 
@@ -39,26 +40,8 @@ export const targets = {
 
 export const conditions = {
   ...inputConditions,
-  outputHigh: condition({
-    label: "Output, high",
-    symbol: "V_oh",
-    unit: "V",
-    default: 10.5,
-    least: 1,
-    most: 12,
-    scale: "linear",
-    accepts: [0.1, 40],
-  }),
-  outputLow: condition({
-    label: "Output, low",
-    symbol: "V_ol",
-    unit: "V",
-    default: -10.5,
-    least: -12,
-    most: 0,
-    scale: "linear",
-    accepts: [-40, 0],
-  }),
+  outputHigh: common.outputHigh,
+  outputLow: common.outputLow,
   gateLength: condition({
     label: "Gate length",
     symbol: "t_g",

@@ -1,3 +1,4 @@
+import { common } from "../../../../stage/commonConditions.ts";
 import { capacitor, choice, condition, resistor, target, type ResultField } from "../../../../stage/fields.ts";
 import { inputConditions, inputResults, thresholdTarget } from "../../fields.ts";
 
@@ -88,25 +89,11 @@ export const conditions = {
     scale: "linear",
     accepts: [0.1, 1.5],
   }),
-  beta: condition({
-    label: "Current gain",
-    symbol: "β",
-    unit: "",
-    default: null,
-    least: 50,
-    most: 600,
-    suggestion: 100,
-    help: "Left out, the transistor takes no base current.",
-  }),
-  saturationCurrent: condition({
-    label: "Transistor saturation current",
-    symbol: "I_S",
-    unit: "A",
-    default: 1e-14,
-    least: 1e-16,
-    most: 1e-12,
+  beta: common.beta,
+  saturationCurrent: {
+    ...common.transistorSaturationCurrent,
     help: "For the thresholds at which the collector current has a given value.",
-  }),
+  },
   clamp: choice({
     label: "Clamp diode at the base",
     symbol: "",
