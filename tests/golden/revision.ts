@@ -25,12 +25,19 @@ export function recompute(topology: AnyTopology, { parts, conditions, targets }:
 
 /** Far below what any screen shows, and above what a newer JavaScript engine's rounding may move. */
 const sameWithin = 1e-10;
+/** What rounding leaves where the exact figure is nothing. */
+const nothing = 1e-12;
 
 /** The results that are no longer what was saved: moved, gone or new. */
 export function differences(was: GoldenRevision["results"], now: GoldenRevision["results"]): string[] {
   const numbers = (value: number | readonly number[] | undefined) => [value ?? []].flat();
   return [...new Set([...Object.keys(was), ...Object.keys(now)])].filter((key) => {
     const [a, b] = [numbers(was[key]), numbers(now[key])];
-    return a.length !== b.length || a.some((x, i) => Math.abs(x - b[i]!) > sameWithin * Math.abs(x));
+    return a.length !== b.length || a.some((x, i) => !same(x, b[i]!));
   });
+}
+
+function same(was: number, now: number): boolean {
+  const apart = Math.abs(now - was);
+  return apart <= sameWithin * Math.abs(was) || (Math.min(Math.abs(was), Math.abs(now)) === 0 && apart < nothing);
 }

@@ -11,6 +11,15 @@ export type R = typeof results;
 /** A hundredth of the peak current: 40 dB down, where a decay fades into the noise. */
 const tailShare = 0.01;
 
+/** What solving the junctions to the last digit leaves of two equal currents, relative. */
+const rounding = 1e-11;
+
+/** By how much one ratio lies above another, relative; nothing where only rounding tells them apart. */
+function excess(ratio: number, over: number): number {
+  const error = ratio / over - 1;
+  return Math.abs(error) < rounding ? 0 : error;
+}
+
 export type Surroundings = ConditionValues<C> & Partial<Pick<ConditionValues<SharedC>, "outputs" | "baseHelper">>;
 
 export function worldOf(given: Surroundings): MirrorWorld {
@@ -65,18 +74,18 @@ export function mirrorFigures(world: MirrorWorld, shape: MirrorShape): ResultVal
     ...always,
     outputCurrent: point.outputCurrent,
     ratio,
-    ratioError: ratio / nominal - 1,
-    baseCurrentError: world.beta === Infinity ? 0 : ratioOf({ ...ideal, beta: world.beta }) / idealRatio - 1,
+    ratioError: excess(ratio, nominal),
+    baseCurrentError: world.beta === Infinity ? 0 : excess(ratioOf({ ...ideal, beta: world.beta }), idealRatio),
     earlyError:
-      world.earlyVoltage === Infinity ? 0 : ratioOf({ ...ideal, earlyVoltage: world.earlyVoltage }) / idealRatio - 1,
-    mismatchError: world.mismatch === 0 ? 0 : ratio / ratioOf({ ...world, mismatch: 0 }) - 1,
-    junctionError: idealRatio / nominal - 1,
+      world.earlyVoltage === Infinity ? 0 : excess(ratioOf({ ...ideal, earlyVoltage: world.earlyVoltage }), idealRatio),
+    mismatchError: world.mismatch === 0 ? 0 : excess(ratio, ratioOf({ ...world, mismatch: 0 })),
+    junctionError: excess(idealRatio, nominal),
     ...(resistance < Infinity && { outputResistance: resistance }),
     ...(textbook < Infinity && { textbookOutputResistance: textbook }),
     collectorEmitterVoltage: point.collectorEmitter,
     dissipation: point.collectorEmitter * point.outputCurrent,
-    tailError: tailRatio / nominal - 1,
-    tailBendDb: 20 * Math.abs(Math.log10(tailRatio / ratio)),
+    tailError: excess(tailRatio, nominal),
+    tailBendDb: (20 / Math.LN10) * Math.abs(Math.log1p(excess(tailRatio, ratio))),
   };
 }
 
