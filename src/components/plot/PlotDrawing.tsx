@@ -9,10 +9,12 @@ interface PlotDrawingProps {
   palette?: PlotPalette;
   /** Writes name and legend into the drawing: for a file that stands alone. */
   alone?: boolean;
+  /** Which x the readout stands at. */
+  at?: number | null;
 }
 
 /** A plot as plain SVG: what the server sends, what a file holds, and what stands until the interactive plot has loaded. */
-export function PlotDrawing({ model, room, palette = pagePalette, alone = false }: PlotDrawingProps) {
+export function PlotDrawing({ model, room, palette = pagePalette, alone = false, at = null }: PlotDrawingProps) {
   const clip = useId();
   const { x, y, width, height } = placing(model, room);
   const right = margins.left + width;
@@ -48,6 +50,9 @@ export function PlotDrawing({ model, room, palette = pagePalette, alone = false 
           .map((line, i) => <PlotMarks key={line.id} model={model} room={room} palette={palette} index={i} />)
           .reverse()}
       </g>
+      {at !== null && model.xs[at] !== undefined && (
+        <line x1={x(model.xs[at])} x2={x(model.xs[at])} y1={margins.top} y2={foot} stroke={palette.ink} />
+      )}
       {model.mark && (
         <circle
           cx={x(model.mark.x)}

@@ -32,6 +32,10 @@ export function PlotMarks({ model, room, palette, index }: PlotMarksProps & { in
     if (index === 0) return <path d={at} stroke={colour} strokeWidth={2 * dotSize} strokeLinecap="round" />;
     return <path d={at.replaceAll("h0", crossed)} stroke={colour} strokeWidth="1.3" />;
   }
+  if (line.drawn === "edge")
+    return (
+      <path d={pathOf(model.xs, line.ys, x, y)} stroke={colourOf(palette, 0)} strokeDasharray={edgeDash[index % 2]} />
+    );
   return (
     <path
       d={pathOf(model.xs, line.ys, x, y)}
@@ -46,6 +50,9 @@ export function PlotMarks({ model, room, palette, index }: PlotMarksProps & { in
 
 const arm = dotSize * 1.3;
 const crossed = `m${-arm} ${-arm}l${2 * arm} ${2 * arm}m${-2 * arm} 0l${2 * arm} ${-2 * arm}`;
+
+/** The lower and the upper edge of an area. */
+export const edgeDash = ["5 3", "1.5 2.5"];
 
 /** The stretch between two lines, filled. */
 export function PlotArea({ model, room, palette }: PlotMarksProps) {

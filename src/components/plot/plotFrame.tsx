@@ -1,5 +1,6 @@
 import { useEffect, useState, type KeyboardEvent, type RefObject } from "react";
 import { colourOf, dashOf, pagePalette, strokeOf } from "./palette.ts";
+import { edgeDash } from "./PlotMarks.tsx";
 import { readoutText, type PlotLine, type PlotModel } from "./plotModel.ts";
 
 export function Legend({ model }: { model: PlotModel }) {
@@ -20,6 +21,8 @@ export function Legend({ model }: { model: PlotModel }) {
 /** What a line looks like on the plot. */
 function Sample({ drawn, index }: { drawn: PlotLine["drawn"]; index: number }) {
   const colour = colourOf(pagePalette, index);
+  if (drawn === "edge")
+    return <path d="M0 4h12" stroke={colourOf(pagePalette, 0)} strokeDasharray={edgeDash[index % 2]} />;
   if (drawn === "bars") return <rect width="10" height="8" fill={colour} fillOpacity="0.55" />;
   if (drawn === "dots" && index === 0) return <circle cx="5" cy="4" r="2.6" fill={colour} />;
   if (drawn === "dots") return <path d="M2 1l6 6M8 1l-6 6" stroke={colour} strokeWidth="1.4" />;

@@ -25,8 +25,8 @@ export interface PlotLine {
   label: string;
   /** At each x of the plot; null where the curve has no value. */
   ys: (number | null)[];
-  /** Left out, a line. Bars stand on zero and fill the step between one x and the next. */
-  drawn?: "dots" | "bars";
+  /** Left out, a line. Bars stand on zero and fill the step between one x and the next; an edge bounds an area. */
+  drawn?: "dots" | "bars" | "edge";
 }
 
 /** A curve as it is drawn: figures in the units that people read (degrees of rotation, not shares). */
@@ -81,7 +81,7 @@ export function plotModel(
     id: curve.id,
     name: curve.name,
     x: axisOf(curve.x, scaled(stretch, factor), xRoom(room), true),
-    y: yAxis(curve.y, values, window?.y, Math.max(3, Math.floor(room.height / 52))),
+    y: yAxis(curve.y, values, window?.y, yRoom(room)),
     xs: plainXs.map((x) => x * factor),
     lines,
     ...(window && { window }),
@@ -99,6 +99,7 @@ function withMark(xs: number[], mark: number | undefined): number[] {
 const finite = (value: number) => (Number.isFinite(value) ? value : null);
 export const scaled = ([a, b]: readonly [number, number], factor: number): [number, number] => [a * factor, b * factor];
 export const xRoom = ({ width }: PlotRoom) => Math.max(3, Math.floor(width / 62));
+export const yRoom = ({ height }: PlotRoom) => Math.max(3, Math.floor(height / 52));
 
 function markOf(curve: PlotCurve, state: never, factor: number, yFactor: number): Pick<PlotModel, "mark"> {
   const mark = curve.mark?.(state);

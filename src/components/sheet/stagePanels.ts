@@ -2,6 +2,7 @@ import type { ComponentType } from "react";
 import type { AnyTopology, PlainValues } from "#lib/circuit/index.ts";
 import type { KindBrief } from "#lib/wire/kindBrief.ts";
 import type { StageState } from "#lib/wire/stageState.ts";
+import { later } from "../page/later.tsx";
 
 /** What every panel is told, anew with each change on the sheet. */
 export interface StagePanelProps {
@@ -28,4 +29,13 @@ export interface StagePanel {
 }
 
 /** What every stage sheet offers below its results, in this order. Adding one: its component and a line here. */
-export const stagePanels: readonly StagePanel[] = [];
+export const stagePanels: readonly StagePanel[] = [
+  {
+    id: "spread",
+    name: "Spread and yield",
+    says: "How far boards stray with the tolerances of their parts, how many of them are good, and what would make more so.",
+    View: later(() => import("../spread/SpreadPanel.tsx").then((module) => module.SpreadPanel), {
+      waiting: "Loading the spread…",
+    }),
+  },
+];
