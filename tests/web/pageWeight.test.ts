@@ -4,8 +4,12 @@ import { startApp, type RunningApp } from "../support/app.ts";
 import { clientOf, signIn, type SignedIn } from "../support/client.ts";
 import { gzipSize, loadedChunks, reached, scriptsOf, type LoadedChunk } from "../support/pageScripts.ts";
 
-/** Bytes of compressed script: what comes before any plot is near the screen, and all a page can ask for. */
-const most = { first: 120_000, all: 260_000 };
+/**
+ * Bytes of compressed script: what comes before any plot is near the screen, all that a page can ask for by itself, and
+ * what its panels add once somebody opens them.
+ */
+const most = { first: 120_000, all: 260_000, panels: 60_000 };
+const isPanel = (script: string) => /\/\w+Panel\.[^/]+\.js$/.test(script);
 
 let app: RunningApp;
 let designer: SignedIn;
@@ -30,8 +34,13 @@ async function weigh(path: string, kind: string, topology: string, client = clie
   const isOwn = (chunk: LoadedChunk) => chunk.kind === kind && chunk.topology === own.topology;
   const others = new Set(chunks.filter((chunk) => !isOwn(chunk)).map(({ script }) => script));
   const first = reached([...entries, own.script]);
-  const all = reached([...entries, own.script], (script) => !others.has(script));
-  return { own, chunks, shell, first, all, sizes: { first: gzipSize(first), all: gzipSize(all) } };
+  const all = reached([...entries, own.script], (script) => !others.has(script) && !isPanel(script));
+  const opened = reached([...entries, own.script], (script) => !others.has(script));
+  const panels = [...opened].filter((script) => !all.has(script));
+  return {
+    ...{ own, chunks, shell, first, all, panels },
+    sizes: { first: gzipSize(first), all: gzipSize(all), panels: gzipSize(panels) },
+  };
 }
 
 const pages = stageKinds.flatMap((kind) => kind.topologies.map(({ id }) => ({ kind: kind.id, topology: id })));
@@ -48,11 +57,14 @@ function expectLittle({ own, chunks, shell, first, all, sizes }: Awaited<ReturnT
   expect(gzipSize([...all].filter((script) => !first.has(script)))).toBeGreaterThan(60_000);
   expect(sizes.first).toBeLessThan(most.first);
   expect(sizes.all).toBeLessThan(most.all);
+  expect(sizes.panels).toBeLessThan(most.panels);
 }
 
 describe("what a page has the browser fetch", () => {
   test.each(pages)("$kind, $topology: one network, and little enough", async ({ kind, topology }) => {
-    expectLittle(await weigh(`/calculators/${kind}?t=${topology}`, kind, topology));
+    const weight = await weigh(`/calculators/${kind}?t=${topology}`, kind, topology);
+    expectLittle(weight);
+    expect(weight.panels.some(isPanel)).toBe(true);
   });
 
   test("the first page: the stage that is alive on it, and little enough", async () => {
