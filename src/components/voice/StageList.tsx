@@ -1,9 +1,9 @@
 import { useEffect, useState, type ReactNode } from "react";
+import { saveFailure } from "#lib/client/saveFailure.ts";
 import { sameStages, withStageMoved, withStageRenamed } from "#lib/client/stageChanges.ts";
 import {
   changeWorkingCopy,
   withoutStage,
-  type SaveOutcome,
   type WorkingCopy,
   type WorkingCopyDocument,
 } from "#lib/client/workingCopy.ts";
@@ -28,19 +28,6 @@ interface StageListProps {
   editable: boolean;
 }
 
-function problemText(outcome: Exclude<SaveOutcome, { kind: "saved" }>): string {
-  switch (outcome.kind) {
-    case "conflict":
-      return "Someone else is saving this voice just now. Nothing was changed: load the page again and repeat it.";
-    case "signed-out":
-      return "Your sign-in has expired. Nothing was changed: sign in in another tab, then repeat it.";
-    case "unreachable":
-      return "The server could not be reached. Nothing was changed: check the connection, then repeat it.";
-    case "refused":
-      return outcome.detail;
-  }
-}
-
 /** The rows in the order and under the names of the document; one that this page has not read yet is not among them. */
 function rowsOf(document: WorkingCopyDocument, known: readonly StageRow[]): StageRow[] {
   return document.stages.flatMap(({ id, name }) =>
@@ -62,7 +49,7 @@ export function StageList({ voiceId, rows, copy, editable }: StageListProps) {
     const outcome = await changeWorkingCopy(voiceId, current, edit);
     setBusy(false);
     if (outcome.kind !== "saved") {
-      setMessage({ kind: "fault", text: problemText(outcome) });
+      setMessage({ kind: "fault", text: saveFailure(outcome) });
       return false;
     }
     const foreign = !sameStages(edit(current.document), outcome.copy.document);

@@ -1,3 +1,4 @@
+import type { Acceptance } from "#lib/circuit/voice/index.ts";
 import type { Stage } from "#lib/wire/stage.ts";
 import { request, type Fault } from "./request.ts";
 
@@ -13,7 +14,8 @@ export interface WorkingCopyDocument {
   format: 1;
   stages: StoredStage[];
   links: StoredLink[];
-  conditions: Record<string, unknown>;
+  conditions: Record<string, number | string>;
+  accepted?: Acceptance[] | undefined;
 }
 
 export interface WorkingCopy {

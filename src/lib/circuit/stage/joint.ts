@@ -24,6 +24,8 @@ export interface AnalysedState extends JointState {
 export interface Joint {
   /** Whether the port is there with these parts; always, unless said. */
   fitted?(state: JointState): boolean;
+  /** An input that makes another one needless: that one may stay open while this one is linked. */
+  insteadOf?: string;
   /** An input: the conditions that what comes in decides. */
   takes?(signal: Signal, state: JointState): Decided;
   /** An input: what it asks of the output that feeds it. Results are absent before the first analysis. */

@@ -35,3 +35,4 @@ export {
   type SupplyConditions,
 } from "./supply.ts";
 export * from "./checks/index.ts";
+export { levelPlanOf, type LevelPlan } from "./levelPlan.ts";

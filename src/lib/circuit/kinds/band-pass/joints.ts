@@ -14,6 +14,7 @@ interface Shape {
 }
 
 const strike = {
+  insteadOf: "in",
   takes: ({ height, width }: TriggerSignal) => ({ strikeVoltage: height, strikeWidth: width }),
 };
 

@@ -20,6 +20,10 @@ function isOpen(port: Port, { stage, found: { topology } }: ComputedStage, { wir
   if (port.jack || port.mayStayOpen) return false;
   const { conditions } = stages.get(stage.id)!;
   if (topology.joints?.[port.id]?.fitted?.({ parts: stage.parts, conditions }) === false) return false;
+  const replaced = Object.entries(topology.joints ?? {}).some(
+    ([id, { insteadOf }]) => insteadOf === port.id && wiring.sourceOf(stage.id, id) !== undefined,
+  );
+  if (replaced) return false;
   return port.direction === "in"
     ? wiring.sourceOf(stage.id, port.id) === undefined
     : wiring.fedBy(stage.id, port.id).length === 0;
