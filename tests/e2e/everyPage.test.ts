@@ -81,6 +81,17 @@ describe("wide and narrow, light and dark", () => {
     expect(member.consoleErrors.splice(0)).toEqual([]);
   });
 
+  test.each(["Levels", "Supply", "Parts", "Checks"])("the %s of a voice are accessible and fit", async (view) => {
+    const { page } = member;
+    await visit(page, `${app.url}/voices`);
+    await page.getByRole("link", { name: "Shingle" }).click();
+    await page.getByRole("navigation", { name: "Views of this voice" }).getByRole("link", { name: view }).click();
+    await page.getByRole("heading", { level: 1 }).filter({ hasNotText: "Shingle" }).waitFor();
+    await hydrated(page);
+    expect(await faultsOf(page)).toEqual([]);
+    expect(member.consoleErrors.splice(0)).toEqual([]);
+  });
+
   test("a voice and a stage of it are accessible and fit", async () => {
     const { page } = member;
     await visit(page, `${app.url}/voices`);

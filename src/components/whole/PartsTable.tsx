@@ -1,5 +1,5 @@
 import { useMemo, useState } from "react";
-import { formatPartValue, formatQuantity } from "#lib/circuit/index.ts";
+import { formatPartValue, formatTyped } from "#lib/circuit/index.ts";
 import { compareDesignators } from "#lib/wire/designator.ts";
 import type { PartsListAnswer } from "#lib/wire/partsList.ts";
 import { SortHeader, type SortOrder } from "../page/SortHeader.tsx";
@@ -82,7 +82,7 @@ export function PartsTable({ voiceId, parts, devices }: PartsTableProps) {
               </td>
               <td>
                 {row.type}
-                {row.tolerance !== undefined && `, ${formatQuantity(row.tolerance * 100, "")} %`}
+                {row.tolerance !== undefined && `, ${formatTyped(row.tolerance * 100, "")} %`}
               </td>
               <td className="wrap-anywhere">
                 <a href={`/voices/${voiceId}/stages/${row.stage}`}>{row.stageName}</a>
