@@ -56,6 +56,7 @@ const settingChange = z.object({
   from: setting,
   to: setting,
   change,
+  byNeighbour: z.literal(true).optional().meta({ description: "Nobody set it: a stage that is linked to it did" }),
 });
 
 const axis = z.object({

@@ -171,3 +171,20 @@ test("sixty stages, all changed, are compared in well under a second", () => {
   expect(found.curves.length).toBeGreaterThanOrEqual(60);
   expect(performance.now() - began).toBeLessThan(1000);
 });
+
+test("a stage nobody touched shows what its neighbour's change did to it", () => {
+  const passive = stage("a", {
+    topology: "passive",
+    targets: {},
+    parts: { c1: 33e-9, r1: 4700, r2: 47_000, c2: 3.3e-9 },
+  });
+  const loadedBy = (next: DocumentStage): VoiceDocument => ({
+    ...voice(passive, next),
+    links: [{ id: "1", from: { stage: "a", port: "out" }, to: { stage: "b", port: "in" } }],
+  });
+  const found = compare(loadedBy(stage("b")), loadedBy(withPart("ra", 10_000, stage("b"))));
+  const untouched = found.stages.changed.find(({ stage: id }) => id === "a");
+  expect(untouched).toMatchObject({ parts: 0, targets: 0, conditions: 0 });
+  expect(untouched?.results).toBeGreaterThan(0);
+  expect(found.conditions).toContainEqual(expect.objectContaining({ stage: "a", byNeighbour: true }));
+});

@@ -103,7 +103,8 @@ function compareStage(
   const sides = { from, to, fromTopology, toTopology };
   const parts = changedParts(sides);
   const targets = changedTargets(sides);
-  const conditions = changedConditions(sides);
+  const [fromComputed, toComputed] = [before.conditions[from.id], now.conditions[to.id]];
+  const conditions = changedConditions({ ...sides, fromComputed, toComputed });
   const results = changedResults(
     { stage: from, topology: fromTopology, results: before.results[from.id] ?? {} },
     { stage: to, topology: toTopology, results: now.results[to.id] ?? {} },
@@ -111,7 +112,7 @@ function compareStage(
   const counts = {
     parts: parts.length,
     targets: targets.length,
-    conditions: conditions.length,
+    conditions: conditions.filter(({ byNeighbour }) => !byNeighbour).length,
     results: results.length,
   };
   const changed: ChangedStage = {
@@ -121,14 +122,21 @@ function compareStage(
     ...counts,
   };
   const isSame = Object.keys(changed).length === 8 && Object.values(counts).every((count) => count === 0);
-  return { ...sides, parts, targets, conditions, results, changed: isSame ? undefined : changed };
+  return {
+    ...{ parts, targets, conditions, results, changed: isSame ? undefined : changed },
+    // Curves are drawn under the conditions that the neighbours left.
+    from: { stage: { ...from, conditions: fromComputed ?? from.conditions }, topology: fromTopology },
+    to: { stage: { ...to, conditions: toComputed ?? to.conditions }, topology: toTopology },
+  };
 }
 
-function curvesOf(pair: Compared, wanted: NonNullable<CompareOptions["curves"]>): CurvePair[] {
-  const { from, to, fromTopology, toTopology, changed } = pair;
-  if (wanted === "none" || !fromTopology || !toTopology) return [];
-  if (wanted === "changed" ? !changed : wanted.stage !== to.id) return [];
-  const pairs = overlaidCurves({ stage: from, topology: fromTopology }, { stage: to, topology: toTopology });
+function curvesOf({ from, to, changed }: Compared, wanted: NonNullable<CompareOptions["curves"]>): CurvePair[] {
+  if (wanted === "none" || !from.topology || !to.topology) return [];
+  if (wanted === "changed" ? !changed : wanted.stage !== to.stage.id) return [];
+  const pairs = overlaidCurves(
+    { stage: from.stage, topology: from.topology },
+    { stage: to.stage, topology: to.topology },
+  );
   return wanted === "changed" ? pairs.filter(differs) : pairs;
 }
 

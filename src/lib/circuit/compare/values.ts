@@ -1,3 +1,4 @@
+import type { PlainConditions } from "../stage/defaults.ts";
 import type { ConditionField, NumberField, PartClass } from "../stage/fields.ts";
 import type { AnyTopology } from "../stage/topology.ts";
 import type { DocumentStage } from "../voice/document.ts";
@@ -80,6 +81,8 @@ export interface SettingChange {
   from?: number | string;
   to?: number | string;
   change?: number;
+  /** Nobody set it: a stage that is linked to this one did. */
+  byNeighbour?: true;
 }
 
 const asSetting = (value: number | string | null | undefined) => value ?? undefined;
@@ -105,20 +108,37 @@ export function changedTargets({ from, to, fromTopology, toTopology }: Sides): S
 const valueOf = (field: ConditionField | undefined, given: number | string | null | undefined) =>
   asSetting(given === undefined ? field?.default : given);
 
+/** Conditions as they were given with the stage, and as they stood once its neighbours had decided theirs. */
+export interface ConditionSides extends Sides {
+  fromComputed: PlainConditions | undefined;
+  toComputed: PlainConditions | undefined;
+}
+
 /** Conditions that differ, a value left out counting as its usual one. */
-export function changedConditions({ from, to, fromTopology, toTopology }: Sides): SettingChange[] {
+export function changedConditions(sides: ConditionSides): SettingChange[] {
+  const { from, to, fromTopology, toTopology, fromComputed, toComputed } = sides;
   const stage = (to ?? from)!.id;
   return keysOf(toTopology?.conditions, fromTopology?.conditions).flatMap((name): SettingChange[] => {
     const [old, field] = [fromTopology?.conditions[name], toTopology?.conditions[name]];
-    const [before, now] = [from && valueOf(old, from.conditions[name]), to && valueOf(field, to.conditions[name])];
-    const numbers = typeof before !== "string" && typeof now !== "string";
-    if (numbers ? isSameFigure(before, now) : before === now) return [];
     const { label, ...rest } = (field ?? old)!;
     const unit = rest.type === "number" ? rest.unit : "";
+    const differing = (before: PlainConditions | undefined, now: PlainConditions | undefined) =>
+      settingChange(before && valueOf(old, before[name]), now && valueOf(field, now[name]));
+    const given = differing(from?.conditions, to?.conditions);
+    // What a neighbour decides overrides what was given, so that is what there is to see.
+    const stood = differing(fromComputed ?? from?.conditions, toComputed ?? to?.conditions);
+    if (!given && !stood) return [];
     const common = { stage, name, label, unit };
-    if (numbers) return [{ ...common, ...changeOf(before, now) }];
-    return [
-      { ...common, ...(before === undefined ? {} : { from: before }), ...(now === undefined ? {} : { to: now }) },
-    ];
+    return given ? [{ ...common, ...(stood ?? given) }] : [{ ...common, ...stood, byNeighbour: true }];
   });
+}
+
+function settingChange(
+  from: number | string | undefined,
+  to: number | string | undefined,
+): Pick<SettingChange, "from" | "to" | "change"> | undefined {
+  if (typeof from !== "string" && typeof to !== "string")
+    return isSameFigure(from, to) ? undefined : changeOf(from, to);
+  if (from === to) return undefined;
+  return { ...(from === undefined ? {} : { from }), ...(to === undefined ? {} : { to }) };
 }

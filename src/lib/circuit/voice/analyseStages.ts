@@ -1,4 +1,5 @@
 import type { Analysis } from "../stage/analyse.ts";
+import type { PlainConditions } from "../stage/defaults.ts";
 import type { StageKind } from "../stage/kind.ts";
 import type { TargetState } from "../stage/targets.ts";
 import type { Warning } from "../stage/warning.ts";
@@ -13,35 +14,45 @@ export interface VoiceAnalysis {
   results: Record<string, Analysis["results"]>;
   /** How each given target is met. */
   states: Record<string, Record<string, TargetState>>;
+  /** Complete, with what the neighbours and the voice decide. */
+  conditions: Record<string, PlainConditions>;
   warnings: StageWarning[];
 }
 
 /**
- * Analyses every stage of a voice under what its neighbours decide. One whose network this version does not know has no
+ * Analyses each stage under what its neighbours give it and ask of it. One whose network this version does not know has no
  * figures, and a fault says so.
  */
 export function analyseStages(document: VoiceDocument, kinds: readonly StageKind[]): VoiceAnalysis {
-  const computed = computeChain(document, findIn(kinds));
-  const analysis: VoiceAnalysis = { results: {}, states: {}, warnings: [] };
+  const { stages, unsettled } = computeChain(document, findIn(kinds));
+  const analysis: VoiceAnalysis = { results: {}, states: {}, conditions: {}, warnings: [] };
   for (const { id } of document.stages) {
-    const found = computed.stages.get(id)?.analysis;
-    if (!found) {
-      analysis.warnings.push(unknownNetwork(id));
+    const computed = stages.get(id);
+    if (!computed) {
+      analysis.warnings.push({ ...unknownNetwork, stage: id });
       continue;
     }
-    analysis.results[id] = found.results;
-    analysis.states[id] = found.state;
-    analysis.warnings.push(...found.warnings.map((warning) => ({ stage: id, ...warning })));
+    const { results, state, warnings } = computed.analysis;
+    analysis.results[id] = results;
+    analysis.states[id] = state;
+    analysis.conditions[id] = computed.conditions;
+    analysis.warnings.push(...warnings.map((warning) => ({ stage: id, ...warning })));
+    if (unsettled.includes(id)) analysis.warnings.push({ ...restless, stage: id });
   }
   return analysis;
 }
 
-const unknownNetwork = (stage: string): StageWarning => ({
-  stage,
+const plain = { severity: "fault", value: 0, limit: 0, unit: "" } as const;
+
+const unknownNetwork: Warning = {
+  ...plain,
   code: "unknown-network",
-  severity: "fault",
   message: "This version of the library does not know the network of this stage, so it has no figures.",
-  value: 0,
-  limit: 0,
-  unit: "",
-});
+};
+
+const restless: Warning = {
+  ...plain,
+  code: "unsettled",
+  message:
+    "The load and the signal of this stage chase each other without coming to rest, so its figures are not sure.",
+};

@@ -29,7 +29,7 @@ export async function readSide(db: Queryable, ctx: Context, voice: VoiceRow, ref
     return {
       about: common,
       document: { stages: [], links: [], conditions: {} },
-      analysis: { results: {}, states: {}, warnings: [] },
+      analysis: { results: {}, states: {}, conditions: {}, warnings: [] },
       warnings: [],
     };
   }

@@ -38,7 +38,10 @@ export function presentSummary(row: SummaryRow, voice: { teamId: string }, actor
 
 // Only what this server computed or checked is ever kept, and the database refuses every change of it.
 export const keptInputsOf = (row: RevisionRow) => row.inputs as RevisionAnswer["inputs"];
-export const keptAnalysisOf = (row: RevisionRow) => row.analysis as VoiceAnalysis;
+export function keptAnalysisOf(row: RevisionRow): VoiceAnalysis {
+  // Early revisions were kept without the conditions that neighbours decide.
+  return { conditions: {}, ...(row.analysis as Omit<VoiceAnalysis, "conditions">) };
+}
 const acceptedOf = (row: RevisionRow) => row.acceptedWarnings as AcceptedWarning[];
 
 /** Its warnings, and which of them the author meant to stay. */
