@@ -8,5 +8,9 @@ declare namespace App {
     site: string;
     /** The body, where the server has read it already; the request gives the same bytes, only far more slowly. */
     body?: Uint8Array;
+    /** Whether a key speaks for the actor, and no session. */
+    byKey: boolean;
+    /** Of the browser that asks; null without one. */
+    sessionId: string | null;
   }
 }

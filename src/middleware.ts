@@ -1,4 +1,5 @@
 import { actorOf } from "#lib/server/auth/actorOf.ts";
+import { actorOfKey, hasBearer } from "#lib/server/apiKeys/bearer.ts";
 import { settings } from "#lib/server/env.ts";
 import { secureHeaders } from "#lib/server/headers.ts";
 import { problemResponse } from "#lib/server/problem.ts";
@@ -13,6 +14,8 @@ const isImpersonal = (path: string) => impersonal.some((prefix) => path.startsWi
 export const onRequest = defineMiddleware(async (context, next) => {
   context.locals.actor = null;
   context.locals.site = "";
+  context.locals.byKey = false;
+  context.locals.sessionId = null;
   // Prerendered pages are made at build time, where there is neither a visitor nor a setting.
   if (context.isPrerendered) return next();
 
@@ -21,9 +24,13 @@ export const onRequest = defineMiddleware(async (context, next) => {
   const cookies: string[] = [];
   let response: Response;
   try {
-    if (!isImpersonal(pathname)) {
+    if (hasBearer(context.request.headers)) {
+      context.locals.byKey = true;
+      if (!isImpersonal(pathname)) context.locals.actor = await actorOfKey(context.request.headers);
+    } else if (!isImpersonal(pathname)) {
       const visit = await actorOf(context.request.headers);
       context.locals.actor = visit.actor;
+      context.locals.sessionId = visit.sessionId;
       cookies.push(...visit.cookies);
     }
     response = await next();

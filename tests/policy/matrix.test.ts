@@ -19,14 +19,19 @@ const promised: Record<Action, string> = {
   "comment.read": "yes yes yes yes no",
   "comment.write": "yes yes yes yes no",
   "comment.change": "no no no no no", // only one's own, see below
+  "comment.resolve": "yes yes yes yes no",
+  "activity.read": "yes yes yes yes no",
   "measurement.add": "yes yes yes yes no",
   "build.keep": "yes yes yes yes no",
   "partData.edit": "yes yes no no no",
   "shareLink.make": "yes no no no no",
+  "shareLink.revoke": "yes no no no no",
+  "shareLink.list": "yes no no no no",
   "team.read": "yes yes yes yes yes",
   "team.rename": "yes no no no no",
   "team.invite": "yes no no no no",
   "team.changeRoles": "yes no no no no",
+  "team.handOver": "yes no no no no",
 };
 
 const person = (role: Role | null): Actor => ({

@@ -1,5 +1,6 @@
 export type { Actor, Team } from "./actor.ts";
 export { can, decide, type Decision, type Target } from "./can.ts";
+export { deedNames, otherDeeds, type DeedName } from "./deeds.ts";
 export { actions, matrix, ruleFor, type Action } from "./matrix.ts";
 export { isRole, roles, type Role } from "./roles.ts";
 export { revisionRights, wasReleased, type RevisionRights, type RevisionTarget } from "./revisionRights.ts";

@@ -34,17 +34,23 @@ export const matrix = {
   "comment.read": { roles: workshop },
   "comment.write": { roles: workshop },
   "comment.change": { roles: workshop, onlyOnesOwn: true },
+  "comment.resolve": { roles: workshop },
+
+  "activity.read": { roles: workshop },
 
   "measurement.add": { roles: workshop },
   "build.keep": { roles: workshop },
 
   "partData.edit": { roles: drawing },
   "shareLink.make": { roles: ["owner"] },
+  "shareLink.revoke": { roles: ["owner"] },
+  "shareLink.list": { roles: ["owner"] },
 
   "team.read": { roles: everyone },
   "team.rename": { roles: ["owner"] },
   "team.invite": { roles: ["owner"] },
   "team.changeRoles": { roles: ["owner"] },
+  "team.handOver": { roles: ["owner"] },
 } as const satisfies Record<string, Rule>;
 
 export type Action = keyof typeof matrix;

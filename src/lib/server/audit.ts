@@ -1,10 +1,11 @@
 import { auditEvents, newId, type Queryable } from "#lib/db/index.ts";
-import type { Action } from "#lib/policy/index.ts";
+import type { DeedName } from "#lib/policy/index.ts";
 
 interface Deed {
   teamId: string;
-  actorId: string;
-  action: Action;
+  /** Null where nobody was signed in: a guest who opened a link. */
+  actorId: string | null;
+  action: DeedName;
   subjectId: string;
   detail?: Record<string, unknown>;
   at: Date;

@@ -18,7 +18,7 @@ export function contextOf(locals: App.Locals): Context {
 
 export type Member = Actor & { team: Team };
 
-const noSession = () =>
+export const noSession = () =>
   new Refusal("no-session", "Sign in, then do this again. Nothing was changed; what you typed is still yours to keep.");
 
 /** The signed-in person, acting in a team. */

@@ -1,3 +1,4 @@
+import { roles } from "#lib/policy/index.ts";
 import { z } from "zod";
 
 export const passwordLength = { least: 8, most: 128 } as const;
@@ -17,3 +18,4 @@ export const accountNameInput = z.strictObject({ name });
 export const teamNameInput = z.strictObject({
   name: z.string().trim().min(1, "Type a name for the team.").max(80, "Use at most 80 characters."),
 });
+export const invitationInput = z.strictObject({ email, role: z.enum(roles) });

@@ -88,7 +88,7 @@ function operationOf(route: Route): Json {
     operationId: route.operationId,
     summary: route.summary,
     tags: [route.tag],
-    security: route.session ? [{ session: [] }] : [],
+    security: route.session ? [{ session: [] }, { key: [] }] : [],
     parameters: parametersOf(route),
     ...(route.body
       ? { requestBody: { required: true, content: { "application/json": { schema: schemaOf(route.body, "input") } } } }
@@ -114,6 +114,7 @@ export function openApiDocument(routes: readonly Route[], version: string): Json
       schemas: { Problem: schemaOf(problemAnswer, "output") },
       securitySchemes: {
         session: { type: "apiKey", in: "cookie", name: "clatterbench.session_token", description: "Set by signing in" },
+        key: { type: "http", scheme: "bearer", description: "A personal key, made on the account page" },
       },
     },
   };

@@ -1,7 +1,11 @@
+export { apiKeys } from "./apiKeys.ts";
 export { accounts, rateLimits, sessions, users, verifications } from "./auth.ts";
 export { auditEvents } from "./auditEvents.ts";
+export { comments, type CommentPlace } from "./comments.ts";
+export { mailChoices } from "./mailChoices.ts";
 export { invitations, members } from "./members.ts";
 export { revisions } from "./revisions.ts";
+export { shareLinks } from "./shareLinks.ts";
 export { teams } from "./teams.ts";
 export { voices } from "./voices.ts";
 export { workingCopies } from "./workingCopies.ts";

@@ -6,11 +6,13 @@ import { auth } from "./index.ts";
 
 export interface Visit {
   actor: Actor | null;
+  /** Id of the session, if there is one. */
+  sessionId: string | null;
   /** Cookies to send along, when the session was prolonged. */
   cookies: string[];
 }
 
-const nobody: Visit = { actor: null, cookies: [] };
+const nobody: Visit = { actor: null, sessionId: null, cookies: [] };
 
 const sessionCookie = /(?:^|;\s*)(?:__Secure-)?clatterbench\.session_token=/;
 
@@ -19,9 +21,10 @@ export async function actorOf(headers: Headers): Promise<Visit> {
   if (!sessionCookie.test(headers.get("cookie") ?? "")) return nobody;
   const { response: found, headers: answered } = await auth().api.getSession({ headers, returnHeaders: true });
   const cookies = answered.getSetCookie();
-  if (!found) return { actor: null, cookies };
+  if (!found) return { ...nobody, cookies };
 
   const { user, session } = found;
+  const sessionId = session.id;
   const [membership] = await database()
     .select({ role: members.role, id: teams.id, name: teams.name, slug: teams.slug })
     .from(members)
@@ -36,7 +39,8 @@ export async function actorOf(headers: Headers): Promise<Visit> {
     .limit(1);
 
   const person = { userId: user.id, name: user.name, email: user.email };
-  if (!membership || !isRole(membership.role)) return { actor: { ...person, team: null, role: null }, cookies };
+  if (!membership || !isRole(membership.role))
+    return { actor: { ...person, team: null, role: null }, sessionId, cookies };
   const { role, ...team } = membership;
-  return { actor: { ...person, team, role }, cookies };
+  return { actor: { ...person, team, role }, sessionId, cookies };
 }

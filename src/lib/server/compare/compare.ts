@@ -1,6 +1,7 @@
 import { compareVoices, reviewChecklist } from "#lib/circuit/index.ts";
 import { stageKinds } from "#lib/circuit/kinds/index.ts";
 import type { CompareAnswer, CompareQuery } from "#lib/wire/compare.ts";
+import { countOpenThreads } from "../comments/list.ts";
 import type { Context } from "../context.ts";
 import { loadVoice } from "../voices/load.ts";
 import { readSide, releaseBefore } from "./side.ts";
@@ -28,7 +29,7 @@ export async function compareRevisions({ ctx, input }: Compare): Promise<Compare
     reason: to.about.reason ?? "not said yet: the working copy has no reason",
     warnings: to.warnings,
     stageNames: Object.fromEntries(to.document.stages.map((s) => [s.id, s.name])),
-    openThreads: 0,
+    openThreads: typeof toRef === "number" ? await countOpenThreads(ctx.db, voice.id, toRef) : 0,
   });
   return {
     from: from.about,

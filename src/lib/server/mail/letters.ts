@@ -2,6 +2,8 @@ export interface Letter {
   subject: string;
   text: string;
   html: string;
+  /** Where a mail program may stop such mails with one press (RFC 8058). */
+  unsubscribe?: string;
 }
 
 const escapes: Record<string, string> = { "&": "&amp;", "<": "&lt;", ">": "&gt;", '"': "&quot;", "'": "&#39;" };
@@ -73,6 +75,19 @@ export function accountExistsLetter({ name, url }: { name: string; url: string }
     ],
     action: { label: "Sign in", url },
     closing: "The password is forgotten? The sign-in page leads to a new one.",
+  });
+}
+
+export function emailChangeLetter({ name, newEmail, url }: { name: string; newEmail: string; url: string }): Letter {
+  return letter({
+    subject: "Change the e-mail address of your Clatterbench account",
+    greeting: `Hello ${name},`,
+    paragraphs: [
+      `Someone, most likely you, asked to use ${newEmail} instead of this address. Agree here first; then a second mail, to the new address, asks to confirm it. The link works for one hour.`,
+    ],
+    action: { label: "Agree to the new address", url },
+    closing:
+      "You did not ask? Then leave this mail alone: your account keeps this address. Choose a new password to be sure.",
   });
 }
 

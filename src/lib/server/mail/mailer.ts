@@ -16,9 +16,13 @@ interface Post {
 export function createMailer({ smtpUrl, from }: Post): Mailer {
   let transport: ReturnType<typeof createTransport> | undefined;
   return {
-    async send(to, { subject, text, html }) {
+    async send(to, { subject, text, html, unsubscribe }) {
       transport ??= createTransport({ url: await smtpUrl(), connectionTimeout: patience, socketTimeout: patience });
-      await transport.sendMail({ from: from(), to, subject, text, html });
+      const headers = unsubscribe && {
+        "List-Unsubscribe": `<${unsubscribe}>`,
+        "List-Unsubscribe-Post": "List-Unsubscribe=One-Click",
+      };
+      await transport.sendMail({ from: from(), to, subject, text, html, ...(headers && { headers }) });
     },
   };
 }

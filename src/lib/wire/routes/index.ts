@@ -1,5 +1,7 @@
 import { accountRoutes } from "./account.ts";
+import { teamRoutes } from "./team.ts";
 import { calculatorRoutes } from "./calculators.ts";
+import { discussionRoutes } from "./discussion.ts";
 import type { Route } from "./route.ts";
 import { serviceRoutes } from "./service.ts";
 import { revisionRoutes } from "./revisions.ts";
@@ -12,6 +14,8 @@ export const routes: readonly Route[] = [
   ...voiceRoutes,
   ...wholeVoiceRoutes,
   ...revisionRoutes,
+  ...discussionRoutes,
+  ...teamRoutes,
   ...accountRoutes,
   ...serviceRoutes,
 ];

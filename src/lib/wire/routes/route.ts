@@ -16,7 +16,7 @@ export interface Route {
   path: string;
   operationId: string;
   summary: string;
-  tag: "calculators" | "voices" | "account" | "service";
+  tag: "calculators" | "voices" | "team" | "account" | "service";
   session: boolean;
   /** What each variable of the path stands for, and its values where they are a closed list. */
   parameters?: Record<string, { description: string; values?: readonly string[] }>;

@@ -2,7 +2,7 @@ import { answer, csv, json, methodNotAllowed } from "#lib/server/answer.ts";
 import { compareRevisions } from "#lib/server/compare/compare.ts";
 import { contextOf, memberOf } from "#lib/server/context.ts";
 import { idInPath, readQuery } from "#lib/server/request.ts";
-import { wantsCsv } from "#lib/server/wantsCsv.ts";
+import { wantsCsv } from "#lib/server/wantedFormat.ts";
 import { compareQuery } from "#lib/wire/compare.ts";
 import { compareCsv } from "#lib/wire/compareCsv.ts";
 

@@ -2,7 +2,7 @@ import { answer, json, methodNotAllowed } from "#lib/server/answer.ts";
 import { contextOf, memberOf } from "#lib/server/context.ts";
 import { idInPath, readQuery } from "#lib/server/request.ts";
 import { readPartsList } from "#lib/server/voices/partsList.ts";
-import { wantsCsv } from "#lib/server/wantsCsv.ts";
+import { wantsCsv } from "#lib/server/wantedFormat.ts";
 import { partsListQuery } from "#lib/wire/partsList.ts";
 import { partsListCsv } from "#lib/wire/partsListCsv.ts";
 

@@ -3,7 +3,7 @@ import { contextOf, memberOf } from "#lib/server/context.ts";
 import { idInPath, readJson, readQuery } from "#lib/server/request.ts";
 import { listRevisions } from "#lib/server/revisions/list.ts";
 import { makeRevision } from "#lib/server/revisions/make.ts";
-import { wantsCsv } from "#lib/server/wantsCsv.ts";
+import { wantsCsv } from "#lib/server/wantedFormat.ts";
 import { expectedVersions } from "#lib/server/workingCopies/etag.ts";
 import { newRevision, revisionListQuery } from "#lib/wire/revision.ts";
 import { revisionsCsv } from "#lib/wire/revisionsCsv.ts";

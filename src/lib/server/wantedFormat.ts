@@ -5,3 +5,10 @@ export function wantsCsv(request: Request, format: "json" | "csv" | undefined): 
   const [first] = accepted.filter((type) => type === "text/csv" || type === "application/json");
   return first === "text/csv";
 }
+
+/** Whether a page's address is asked for its data, as a script would. */
+export function wantsJson(request: Request, format: string | null): boolean {
+  if (format !== null) return format === "json";
+  const accept = request.headers.get("accept") ?? "";
+  return accept.includes("application/json") && !accept.includes("text/html");
+}
