@@ -9,7 +9,7 @@ describe("text of a field", () => {
   it("is written as people write it", () => {
     expect(partText(13_700, "Ω")).toBe("13k7");
     expect(partText(10e-9, "F")).toBe("10n");
-    expect(partText(0, "Ω")).toBe("0");
+    expect(partText(0, "Ω")).toBe("none");
     expect(figureText(950, "Hz")).toBe("950");
     expect(figureText(3, "")).toBe("3");
   });

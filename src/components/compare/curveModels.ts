@@ -36,7 +36,7 @@ export function overlayModel(pair: CurvePairData, labels: SideLabels, room: Plot
     id: pair.id,
     name: pair.name,
     x: axisOf(pair.xAxis, [xs[0]!, xs.at(-1)!], xRoom(room), true),
-    y: yAxis(pair.yAxis, [...from, ...to], window?.y, Math.max(3, Math.floor(room.height / 52))),
+    y: yAxis(pair.yAxis, [from, to], window?.y, Math.max(3, Math.floor(room.height / 52))),
     xs,
     lines: [
       { id: "to", label: labels.to, ys: to },
@@ -58,7 +58,7 @@ export function differenceModel(pair: CurvePairData, labels: SideLabels, room: P
     id: `${pair.id}-difference`,
     name: `${pair.name}, difference`,
     x: axisOf(pair.xAxis, [xs[0]!, xs.at(-1)!], xRoom(room), true),
-    y: yAxis(axis, [...ys, 0], undefined, 4),
+    y: yAxis(axis, [ys, [0]], undefined, 4),
     xs,
     lines: [{ id: "difference", label: `${labels.to} less ${labels.from}`, ys }],
   };

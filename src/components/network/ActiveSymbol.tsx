@@ -1,5 +1,6 @@
 import type { DrawnItem } from "#lib/circuit/index.ts";
 import { placeOf, px, step } from "./grid.ts";
+import { SymbolTspans } from "./SymbolTspans.tsx";
 
 type ActiveItem = Extract<DrawnItem, { draw: "op-amp" | "ota" | "transistor" | "diode" | "source" | "switch" }>;
 type Amplifier = Extract<ActiveItem, { draw: "op-amp" | "ota" }>;
@@ -98,7 +99,7 @@ function TwoEndedSymbol({ item }: { item: TwoEnded }) {
         y={upright ? middle[1] + 4 : middle[1] - 18}
         textAnchor={upright ? "start" : "middle"}
       >
-        {item.name}
+        <SymbolTspans symbol={item.name} />
       </text>
     </g>
   );

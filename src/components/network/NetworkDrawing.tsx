@@ -13,6 +13,9 @@ interface NetworkDrawingProps {
   lit?: string | undefined;
 }
 
+/** A drawing wider than this has a row for itself. */
+const halfWidth = 560;
+
 /** The topology's network as a schematic in our own hand: IEC bodies, thin wires, values beside the parts. */
 export function NetworkDrawing({ topology, parts, designators = {}, lit }: NetworkDrawingProps) {
   const id = useId();
@@ -24,29 +27,41 @@ export function NetworkDrawing({ topology, parts, designators = {}, lit }: Netwo
       return [key, { name, value: value === 0 ? "not fitted" : formatPartValue(value, field.unit) }];
     }),
   );
+  const view = viewOf(topology.network, markings);
   return (
-    <svg
-      className="network"
-      viewBox={viewOf(topology.network, markings)}
-      role="img"
-      aria-labelledby={`${id}-title`}
-      aria-describedby={`${id}-text`}
-    >
-      <title id={`${id}-title`}>{`Network, ${topology.name.toLowerCase()}`}</title>
-      <desc id={`${id}-text`}>{networkText(topology, markings).replaceAll("_", "")}</desc>
-      {items.map((item, i) =>
-        item.draw === "part" || item.draw === "pot" ? (
-          <PartSymbol
-            key={i}
-            item={item}
-            marking={markings[item.part]!}
-            lit={lit === item.part}
-            fitted={parts[item.part] !== 0}
-          />
-        ) : (
-          <FixtureSymbol key={i} item={item} />
-        ),
-      )}
-    </svg>
+    <figure className={view.width > halfWidth ? "plot network-wide" : "plot"} aria-labelledby={`${id}-head`}>
+      <figcaption className="plot-head">
+        <h3 id={`${id}-head`}>Network</h3>
+      </figcaption>
+      {/* It shrinks so far that it can still be read, and scrolls from there: by keyboard too, which is why it takes the focus. */}
+      {/* eslint-disable-next-line jsx-a11y-x/no-noninteractive-tabindex */}
+      <div className="network-scroll" role="group" aria-label="Drawing of the network" tabIndex={0}>
+        <svg
+          className="network"
+          viewBox={`${view.left} ${view.top} ${view.width} ${view.height}`}
+          width={view.width}
+          height={view.height}
+          role="img"
+          aria-labelledby={`${id}-title`}
+          aria-describedby={`${id}-text`}
+        >
+          <title id={`${id}-title`}>{`Network, ${topology.name}`}</title>
+          <desc id={`${id}-text`}>{networkText(topology, markings).replaceAll("_", "")}</desc>
+          {items.map((item, i) =>
+            item.draw === "part" || item.draw === "pot" ? (
+              <PartSymbol
+                key={i}
+                item={item}
+                marking={markings[item.part]!}
+                lit={lit === item.part}
+                fitted={parts[item.part] !== 0}
+              />
+            ) : (
+              <FixtureSymbol key={i} item={item} />
+            ),
+          )}
+        </svg>
+      </div>
+    </figure>
   );
 }

@@ -1,9 +1,7 @@
-import type { DrawnItem } from "#lib/circuit/index.ts";
+import { clearanceOf, type PartItem } from "./clearance.ts";
 import { placeOf, px } from "./grid.ts";
 import type { PartMarking } from "./networkText.ts";
 import { SymbolTspans } from "./SymbolTspans.tsx";
-
-type PartItem = Extract<DrawnItem, { draw: "part" | "pot" }>;
 
 interface PartSymbolProps {
   item: PartItem;
@@ -19,7 +17,7 @@ export function PartSymbol({ item, marking, lit, fitted }: PartSymbolProps) {
   const wiperRight = item.draw === "pot" && px(item.wiper[0]) > x;
   const tall = item.draw === "part" && item.symbol !== "resistor";
   const side = upright && wiperRight ? -1 : 1;
-  const textX = upright ? x + 17 * side : x;
+  const textX = upright ? x + (17 + clearanceOf(item)) * side : x;
   return (
     <g className={`part${lit ? " lit" : ""}${fitted ? "" : " unfitted"}`}>
       <g transform={transform}>
@@ -28,7 +26,7 @@ export function PartSymbol({ item, marking, lit, fitted }: PartSymbolProps) {
       {item.draw === "pot" && <Wiper from={item.wiper} to={middle} />}
       <text
         x={textX}
-        y={upright ? y - 3 : y - (tall ? 33 : 28)}
+        y={upright ? y - 3 : y - (tall ? 33 : 28) - clearanceOf(item)}
         textAnchor={upright ? (side === 1 ? "start" : "end") : "middle"}
       >
         <SymbolTspans symbol={marking.name} />

@@ -1,4 +1,5 @@
 import type { DrawnItem, Network, Point } from "#lib/circuit/index.ts";
+import { clearanceOf } from "./clearance.ts";
 import { placeOf, px, step } from "./grid.ts";
 import type { PartMarking } from "./networkText.ts";
 
@@ -13,14 +14,22 @@ interface Box {
   bottom: number;
 }
 
+/** In pixels of the drawing, whose letters are 13 high. */
+export interface View {
+  left: number;
+  top: number;
+  width: number;
+  height: number;
+}
+
 /** The view that shows the whole drawing: its sheet, widened where words or symbols stand out over the edge. */
-export function viewOf({ width, height, items }: Network, markings: Record<string, PartMarking>): string {
+export function viewOf({ width, height, items }: Network, markings: Record<string, PartMarking>): View {
   const boxes = items.flatMap((item) => wordsOf(item, markings));
   const left = Math.min(0, ...boxes.map((box) => box.left - margin));
   const top = Math.min(0, ...boxes.map((box) => box.top - margin));
   const right = Math.max(px(width), ...boxes.map((box) => box.right + margin));
   const bottom = Math.max(px(height), ...boxes.map((box) => box.bottom + margin));
-  return `${left} ${top} ${right - left} ${bottom - top}`;
+  return { left, top, width: right - left, height: bottom - top };
 }
 
 /** Where an item's words stand, and what of its symbol lies beyond its points. */
@@ -29,7 +38,7 @@ function wordsOf(item: DrawnItem, markings: Record<string, PartMarking>): Box[] 
     case "part":
     case "pot": {
       const { name, value } = markings[item.part]!;
-      const long = Math.max(name.length, value.length) * letter;
+      const long = Math.max(name.length, value.length) * letter + clearanceOf(item);
       const { upright, middle } = placeOf(item.from, item.to);
       const [x, y] = middle;
       if (!upright) return [centred(x, y - 45, long, 20)];

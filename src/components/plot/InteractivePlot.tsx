@@ -56,7 +56,7 @@ export default function InteractivePlot({ model, room, at, onPoint }: Interactiv
         ticks={model.x.ticks}
         interval={0}
         height={margins.bottom}
-        tickFormatter={(value: number) => tickText(value, model.x.unit)}
+        tickFormatter={(value: number) => tickText(value, model.x)}
         tick={axisText}
         tickLine={false}
         axisLine={{ stroke: palette.rule }}
@@ -70,7 +70,7 @@ export default function InteractivePlot({ model, room, at, onPoint }: Interactiv
         ticks={model.y.ticks}
         interval={0}
         width={margins.left}
-        tickFormatter={(value: number) => tickText(value, model.y.unit)}
+        tickFormatter={(value: number) => tickText(value, model.y)}
         tick={axisText}
         tickLine={false}
         axisLine={{ stroke: palette.rule }}

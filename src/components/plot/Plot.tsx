@@ -1,5 +1,5 @@
 import { lazy, Suspense, useEffect, useId, useRef, useState } from "react";
-import type { AnyTopology } from "#lib/circuit/index.ts";
+import { midSentence, type AnyTopology } from "#lib/circuit/index.ts";
 import type { StageState } from "#lib/wire/stageState.ts";
 import { PlotActions } from "./PlotActions.tsx";
 import { PlotDrawing } from "./PlotDrawing.tsx";
@@ -61,7 +61,6 @@ export function FramedPlot({ name, fileName, modelIn, empty, short = false, id }
       <figcaption className="plot-head">
         <h3 id={head}>{name}</h3>
         {model && model.lines.length > 1 && <Legend model={model} />}
-        {model && <PlotActions model={model} fileName={fileName} />}
       </figcaption>
       <div ref={box} className={`plot-box${model ? "" : " plot-box-empty"}${short ? " plot-box-short" : ""}`}>
         {model ? (
@@ -87,7 +86,7 @@ export function FramedPlot({ name, fileName, modelIn, empty, short = false, id }
         ) : (
           <p className="plot-empty">
             {empty ??
-              `No curve: with these values ${name.toLowerCase()} has no figure to draw. Change a part or a target.`}
+              `No curve: with these values ${midSentence(name)} has no figure to draw. Change a part or a target.`}
           </p>
         )}
       </div>
@@ -100,7 +99,10 @@ export function FramedPlot({ name, fileName, modelIn, empty, short = false, id }
               readout(model, at)
             )}
           </p>
-          <PlotFigures model={model} />
+          <div className="plot-foot">
+            <PlotFigures model={model} />
+            <PlotActions model={model} fileName={fileName} />
+          </div>
         </>
       )}
     </figure>

@@ -66,12 +66,12 @@ export function PlotDrawing({ model, room, palette = pagePalette, alone = false,
       <g fill={palette.ink}>
         {model.x.ticks.map((tick) => (
           <text key={tick} x={x(tick)} y={foot + 16} textAnchor="middle">
-            {tickText(tick, model.x.unit)}
+            {tickText(tick, model.x)}
           </text>
         ))}
         {model.y.ticks.map((tick) => (
           <text key={tick} x={margins.left - 7} y={y(tick) + 4} textAnchor="end">
-            {tickText(tick, model.y.unit)}
+            {tickText(tick, model.y)}
           </text>
         ))}
         <text x={margins.left} y={margins.top - 10}>

@@ -12,11 +12,11 @@ export function PlotFigures({ model }: { model: PlotModel }) {
           <thead>
             <tr>
               <th scope="col" className="right">
-                {model.x.title}
+                {model.x.plainTitle}
               </th>
               {model.lines.map((line) => (
                 <th key={line.id} scope="col" className="right">
-                  {model.lines.length > 1 ? line.label : model.y.title}
+                  {model.lines.length > 1 ? line.label : model.y.plainTitle}
                 </th>
               ))}
             </tr>

@@ -67,7 +67,7 @@ export async function savePng(model: PlotModel, name: string): Promise<void> {
 
 /** Every point of every line, with quantity and unit in the head. */
 export function saveCsv(model: PlotModel, name: string): void {
-  const head = [model.x.title, ...model.lines.map((line) => `${model.y.title} (${line.label})`)];
+  const head = [model.x.plainTitle, ...model.lines.map((line) => `${model.y.plainTitle} (${line.label})`)];
   const rows = model.xs.map((x, i) => [x, ...model.lines.map((line) => line.ys[i] ?? "")]);
   takeAwayCsv(`${name}.csv`, [head, ...rows]);
 }

@@ -30,7 +30,12 @@ const isShare = (field: ConditionField): field is NumberField => {
 
 /** What the stage works under: what is turned, what surrounds it once switched on, and the rest. */
 export function Conditions({ stage, id, readOnly, only }: ConditionsProps & { only?: "turned" }) {
-  const entries = Object.entries(stage.topology.conditions);
+  const { topology, state } = stage;
+  const entries = Object.entries(topology.conditions).filter(
+    ([key, { ofPart, ...field }]) =>
+      // One that was set by itself stays in sight, or nobody would find what it does.
+      ofPart === undefined || state.parts[ofPart]! > 0 || state.conditions[key] !== field.default,
+  );
   const shares = entries.filter((entry): entry is [string, NumberField] => isShare(entry[1]));
   const optional = entries.filter(
     (entry): entry is [string, NumberField] => isOptional(entry[1]) && !isShare(entry[1]),

@@ -6,14 +6,15 @@ import { anyPotFitted } from "./pots.ts";
 
 interface CurvesProps {
   topology: AnyTopology;
+  curves: AnyTopology["curves"];
   state: StageState;
   fileName: string;
 }
 
-/** Every curve the topology can draw. Held apart so that typing never waits for a plot. */
-export const Curves = memo(function Curves({ topology, state, fileName }: CurvesProps) {
+/** Some of the curves that the topology can draw. Held apart so that typing never waits for a plot. */
+export const Curves = memo(function Curves({ topology, curves, state, fileName }: CurvesProps) {
   const idle = !anyPotFitted(topology, state.parts);
-  return topology.curves.map((curve) => (
+  return curves.map((curve) => (
     <Plot
       key={curve.id}
       topology={topology}

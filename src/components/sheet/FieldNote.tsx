@@ -26,12 +26,20 @@ export function FieldNote({ store, fields, id, hint, refused = false }: FieldNot
     fields.map(({ name }) => name),
   );
   const faulty = first && fields[first.at];
-  const label = faulty?.label === undefined ? "" : `${faulty.label}: `;
   return (
     <p id={id} className={faulty || refused ? "field-note error" : "field-note"} aria-live="polite">
-      {faulty
-        ? `${label}${first.fault} Still ${faulty.inForce}.`
-        : hint !== undefined && <TextWithSymbols text={hint} />}
+      {faulty ? (
+        <>
+          {faulty.label !== undefined && (
+            <>
+              <TextWithSymbols text={faulty.label} />:{" "}
+            </>
+          )}
+          {first.fault} Still {faulty.inForce}.
+        </>
+      ) : (
+        hint !== undefined && <TextWithSymbols text={hint} />
+      )}
     </p>
   );
 }

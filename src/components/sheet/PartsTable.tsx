@@ -1,11 +1,11 @@
 import type { ReactNode } from "react";
-import { formatPartValue, formatQuantity, formatTyped, seriesNames, type PartField } from "#lib/circuit/index.ts";
+import { formatPartValue, formatQuantity, formatTyped, midSentence, type PartField } from "#lib/circuit/index.ts";
 import { stepPart } from "#lib/client/stage/stepping.ts";
-import { partText, readFigure } from "#lib/wire/figureText.ts";
-import { seriesOf, type SeriesChoice } from "#lib/wire/stageState.ts";
+import { notFitted, partText, readFigure } from "#lib/wire/figureText.ts";
+import { seriesOf } from "#lib/wire/stageState.ts";
 import { FieldNote } from "./FieldNote.tsx";
 import { QuantityInput } from "./QuantityInput.tsx";
-import { plainSymbol, SymbolText } from "./SymbolText.tsx";
+import { SymbolText } from "./SymbolText.tsx";
 import type { Stage } from "./useStage.ts";
 
 /** Designators that can be typed over. */
@@ -26,10 +26,10 @@ interface PartsTableProps {
 
 /** The parts: what the targets call for exactly, and what is chosen. */
 export function PartsTable({ stage, id, designators, marks, readOnly, onLit }: PartsTableProps) {
-  const { topology, telling, exact, moves } = stage;
+  const { topology, watched, exact, moves } = stage;
   const entries = Object.entries(topology.parts);
   if (entries.length === 0) return <p className="text-ink-2">This network has no parts of its own to choose.</p>;
-  const result = topology.results[telling]!;
+  const result = topology.results[watched]!;
   const anyMoves = Object.keys(moves).length > 0;
   return (
     <>
@@ -76,7 +76,7 @@ export function PartsTable({ stage, id, designators, marks, readOnly, onLit }: P
         fields={entries.map(([key, field]) => ({
           name: `parts.${key}` as const,
           inForce: formatPartValue(stage.state.parts[key]!, field.unit),
-          label: designators[key] ?? plainSymbol(field.symbol),
+          label: designators[key] ?? field.symbol,
         }))}
         id={`${id}-note`}
         refused={marks?.fault !== undefined}
@@ -85,7 +85,7 @@ export function PartsTable({ stage, id, designators, marks, readOnly, onLit }: P
             ? undefined
             : (marks?.fault ??
               "↑ ↓ step along the series, with Shift by ten." +
-                (anyMoves ? ` “Moves”: per cent of ${result.label.toLowerCase()} for one per cent of the part.` : ""))
+                (anyMoves ? ` “Moves”: per cent of ${midSentence(result.label)} for one per cent of the part.` : ""))
         }
       />
     </>
@@ -151,7 +151,7 @@ function PartRow({ stage, part, field, id, designator, markField, exact, moves, 
 
 function exactText(exact: number | undefined, field: PartField): string {
   if (exact === undefined) return "–";
-  if (exact === 0) return "none";
+  if (exact === 0) return notFitted;
   const marked = formatPartValue(exact, field.unit);
   return partIsPlain(exact, marked, field) ? marked : formatTyped(exact, field.unit, 4);
 }
@@ -161,38 +161,3 @@ const partIsPlain = (exact: number, marked: string, field: PartField) => {
   const reading = readFigure(marked, field);
   return reading.ok && reading.value === exact;
 };
-
-interface SeriesChoosersProps {
-  stage: Stage;
-  id: string;
-}
-
-/** Which preferred series resistors and capacitors are taken from. */
-export function SeriesChoosers({ stage, id }: SeriesChoosersProps) {
-  const { topology, state, actions } = stage;
-  const classes = new Set(Object.values(topology.parts).map(({ partClass }) => partClass));
-  const offered = (["resistor", "capacitor"] as const).filter((name) => classes.has(name));
-  return (
-    <span className="series-choosers">
-      {offered.map((name) => (
-        <span key={name}>
-          <label htmlFor={`${id}-${name}`}>{name === "resistor" ? "Resistors" : "Capacitors"}</label>
-          <select
-            id={`${id}-${name}`}
-            className="select-plain"
-            value={state.series[name]}
-            onChange={(event) =>
-              actions.setSeries({ ...state.series, [name]: event.target.value as SeriesChoice[typeof name] })
-            }
-          >
-            {seriesNames.map((series) => (
-              <option key={series} value={series}>
-                {series}
-              </option>
-            ))}
-          </select>
-        </span>
-      ))}
-    </span>
-  );
-}

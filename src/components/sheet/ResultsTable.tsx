@@ -1,4 +1,5 @@
-import { printQuantity, type Analysis, type ResultField } from "#lib/circuit/index.ts";
+import { Fragment } from "react";
+import { printShown, type Analysis, type ResultField } from "#lib/circuit/index.ts";
 import { changeText, errorText } from "#lib/wire/changeText.ts";
 import { StateMark } from "../page/StateMark.tsx";
 import { SymbolText } from "./SymbolText.tsx";
@@ -61,7 +62,7 @@ function ResultRow({ stage, row }: { stage: Stage; row: Figure[] }) {
   return (
     <tr>
       <th scope="row">
-        {field.label}
+        <TextWithSymbols text={field.label} />
         {field.help !== undefined && (
           <span className="result-help">
             <TextWithSymbols text={field.help} />
@@ -69,9 +70,9 @@ function ResultRow({ stage, row }: { stage: Stage; row: Figure[] }) {
         )}
       </th>
       <td className="right">
-        {row.map(({ key, field: { unit, words }, value }, i) => (
+        {row.map(({ key, field, value }, i) => (
           <span key={key} className={i === 0 ? "figure" : "figure figure-also"}>
-            <ShownFigure value={value} unit={unit} words={words} />
+            <ShownFigure value={value} field={field} />
           </span>
         ))}
         {ideal && <Cost row={row} ideal={ideal} />}
@@ -96,11 +97,11 @@ function ResultRow({ stage, row }: { stage: Stage; row: Figure[] }) {
   );
 }
 
-function ShownFigure({ value, unit, words }: { value: ResultValue | undefined } & Pick<ResultField, "unit" | "words">) {
+function ShownFigure({ value, field }: { value: ResultValue | undefined; field: ResultField }) {
   if (value === undefined) return <span className="text-ink-2">no figure</span>;
-  if (typeof value !== "number") return <FigureList values={value} unit={unit} />;
-  if (words) return value === 0 ? words.no : words.yes;
-  const printed = printQuantity(value, unit);
+  if (typeof value !== "number") return <FigureList values={value} field={field} />;
+  if (field.words) return value === 0 ? field.words.no : field.words.yes;
+  const printed = printShown(value, field);
   return (
     <>
       {printed.figure}
@@ -109,16 +110,18 @@ function ShownFigure({ value, unit, words }: { value: ResultValue | undefined } 
   );
 }
 
-function FigureList({ values, unit }: { values: readonly number[]; unit: ResultField["unit"] }) {
+function FigureList({ values, field }: { values: readonly number[]; field: ResultField }) {
   if (values.length === 0) return <span className="text-ink-2">none</span>;
   return (
     <span className="figure-list">
       {values.map((value, i) => (
         // The same figure may come twice: its place in the row is its identity.
-        <span key={i}>
-          <ShownFigure value={value} unit={unit} words={undefined} />
-          {i < values.length - 1 && " · "}
-        </span>
+        <Fragment key={i}>
+          <span>
+            <ShownFigure value={value} field={field} />
+            {i < values.length - 1 && " ·"}
+          </span>{" "}
+        </Fragment>
       ))}
     </span>
   );
@@ -137,8 +140,8 @@ function Cost({ row, ideal }: { row: Figure[]; ideal: Analysis["results"] }) {
     inDecibels && typeof decibelsBefore === "number" && typeof inDecibels.value === "number"
       ? changeText(decibelsBefore, inDecibels.value, "dB")
       : undefined;
-  const printed = printQuantity(before, main.field.unit);
-  const sameUnit = printed.unit === printQuantity(main.value, main.field.unit).unit;
+  const printed = printShown(before, main.field);
+  const sameUnit = printed.unit === printShown(main.value, main.field).unit;
   return (
     <span className="result-cost">
       <span className="sr-only">ideally </span>

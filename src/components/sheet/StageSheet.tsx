@@ -1,4 +1,4 @@
-import { useDeferredValue, useId, useRef, useState, type ReactNode } from "react";
+import { useDeferredValue, useId, useMemo, useRef, useState, type ReactNode } from "react";
 import type { AnyTopology } from "#lib/circuit/index.ts";
 import type { KindBrief } from "#lib/wire/kindBrief.ts";
 import type { StageState } from "#lib/wire/stageState.ts";
@@ -8,7 +8,9 @@ import { NetworkDrawing } from "../network/NetworkDrawing.tsx";
 import { later } from "../page/later.tsx";
 import { Conditions } from "./Conditions.tsx";
 import { Curves } from "./Curves.tsx";
-import { PartsTable, SeriesChoosers, type PartMarks } from "./PartsTable.tsx";
+import { deviceName } from "./deviceName.ts";
+import { PartChoosers } from "./PartChoosers.tsx";
+import { PartsTable, type PartMarks } from "./PartsTable.tsx";
 import { ResultsTable } from "./ResultsTable.tsx";
 import { StagePanels } from "./StagePanels.tsx";
 import { stagePanels } from "./stagePanels.ts";
@@ -21,6 +23,9 @@ const Candidates = later(() => import("./Candidates.tsx").then((module) => modul
   waiting: "Working out parts…",
   className: "stage-candidates",
 });
+
+/** With more results than this, their column is as high as two curves. */
+const manyResults = 20;
 
 export interface StageSheetProps {
   kind: KindBrief;
@@ -52,6 +57,11 @@ export function StageSheet({ kind, topology, initial, onChange, ...props }: Stag
   const id = useId();
   const canSolve = !readOnly && Object.keys(topology.targets).length > 0 && Object.keys(topology.parts).length > 0;
   const fileName = `${kind.id}-${topology.id}`;
+  const besides = useState(() => (Object.keys(stage.analysis.results).length > manyResults ? 2 : 1))[0];
+  const [mainCurves, otherCurves] = useMemo(
+    () => [topology.curves.slice(0, besides), topology.curves.slice(besides)],
+    [topology, besides],
+  );
 
   return (
     <div className="sheet stage">
@@ -81,7 +91,7 @@ export function StageSheet({ kind, topology, initial, onChange, ...props }: Stag
             <ul className="devices" aria-label="Devices">
               {topology.devices.map((device) => (
                 <li key={device.key}>
-                  <span className="val part-mark">{designators[device.key] ?? device.letter}</span>{" "}
+                  <span className="val part-mark">{designators[device.key] ?? deviceName(topology, device)}</span>{" "}
                   <span className="text-ink-2">
                     {device.label}: {device.deviceClass}
                   </span>
@@ -101,7 +111,7 @@ export function StageSheet({ kind, topology, initial, onChange, ...props }: Stag
               >
                 Work out parts
               </button>
-              <SeriesChoosers stage={stage} id={`${id}-series`} />
+              <PartChoosers stage={stage} id={`${id}-choice`} />
             </div>
           )}
         </section>
@@ -125,19 +135,19 @@ export function StageSheet({ kind, topology, initial, onChange, ...props }: Stag
           <ResultsTable stage={stage} />
           <Warnings warnings={stage.analysis.warnings} />
         </section>
+        {mainCurves.length > 0 && (
+          <section className="stage-first-curve" aria-label="Main curves">
+            <Curves topology={topology} curves={mainCurves} state={drawn} fileName={fileName} />
+          </section>
+        )}
       </div>
       <StagePanels
         panels={stagePanels}
         stage={{ kind, topology, state, designators, readOnly, apply: stage.actions.applyParts }}
       />
       <section className="stage-curves" aria-label="Curves and network">
-        <Curves topology={topology} state={drawn} fileName={fileName} />
-        <figure className="plot" aria-labelledby={`${id}-network`}>
-          <figcaption className="plot-head">
-            <h3 id={`${id}-network`}>Network</h3>
-          </figcaption>
-          <NetworkDrawing topology={topology} parts={state.parts} designators={designators} lit={lit} />
-        </figure>
+        <Curves topology={topology} curves={otherCurves} state={drawn} fileName={fileName} />
+        <NetworkDrawing topology={topology} parts={state.parts} designators={designators} lit={lit} />
       </section>
       {topology.leavesOut.length > 0 && (
         <p className="sheet-foot">

@@ -1,4 +1,4 @@
-import { formatQuantity } from "#lib/circuit/index.ts";
+import { formatQuantity, midSentence } from "#lib/circuit/index.ts";
 import { stepFigure } from "#lib/client/stage/stepping.ts";
 import { figureText, readFigure, readWindow, windowText } from "#lib/wire/figureText.ts";
 import { FieldNote } from "./FieldNote.tsx";
@@ -77,7 +77,7 @@ function TargetField({ stage, target, id, refusalId, readOnly }: TargetFieldProp
       </div>
       <p className="target-window">
         <label htmlFor={`${id}-window`}>
-          window ±<span className="sr-only"> per cent, {field.label.toLowerCase()}</span>
+          window ±<span className="sr-only"> per cent, {midSentence(field.label)}</span>
         </label>
         <QuantityInput
           fields={fields}

@@ -70,12 +70,28 @@ export function useStage(
         : designExactly(topology, state.targets, state.conditions, decidedParts(topology, state.parts)),
     [topology, state.targets, state.conditions, state.parts],
   );
-  const telling = kind.telling[0];
+  const [watched, setWatched] = useState(() => firstMoved(kind, topology, initial));
   const moves = useMemo(
-    () => sensitivities(topology, state.parts, state.conditions, telling),
-    [topology, state.parts, state.conditions, telling],
+    () => sensitivities(topology, state.parts, state.conditions, watched),
+    [topology, state.parts, state.conditions, watched],
   );
   const refusal = design && isRefusal(design) ? design : undefined;
   const exact = design && !isRefusal(design) ? design : undefined;
-  return { kind, topology, state, fields, actions, analysis, ideal, exact, refusal, moves, telling };
+  return { kind, topology, state, fields, actions, analysis, ideal, exact, refusal, moves, watched, setWatched };
+}
+
+/** Units whose figures are logarithms already: a change of them in per cent says nothing. */
+const logarithms = new Set(["dB", "semitones", "cents/°"]);
+
+/** Results whose change with a part says something: the telling ones, and those that are aimed at. */
+export function watchable(kind: KindBrief, topology: AnyTopology): string[] {
+  const keys = new Set([...kind.telling, ...Object.values(topology.targets).map(({ result }) => result)]);
+  return [...keys].filter((key) => !logarithms.has(topology.results[key]?.unit ?? "dB"));
+}
+
+/** The first of them that any part moves: a count of hits, say, stays what it is. */
+function firstMoved(kind: KindBrief, topology: AnyTopology, { parts, conditions }: StageState): string {
+  const moved = (result: string) =>
+    Object.values(sensitivities(topology, parts, conditions, result)).some((slope) => Math.abs(slope) > 0.005);
+  return watchable(kind, topology).find(moved) ?? kind.telling[0];
 }

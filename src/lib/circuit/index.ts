@@ -7,6 +7,8 @@ export { preferredSeries, seriesNames, type SeriesName } from "./parts/preferred
 export { isInSeries, nearestInSeries, seriesBetween, stepAlongSeries, type ValueSeries } from "./parts/series.ts";
 export { potFraction, type PotLaw } from "./parts/potLaw.ts";
 export * from "./stage/fields.ts";
+export { midSentence } from "./stage/midSentence.ts";
+export { formatShown, perCent, printShown, type Shown } from "./stage/shown.ts";
 export type { Warning, Severity } from "./stage/warning.ts";
 export type { Citation, Formula, Provenance } from "./stage/citation.ts";
 export { spacedValues, type Axis, type Curve, type Line } from "./stage/curve.ts";

@@ -13,8 +13,12 @@ const reads = (text: string, unit: Unit, value: number) => {
   return parsed.ok && parsed.value === value;
 };
 
+/** What stands in the field of a part that is not fitted, and in place of its value everywhere else. */
+export const notFitted = "none";
+
 /** A component value as it stands in its field: 4k7. Never rounded: reading it gives the value again. */
 export function partText(value: number, unit: Unit): string {
+  if (value === 0) return notFitted;
   const marked = formatPartValue(value, unit);
   return reads(marked, unit, value) ? marked : figureText(value, unit);
 }
@@ -32,6 +36,7 @@ export type Reading = { ok: true; value: number } | { ok: false; message: string
 
 /** What was typed into a field, or why it cannot be computed with. */
 export function readFigure(text: string, field: NumberField): Reading {
+  if ("partClass" in field && text.trim().toLowerCase() === notFitted) text = "0";
   const parsed = parseQuantity(text, field.unit);
   if (!parsed.ok) return { ok: false, message: parsed.reason };
   const [least, most] = acceptedRange(field);

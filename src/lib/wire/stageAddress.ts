@@ -44,7 +44,7 @@ export function readAddress(topologies: readonly AnyTopology[], query: URLSearch
   const found = topologies.find(({ id }) => id === asked);
   const topology = found ?? topologies[0]!;
   if (asked !== null && !found) {
-    faults.push(`There is no topology “${shortened(asked)}” here; this is ${topology.name.toLowerCase()}.`);
+    faults.push(`There is no topology “${shortened(asked)}” here; what stands here is ${topology.name}.`);
   }
   const start = startingState(topology);
   const state: StageState = {

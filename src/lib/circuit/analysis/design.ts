@@ -1,4 +1,5 @@
 import { completeConditions, type PlainConditions, type PlainValues } from "../stage/defaults.ts";
+import { midSentence } from "../stage/midSentence.ts";
 import type { AnyTopology, DesignRefusal } from "../stage/topology.ts";
 
 const maxSteps = 80;
@@ -44,10 +45,10 @@ export function isRefusal(outcome: PlainValues | DesignRefusal): outcome is Desi
 }
 
 function unreachable(topology: AnyTopology, field: string): DesignRefusal {
-  const label = topology.targets[field]!.label.toLowerCase();
+  const label = midSentence(topology.targets[field]!.label);
   return {
     refused: true,
     field,
-    message: `Under these conditions no parts reach the ${label} asked for. Lower it, or take a faster op amp or a lower source resistance.`,
+    message: `Under these conditions no parts reach the ${label} asked for. Move it towards its usual value, or ease the conditions that are switched on.`,
   };
 }

@@ -36,7 +36,7 @@ export interface Solution {
 
 /** Said beside every ranking. */
 export const meritStatement =
-  "Ranked by the sum of squared errors, each measured in its target's window, plus a small cost for resistors whose geometric mean is far from 20 kΩ.";
+  "Ranked by the sum of squared errors, each measured in its target's window, plus a small cost for resistors whose geometric mean is far from 20 kΩ and a larger one for values outside the usual range.";
 
 /** Low enough for noise and stray capacitance, high enough for the op amp to drive: common practice, no source. */
 const comfortableResistance = 20e3;
@@ -66,7 +66,8 @@ export function solveStage(topology: AnyTopology, request: SolveRequest): Soluti
     else designs.push({ parts, decided: new Set(Object.keys(decided)) });
   }
   if (designs.length === 0) return refusal!;
-  designs.sort((a, b) => impedanceCost(topology, a.parts) - impedanceCost(topology, b.parts));
+  const cost = ({ parts }: { parts: PlainValues }) => impedanceCost(topology, parts) + unusualCost(topology, parts);
+  designs.sort((a, b) => cost(a) - cost(b));
   const exactParts = designs[0]!.parts;
   const combinations = designs
     .flatMap(({ parts, decided }) => snapped(topology, parts, decided, request.series ?? {}))
@@ -132,7 +133,7 @@ function weigh(
 ): Candidate | undefined {
   const results = finite(topology.analyse({ parts, conditions: conditions as never }, request.targets));
   const errors: PlainValues = {};
-  let merit = impedanceWeight * impedanceCost(topology, parts);
+  let merit = impedanceWeight * impedanceCost(topology, parts) + unusualCost(topology, parts);
   for (const [key, wanted] of Object.entries(request.targets)) {
     const field = topology.targets[key]!;
     const got = results[field.result];
@@ -155,6 +156,17 @@ function impedanceCost(topology: AnyTopology, parts: PlainValues): number {
     Math.max(0, Math.log(1e3 / comfortableResistance) - x, x - Math.log(1e6 / comfortableResistance)),
   );
   return mean ** 2 + 4 * beyond.reduce((sum, x) => sum + x ** 2, 0);
+}
+
+/** Squared log distance of each fitted part from what the trade uses of it. */
+function unusualCost(topology: AnyTopology, parts: PlainValues): number {
+  let cost = 0;
+  for (const [key, { least, most }] of Object.entries(topology.parts)) {
+    const value = parts[key]!;
+    if (value <= 0 || (value >= least && value <= most)) continue;
+    cost += Math.log(value / (value < least ? least : most)) ** 2;
+  }
+  return cost;
 }
 
 function finite(

@@ -70,15 +70,23 @@ function engineering(value: number, digits: number): { mantissa: string; prefix:
 }
 
 function plainFigure(value: number, unit: Unit, digits: number): string {
-  if (unit === "dB" || unit === "°" || unit === "semitones" || unit === "cents/°" || unit === "K" || unit === "%")
+  if (unit === "dB" || unit === "°" || unit === "semitones" || unit === "cents/°" || unit === "K")
     return value.toFixed(2).replace(/^-(0\.00)$/, "$1");
   if (value === 0) return "0";
   const size = Math.abs(value);
+  if (unit === "%") return percentFigure(value, size, digits);
   if (size >= 1e6 || size < 1e-4)
     return value
       .toExponential(digits - 1)
       .replace(/e([+-])(\d+)/, (_, sign, power) => ` × 10${superscript(`${sign === "-" ? "-" : ""}${power}`)}`);
   return value.toPrecision(digits).includes("e") ? value.toFixed(0) : value.toPrecision(digits);
+}
+
+/** Below a millionth of the whole nobody can tell the figures apart. */
+function percentFigure(value: number, size: number, digits: number): string {
+  if (size < 1e-4) return value < 0 ? "> -0.0001" : "< 0.0001";
+  if (size >= 1e6) return value.toExponential(2).replace(/e\+(\d+)/, (_, power) => ` × 10${superscript(power)}`);
+  return Number(value.toPrecision(Math.min(digits, size < 1 ? 2 : 3))).toString();
 }
 
 const raised: Record<string, string> = {

@@ -18,6 +18,7 @@ export const units = {
   "A/√Hz": { prefixed: true, spoken: "amperes per root hertz" },
   "V/K": { prefixed: true, spoken: "volts per kelvin" },
   "1/K": { prefixed: false, spoken: "per kelvin" },
+  "ppm/K": { prefixed: false, spoken: "parts per million per kelvin" },
   dB: { prefixed: false, spoken: "decibels" },
   "°": { prefixed: false, spoken: "degrees" },
   semitones: { prefixed: false, spoken: "semitones" },

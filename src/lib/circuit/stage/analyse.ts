@@ -1,6 +1,7 @@
 import { formatQuantity } from "../quantity/format.ts";
 import type { NumberField, PartClass } from "./fields.ts";
 import { completeConditions, type PlainConditions, type PlainValues } from "./defaults.ts";
+import { formatShown } from "./shown.ts";
 import { targetWindows, targetStates, type TargetState, type Windows } from "./targets.ts";
 import type { AnyTopology, Limit } from "./topology.ts";
 import type { Conditions, Parts, ResultValues, Results } from "./values.ts";
@@ -70,8 +71,8 @@ function crossedLimits(
     const found = limit.check(checked);
     if (!found) continue;
     const message = limit.template
-      .replaceAll("{value}", formatQuantity(found.value, limit.unit))
-      .replaceAll("{limit}", formatQuantity(found.limit, limit.unit))
+      .replaceAll("{value}", formatShown(found.value, limit))
+      .replaceAll("{limit}", formatShown(found.limit, limit))
       .replaceAll("{detail}", found.detail ?? "");
     const { code, severity, unit } = limit;
     warnings.push({ code, severity, message, value: found.value, limit: found.limit, unit });

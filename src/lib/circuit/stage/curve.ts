@@ -1,11 +1,11 @@
 import type { Unit } from "../quantity/units.ts";
+import type { Shown } from "./shown.ts";
 
 export interface Axis {
   quantity: string;
   unit: Unit;
   scale: "linear" | "logarithmic";
-  /** How a person reads it where that is not the plain unit: a rotation of 0 to 1 as degrees. */
-  shown?: { unit: Unit; factor: number };
+  shown?: Shown;
 }
 
 /** One line of a curve: what follows the present state, or a companion such as "pot at 0°". */

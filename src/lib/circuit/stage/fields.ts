@@ -1,4 +1,5 @@
 import type { Unit } from "../quantity/units.ts";
+import type { Shown } from "./shown.ts";
 
 /**
  * Descriptors of what a stage takes and gives. Forms, request schemas, saved documents, plots, parts lists and the
@@ -52,7 +53,12 @@ export interface ChoiceField extends Named {
   options: readonly { value: string; label: string }[];
 }
 
-export type ConditionField = NumberField | ChoiceField;
+/** A condition that only means something while a part is fitted names that part. */
+interface OfPart {
+  ofPart?: string;
+}
+
+export type ConditionField = (NumberField | ChoiceField) & OfPart;
 
 export interface ResultField {
   label: string;
@@ -61,6 +67,8 @@ export interface ResultField {
   /** Id of the formula that gives it. */
   formula: string;
   help?: string;
+  /** How it is shown where that is not the plain unit: a share as per cent. */
+  shown?: Shown;
   /** A yes-or-no result, 1 or 0, shown with these words. */
   words?: { yes: string; no: string };
   /** Several figures of one kind (hit times, gains) instead of one. */
@@ -119,13 +127,13 @@ export const pot = (field: PartInput): PartField => ({
 /** A wanted figure. */
 export const target = (field: Omit<TargetField, "type" | "scale">): TargetField => ({ ...logarithmic, ...field });
 
-type ConditionInput = Omit<NumberField, "type" | "scale"> & { scale?: NumberField["scale"] };
+type ConditionInput = Omit<NumberField, "type" | "scale"> & { scale?: NumberField["scale"] } & OfPart;
 
 /** A figure of the stage's surroundings, spaced logarithmically unless said. Whether it may be absent stays in its type. */
 export const condition = <const F extends ConditionInput>(field: F): F & NumberField => ({ ...logarithmic, ...field });
 
 /** A choice among named options, whose values stay in its type. */
-export const choice = <const F extends Omit<ChoiceField, "type">>(field: F): F & ChoiceField => ({
+export const choice = <const F extends Omit<ChoiceField, "type"> & OfPart>(field: F): F & ChoiceField => ({
   ...field,
   type: "choice",
 });

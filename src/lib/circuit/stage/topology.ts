@@ -17,6 +17,7 @@ import type {
   Targets,
   TargetValues,
 } from "./values.ts";
+import type { Shown } from "./shown.ts";
 import type { Severity } from "./warning.ts";
 import type { Unit } from "../quantity/units.ts";
 
@@ -50,6 +51,8 @@ export interface Limit<P extends Parts, C extends Conditions, R extends Results>
   code: string;
   severity: Severity;
   unit: Unit;
+  /** How its figures are put in the message where that is not the plain unit. */
+  shown?: Shown;
   /** Braces are filled in: {value} and {limit} with units, {detail} with what `check` adds. */
   template: string;
   source: string;

@@ -3,6 +3,7 @@ import { crestOf } from "../../stage/signal.ts";
 import type { Limit } from "../../stage/topology.ts";
 import type { Conditions, Parts } from "../../stage/values.ts";
 import type { outputNoise, potConditions, responseResults, retuneResults, surroundings } from "./fields.ts";
+import { perCent } from "../../stage/shown.ts";
 
 type SharedConditions = typeof surroundings;
 type SharedResults = typeof responseResults & typeof outputNoise & typeof retuneResults;
@@ -30,6 +31,7 @@ export const capacitorLimits: readonly SharedLimit[] = [
     code: "class-2-ceramic",
     severity: "caution",
     unit: "",
+    shown: perCent,
     source: "dielectrics",
     template:
       "Class 2 ceramic in a filter: its capacitance falls with voltage by {value} and more (at most {limit} is sound here), ages and is microphonic. Take film or class 1.",
@@ -76,6 +78,7 @@ export function sourceLimit(
     code: "source-loads-input",
     severity: "caution",
     unit: "",
+    shown: perCent,
     source,
     template: `The source resistance is {value} of ${name}, above {limit}: it changes the response. The figures here include it; a pot in front changes it as it turns.`,
     check: ({ parts, conditions }) => {

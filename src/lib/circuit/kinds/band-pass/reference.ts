@@ -83,7 +83,7 @@ export const reference: readonly ReferenceCase[] = [
       place: "example 3.13(a): KRC band-pass, f0 = 1 kHz, bandwidth 100 Hz",
       howKnown: "read",
     },
-    note: "Read in a companion of the book's worked examples. The source truncates R_F, 28.586 kΩ exactly, and calls the gain resistors RB (feedback) and RA.",
+    note: "Read in a companion of the book's worked examples. The source truncates R_F, 28.586 kΩ exactly, and calls the gain resistors R_B (feedback) and R_A.",
   },
   {
     id: "sallen-key-q10-gain",

@@ -1,5 +1,6 @@
 import { common } from "../../stage/commonConditions.ts";
 import { capacitor, choice, condition, resistor, target, type ResultField } from "../../stage/fields.ts";
+import { perCent } from "../../stage/shown.ts";
 
 export const parts = {
   rt: resistor({
@@ -132,12 +133,13 @@ export const results = {
     label: "First interval against the rest",
     symbol: "",
     unit: "",
+    shown: perCent,
     formula: "first",
-    help: "−0.19 is 19 % shorter.",
+    help: "Below zero it is shorter.",
   },
   highTime: { label: "Output high for", symbol: "t_h", unit: "s", formula: "period" },
   lowTime: { label: "Output low for", symbol: "t_l", unit: "s", formula: "period" },
-  thresholdShare: { label: "Threshold, share of the swing", symbol: "β", unit: "", formula: "period" },
+  thresholdShare: { label: "Threshold, share of the swing", symbol: "β", unit: "", shown: perCent, formula: "period" },
   buzzFrequency: { label: "Rate of the hits", symbol: "1/T", unit: "Hz", formula: "period" },
   gateLength: { label: "Gate length", symbol: "T_g", unit: "s", formula: "gate" },
   gatedHits: {
@@ -149,11 +151,18 @@ export const results = {
   },
   hitsLeast: { label: "Hits, least at worst case", symbol: "N_min", unit: "", formula: "worst-case" },
   hitsMost: { label: "Hits, most at worst case", symbol: "N_max", unit: "", formula: "worst-case" },
-  ratioError: { label: "Error of gate over spacing, worst case", symbol: "", unit: "", formula: "worst-case" },
+  ratioError: {
+    label: "Error of gate over spacing, worst case",
+    symbol: "",
+    unit: "",
+    shown: perCent,
+    formula: "worst-case",
+  },
   ratioRoom: {
     label: "Error that the count stands",
     symbol: "",
     unit: "",
+    shown: perCent,
     formula: "worst-case",
     help: "Of the gate length over the spacing.",
   },

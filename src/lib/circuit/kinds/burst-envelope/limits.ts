@@ -1,5 +1,6 @@
 import type { Limit } from "../../stage/topology.ts";
 import { mostHits, type C, type P, type R } from "./analyse.ts";
+import { perCent } from "../../stage/shown.ts";
 
 /** What the trade warns of in this network (trade brief 2.3). */
 export const limits: readonly Limit<P, C, R>[] = [
@@ -51,6 +52,7 @@ export const limits: readonly Limit<P, C, R>[] = [
     code: "first-interval",
     severity: "caution",
     unit: "",
+    shown: perCent,
     source: "practice",
     template:
       "The first interval differs from the others by {value} of them, more than {limit}: the capacitor does not rest at the lower threshold. Hold it there between bursts.",
@@ -85,6 +87,7 @@ export const limits: readonly Limit<P, C, R>[] = [
     code: "loose-capacitors",
     severity: "caution",
     unit: "",
+    shown: perCent,
     source: "practice",
     template:
       "Capacitors of {value} with four hits or more: above {limit} the count is a matter of luck. Take capacitors of 5 %.",

@@ -1,5 +1,6 @@
 import { common } from "../../stage/commonConditions.ts";
 import { choice, condition, target, type ResultField } from "../../stage/fields.ts";
+import { perCent } from "../../stage/shown.ts";
 
 export const targets = {
   ratio: target({
@@ -126,6 +127,7 @@ export const results = {
     label: "Error of the ratio",
     symbol: "ε",
     unit: "",
+    shown: perCent,
     formula: "split",
     help: "Against the ratio of the resistors, or 1.",
   },
@@ -133,6 +135,7 @@ export const results = {
     label: "Share of base current",
     symbol: "ε_β",
     unit: "",
+    shown: perCent,
     formula: "base-current",
     help: "Error with only the base currents at work.",
   },
@@ -140,6 +143,7 @@ export const results = {
     label: "Share of the Early effect",
     symbol: "ε_A",
     unit: "",
+    shown: perCent,
     formula: "early",
     help: "Error with only the Early effect at work.",
   },
@@ -147,6 +151,7 @@ export const results = {
     label: "Share of the mismatch",
     symbol: "ε_V",
     unit: "",
+    shown: perCent,
     formula: "mismatch",
     help: "What the mismatch, warmth included, changes with all else at work.",
   },
@@ -154,8 +159,9 @@ export const results = {
     label: "Share of the junctions",
     symbol: "ε_j",
     unit: "",
+    shown: perCent,
     formula: "split",
-    help: "Error of ideal transistors against the ratio of the resistors: unequal currents need unequal VBE.",
+    help: "Error of ideal transistors against the ratio of the resistors: unequal currents need unequal V_BE.",
   },
   outputResistance: { label: "Output resistance", symbol: "R_out", unit: "Ω", formula: "output-resistance" },
   textbookOutputResistance: {
@@ -191,6 +197,7 @@ export const results = {
     label: "Error at a hundredth of the current",
     symbol: "ε_tail",
     unit: "",
+    shown: perCent,
     formula: "tail",
     help: "Where a decay ends.",
   },

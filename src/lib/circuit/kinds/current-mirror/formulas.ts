@@ -53,7 +53,7 @@ const pairEarly: Formula = {
   id: "early",
   name: "Early effect",
   tex: String.raw`1 + \varepsilon_A = \frac{1 + V_{CE2}/V_A}{1 + V_{CE1}/V_A}`,
-  holds: "Exact without degeneration; the follower's VBE is taken as 0.6 V in V_CE1.",
+  holds: "Exact without degeneration; the follower's V_BE is taken as 0.6 V in V_CE1.",
   sources: ["mirror-derivation", "early-note"],
 };
 
@@ -132,7 +132,7 @@ export const wilsonFormulas: readonly Formula[] = [
     id: "early",
     name: "Early effect",
     tex: String.raw`1 + \varepsilon_A = \frac{1 + V_{BE}/V_A}{1 + (V_{BE} + V_{BE3})/V_A} \approx 1 - \frac{V_{BE}}{V_A}`,
-    holds: "The inner pair differ by one VBE; the output's own voltage hardly matters.",
+    holds: "The inner pair differ by one V_BE; the output's own voltage hardly matters.",
     sources: ["mirror-derivation"],
   },
   {
@@ -140,7 +140,7 @@ export const wilsonFormulas: readonly Formula[] = [
     name: "Output resistance, textbook",
     tex: String.raw`\frac{\beta\,r_o}{2},\quad r_o = \frac{V_A}{I_{ref}}`,
     holds:
-      "Leaves out VCE, which raises it by VCE/VA, and a share near β·V_T/(2·V_A), which lowers it. Not stated without base currents.",
+      "Leaves out V_CE, which raises it by V_CE/V_A, and a share near β·V_T/(2·V_A), which lowers it. Not stated without base currents.",
     sources: ["sedra-smith"],
   },
   {

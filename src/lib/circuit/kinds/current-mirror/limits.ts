@@ -1,6 +1,7 @@
 import type { Limit } from "../../stage/topology.ts";
 import type { Parts } from "../../stage/values.ts";
 import type { C, R } from "./figures.ts";
+import { perCent } from "../../stage/shown.ts";
 
 /** Above this VCE without degeneration the Early effect alone passes 15 % at a usual 50 V. */
 const mostCollectorVoltage = 10;
@@ -51,9 +52,10 @@ const errorUntrimmed: Limit<Parts, C, R> = {
   code: "error-untrimmed",
   severity: "caution",
   unit: "",
+  shown: perCent,
   source: "practice",
   template:
-    "The ratio is off by {value} (as a share of what the resistors call for), more than {limit}, and nothing downstream trims it. Fit a trim, or take a mirror of less error.",
+    "The ratio is off by {value} of what the resistors call for, more than {limit}, and nothing downstream trims it. Fit a trim, or take a mirror of less error.",
   check: ({ results, conditions }) => {
     const error = results.ratioError;
     if (conditions.trim !== "none" || error === undefined || Math.abs(error) <= mostError) return undefined;

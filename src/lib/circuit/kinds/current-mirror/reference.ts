@@ -34,7 +34,7 @@ export const reference: readonly ReferenceCase[] = [
       place: "problem 8.11 (1 mA, VA = 90 V)",
       howKnown: "from memory",
     },
-    note: "The source takes ro = VA/I; the exact slope is VBE/VA higher.",
+    note: "The source takes r_o = V_A/I; the exact slope is V_BE/V_A higher.",
   },
   {
     id: "simple-into-bias-pin",

@@ -3,7 +3,7 @@ import type { Citation } from "../../stage/citation.ts";
 export const sources = [
   {
     id: "mirror-derivation",
-    title: "Currents at the reference node, with Ic = Is·exp(VBE/VT)·(1 + VCE/VA) and Ib = Ic/β",
+    title: "Currents at the reference node, with I_c = I_s·exp(V_BE/V_T)·(1 + V_CE/V_A) and I_b = I_c/β",
     place: "this page; checked by an independent solution with scipy",
     provenance: "derived",
   },

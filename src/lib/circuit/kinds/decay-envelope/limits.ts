@@ -1,5 +1,6 @@
 import type { Limit } from "../../stage/topology.ts";
 import { chargingOf, dischargeAt, type C, type P, type R } from "./analyse.ts";
+import { perCent } from "../../stage/shown.ts";
 
 /** What a usual op amp gives before its short-circuit limit takes over. From memory. */
 const opAmpCurrent = 20e-3;
@@ -62,6 +63,7 @@ export const limits: readonly Limit<P, C, R>[] = [
     code: "knob-changes-level",
     severity: "caution",
     unit: "",
+    shown: perCent,
     source: "practice",
     template:
       "R_S is {value} of R_min, above {limit}: the decay knob changes the loudness too. Lower R_S or raise R_min.",
@@ -107,6 +109,7 @@ export const limits: readonly Limit<P, C, R>[] = [
     code: "dead-band-shortens",
     severity: "note",
     unit: "",
+    shown: perCent,
     source: "derivation",
     template:
       "The dead band is {value} of the peak, above {limit}: read the decay as heard, not the −60 dB time of the capacitor.",
@@ -116,6 +119,7 @@ export const limits: readonly Limit<P, C, R>[] = [
     code: "tail-chopped",
     severity: "caution",
     unit: "",
+    shown: perCent,
     source: "practice",
     template:
       "The dead band is {value} of the peak, above {limit}: the tail is cut off audibly. Return the decay to a small voltage of its own, or drive a stage without a dead band.",
@@ -126,6 +130,7 @@ export const limits: readonly Limit<P, C, R>[] = [
     code: "class-2-ceramic",
     severity: "caution",
     unit: "",
+    shown: perCent,
     source: "dielectrics",
     template:
       "Class 2 ceramic loses {value} and more of its capacitance to the voltage on it (at most {limit} is sound here): the early decay is faster than the late one. It ages and is microphonic. Take film.",
@@ -135,6 +140,7 @@ export const limits: readonly Limit<P, C, R>[] = [
     code: "electrolytic",
     severity: "caution",
     unit: "",
+    shown: perCent,
     source: "memory",
     template:
       "An electrolytic strays by {value} and more (at most {limit} is sound here) and leaks: every board decays differently. Take film.",

@@ -13,6 +13,7 @@ import {
   type SourceState,
 } from "./analyse.ts";
 import { bandPassTransfer, spreadRule } from "./model.ts";
+import { perCent } from "../../stage/shown.ts";
 
 const positive = [Number.MIN_VALUE, Number.MAX_VALUE] as const;
 const decibels = (ratio: number) => 20 * Math.log10(ratio);
@@ -39,7 +40,7 @@ export const curves: readonly Curve<SourceState>[] = [
     id: "peaks",
     name: "Share of time beyond a level",
     x: { quantity: "Level, either sign", unit: "V", scale: "linear" },
-    y: { quantity: "Share", unit: "", scale: "logarithmic" },
+    y: { quantity: "Share", unit: "", shown: perCent, scale: "logarithmic" },
     // A little past the four standard deviations that are planned for.
     domain: (state) => [0, 4.2 * levelOf(state)],
     defined: [0, Number.MAX_VALUE],

@@ -1,5 +1,6 @@
 import { common } from "../../stage/commonConditions.ts";
 import { capacitor, choice, condition, resistor, target, type ResultField } from "../../stage/fields.ts";
+import { perCent } from "../../stage/shown.ts";
 
 export const parts = {
   rn: resistor({
@@ -201,7 +202,13 @@ export const results = {
     formula: "swing",
     help: "Of the swing over four standard deviations.",
   },
-  clipProbability: { label: "Share of time clipped", symbol: "p", unit: "", formula: "clip-probability" },
+  clipProbability: {
+    label: "Share of time clipped",
+    symbol: "p",
+    unit: "",
+    shown: perCent,
+    formula: "clip-probability",
+  },
   noiseBandwidth: {
     label: "Noise bandwidth of the board",
     symbol: "B_n",
@@ -261,6 +268,7 @@ export const results = {
     label: "Spread from hit to hit",
     symbol: "s",
     unit: "",
+    shown: perCent,
     formula: "hit-spread",
     help: "Standard deviation of the level: half that of the power.",
   },
@@ -269,6 +277,7 @@ export const results = {
     label: "Spread by the rule for long hits",
     symbol: "s_0",
     unit: "",
+    shown: perCent,
     formula: "hit-rule",
   },
   repeatPeriod: { label: "Pseudo-noise repeats after", symbol: "T_p", unit: "s", formula: "pseudo-noise" },

@@ -1,6 +1,7 @@
 import type { Limit } from "../../stage/topology.ts";
 import { crestOf } from "../../stage/signal.ts";
 import type { C, P, R } from "./analyse.ts";
+import { perCent } from "../../stage/shown.ts";
 
 /** What the rail should stand above the breakdown, V. */
 const railMargin = 3;
@@ -113,6 +114,7 @@ export const limits: readonly Limit<P, C, R>[] = [
     code: "short-hit",
     severity: "note",
     unit: "",
+    shown: perCent,
     source: "derivation",
     template:
       "For hits this short the rule for the spread is {value} off, more than {limit}: the exact figure stands beside it.",

@@ -3,6 +3,7 @@ import type { Parts, ResultValues } from "../../stage/values.ts";
 import type { C, R } from "./figures.ts";
 import { swingOn } from "../../device/opAmp.ts";
 import type { resistorLoadResults } from "./results.ts";
+import { perCent } from "../../stage/shown.ts";
 
 const mostSineDistortion = 5e-3;
 const mostNoiseDistortion = 10 ** (-31 / 20);
@@ -25,8 +26,9 @@ export const limits: readonly OtaLimit[] = [
     code: "sine-distorts",
     severity: "caution",
     unit: "",
+    shown: perCent,
     source: "pair-derivation",
-    template: "The sine is distorted by {value}, more than {limit} (0.5 %). Divide it down further, or use the diodes.",
+    template: "The sine is distorted by {value}, more than {limit}. Divide it down further, or use the diodes.",
     check: ({ conditions, results: { distortion } }) =>
       conditions.signal === "sine" && distortion !== undefined && distortion > mostSineDistortion
         ? { value: distortion, limit: mostSineDistortion }
@@ -36,6 +38,7 @@ export const limits: readonly OtaLimit[] = [
     code: "noise-distorts",
     severity: "caution",
     unit: "",
+    shown: perCent,
     source: "pair-derivation",
     template:
       "What is not the noise scaled is {value} of it, more than {limit} (−31 dB). Divide it down further, or use the diodes.",
@@ -132,6 +135,7 @@ export const limits: readonly OtaLimit[] = [
     code: "unequal-inputs-with-diodes",
     severity: "caution",
     unit: "",
+    shown: perCent,
     source: "pair-derivation",
     template:
       "With the diodes in use the two inputs see resistances that differ by {value}, more than {limit}: half the diode current through the difference outweighs the amplifier's own offset.",
@@ -147,6 +151,7 @@ export const limits: readonly OtaLimit[] = [
     code: "source-in-divider",
     severity: "caution",
     unit: "",
+    shown: perCent,
     source: "practice",
     template:
       "The source resistance is {value} of the divider, above {limit}: a pot in front changes the gain as it turns. Buffer it.",

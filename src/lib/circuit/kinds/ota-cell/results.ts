@@ -1,4 +1,5 @@
 import type { ResultField } from "../../stage/fields.ts";
+import { perCent, perMillion } from "../../stage/shown.ts";
 
 export const results = {
   transconductance: { label: "Transconductance", symbol: "g_m", unit: "S", formula: "transconductance" },
@@ -29,6 +30,7 @@ export const results = {
     label: "Distortion",
     symbol: "d",
     unit: "",
+    shown: perCent,
     formula: "distortion",
     help: "Total harmonic distortion of a sine; of noise, what is not the signal scaled, over the signal.",
   },
@@ -39,9 +41,9 @@ export const results = {
     symbol: "D",
     unit: "",
     formula: "diodes",
-    help: "How many times 2·VT the diode current drops.",
+    help: "How many times 2·V_T the diode current drops.",
   },
-  temperatureCoefficient: { label: "Drift of the gain", symbol: "α", unit: "1/K", formula: "drift" },
+  temperatureCoefficient: { label: "Drift of the gain", symbol: "α", unit: "1/K", shown: perMillion, formula: "drift" },
   warmingDb: { label: "Gain from 10 °C to 40 °C", symbol: "Δ_T", unit: "dB", formula: "drift" },
   offsetSum: { label: "Offset, worst sum", symbol: "V_Σ", unit: "V", formula: "thump" },
   thump: { label: "Thump", symbol: "V_th", unit: "V", formula: "thump", help: "What the envelope alone puts out." },

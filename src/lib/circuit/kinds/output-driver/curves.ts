@@ -3,6 +3,7 @@ import { magnitudeDbAt, type Transfer } from "../../network/transfer.ts";
 import type { Curve } from "../../stage/curve.ts";
 import type { ConditionValues } from "../../stage/values.ts";
 import { swingOf, type C } from "./figures.ts";
+import { perCent } from "../../stage/shown.ts";
 
 interface DriverState {
   conditions: ConditionValues<C>;
@@ -38,7 +39,7 @@ export function driverCurves<S extends DriverState>(
       id: "clipping",
       name: "Share of time clipped, noise",
       x: { quantity: "Level at the op amp", unit: "V", scale: "logarithmic" },
-      y: { quantity: "Share", unit: "", scale: "logarithmic" },
+      y: { quantity: "Share", unit: "", shown: perCent, scale: "logarithmic" },
       // From 4.5 standard deviations to well into clipping.
       domain: (state) => [swingOf(state.conditions) / 4.5 || 1, swingOf(state.conditions) / 0.5 || 10],
       defined: [Number.MIN_VALUE, Number.MAX_VALUE],

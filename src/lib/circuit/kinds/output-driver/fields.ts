@@ -1,5 +1,6 @@
 import { common } from "../../stage/commonConditions.ts";
 import { capacitor, choice, condition, resistor, target, type ResultField } from "../../stage/fields.ts";
+import { perCent } from "../../stage/shown.ts";
 
 const gainResistor = { least: 1e3, most: 1e6 };
 
@@ -180,8 +181,9 @@ export const results = {
     label: "Share of time clipped",
     symbol: "p",
     unit: "",
+    shown: perCent,
     formula: "clip-probability",
-    help: "Of a sine: 1 where its peaks clip at all.",
+    help: "Of a sine: all of it where its peaks clip at all.",
   },
   noiseGain: { label: "Noise gain", symbol: "N", unit: "", formula: "bandwidth" },
   bandwidth: { label: "Bandwidth", symbol: "f_3", unit: "Hz", formula: "bandwidth", help: "Of the op amp alone." },

@@ -68,6 +68,7 @@ export const conditions = {
   ...each("level", (path) =>
     condition({
       label: `Level of path ${path}`,
+      ofPart: `r${path}`,
       symbol: `V_${path}`,
       unit: "V",
       default: null,
@@ -80,6 +81,7 @@ export const conditions = {
   ...each("parity", (path) =>
     choice({
       label: `Inversions in path ${path}`,
+      ofPart: `r${path}`,
       symbol: "",
       default: "even",
       options: [
@@ -92,6 +94,7 @@ export const conditions = {
   ...each("source", (path) =>
     condition({
       label: `Source resistance of path ${path}`,
+      ofPart: `r${path}`,
       symbol: `R_s${path}`,
       unit: "Ω",
       default: 0,

@@ -1,6 +1,7 @@
 import type { Limit } from "../../stage/topology.ts";
 import { paths } from "./fields.ts";
 import { fittedPaths, type C, type P, type R } from "./analyse.ts";
+import { perCent } from "../../stage/shown.ts";
 
 /** What the trade warns of in a sum (trade brief 2.16). */
 export const limits: readonly Limit<P, C, R>[] = [
@@ -8,6 +9,7 @@ export const limits: readonly Limit<P, C, R>[] = [
     code: "paths-subtract",
     severity: "caution",
     unit: "",
+    shown: perCent,
     source: "sum-derivation",
     template:
       "The paths have unequal numbers of inversions and a correlation of {value}, above {limit}: their levels subtract. Take one path from the other input, or add an inversion.",
@@ -21,6 +23,7 @@ export const limits: readonly Limit<P, C, R>[] = [
     code: "source-loads-path",
     severity: "caution",
     unit: "",
+    shown: perCent,
     source: "practice",
     template:
       "The source resistance of path {detail} is {value} of its resistor, above {limit}: its gain changes with the state of what drives it. Take a larger resistor, or buffer the path.",

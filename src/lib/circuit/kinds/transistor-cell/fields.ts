@@ -1,5 +1,6 @@
 import { common } from "../../stage/commonConditions.ts";
 import { capacitor, condition, resistor, target, type ResultField } from "../../stage/fields.ts";
+import { perCent } from "../../stage/shown.ts";
 
 export const parts = {
   ci: capacitor({
@@ -160,6 +161,7 @@ export const results = {
     label: "Share of the time on",
     symbol: "d",
     unit: "",
+    shown: perCent,
     formula: "average",
     help: "Collector below half of what it stands at when off.",
   },
@@ -194,9 +196,9 @@ export const results = {
     help: "0.54 is 46 % shorter than without the cell.",
   },
   onVoltage: { label: "Drive that turns it on", symbol: "V_on", unit: "V", formula: "law" },
-  dutyLaw: { label: "Share of the time on, simple law", symbol: "d_0", unit: "", formula: "law" },
+  dutyLaw: { label: "Share of the time on, simple law", symbol: "d_0", unit: "", shown: perCent, formula: "law" },
   outputLaw: { label: "Output, simple law", symbol: "V_o,0", unit: "V", formula: "law" },
-  lawError: { label: "Error of the simple law", symbol: "", unit: "", formula: "law" },
+  lawError: { label: "Error of the simple law", symbol: "", unit: "", shown: perCent, formula: "law" },
   bleedRms: { label: "Bleed at rest", symbol: "V_bleed", unit: "V", formula: "average" },
   bleedDb: { label: "Bleed against the output", symbol: "", unit: "dB", formula: "average" },
   baseLowest: {

@@ -1,6 +1,7 @@
 import type { Limit } from "../../stage/topology.ts";
 import { crestOf } from "../../stage/signal.ts";
 import type { C, P, R } from "./analyse.ts";
+import { perCent } from "../../stage/shown.ts";
 
 /** Reverse voltage that a base-emitter junction stands. */
 const reverseLimit = 5;
@@ -11,6 +12,7 @@ export const limits: readonly Limit<P, C, R>[] = [
     code: "law-off",
     severity: "caution",
     unit: "",
+    shown: perCent,
     source: "derivation",
     template:
       "The simple law is {value} off here, more than {limit}: plan with the averaged figure, and measure a real part before trusting either.",

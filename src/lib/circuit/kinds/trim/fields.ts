@@ -1,6 +1,7 @@
 import { common } from "../../stage/commonConditions.ts";
 import { choice, condition, type ResultField } from "../../stage/fields.ts";
 import type { Unit } from "../../quantity/units.ts";
+import { perCent } from "../../stage/shown.ts";
 
 /** The knob and its tolerances; every topology takes these. */
 export const conditions = {
@@ -71,27 +72,30 @@ export const trimResults = <const U extends Unit>(unit: U) =>
       label: "Useful rotation",
       symbol: "Δx",
       unit: "",
+      shown: perCent,
       formula: "useful",
-      help: "Share of the travel between the least and the most wanted; all of it where nothing is.",
+      help: "Of the travel, between the least and the most wanted; all of it where nothing is.",
     },
     usefulDegrees: { label: "Useful rotation", symbol: "Δθ", unit: "°", formula: "useful" },
     centre: {
-      label: "Centre of the window, rotation",
+      label: "Centre of the window",
       symbol: "x_c",
       unit: "",
+      shown: perCent,
       formula: "centre",
-      help: "Share of the travel where the middle of the window lies.",
+      help: "Where on the travel the middle of the window lies.",
     },
     centreDegrees: { label: "Centre of the window", symbol: "θ_c", unit: "°", formula: "centre" },
     sensitivityPerDegree: {
-      label: "Sensitivity, share per degree",
+      label: "Sensitivity, per degree",
       symbol: "s",
       unit: "",
+      shown: perCent,
       formula: "sensitivity",
       help: "At the centre of the window.",
     },
     sensitivityDb: { label: "Sensitivity, per degree", symbol: "s", unit: "dB", formula: "sensitivity" },
-    sensitivityCents: { label: "Sensitivity", symbol: "s", unit: "cents/°", formula: "sensitivity" },
+    sensitivityCents: { label: "Sensitivity, per degree", symbol: "s", unit: "cents/°", formula: "sensitivity" },
     slopePerDegree: { label: "Slope, per degree", symbol: "y'", unit, formula: "sensitivity" },
     worstLow: {
       label: "Low end, worst unit",
@@ -113,6 +117,7 @@ export const trimResults = <const U extends Unit>(unit: U) =>
       label: "Margin of the worst unit",
       symbol: "M",
       unit: "",
+      shown: perCent,
       formula: "coverage",
       help: "By which it still reaches past the window; below zero it does not reach.",
     },

@@ -1,6 +1,7 @@
 import type { Conditions, Parts, ResultValues, ConditionValues } from "../../stage/values.ts";
 import type { Limit } from "../../stage/topology.ts";
 import type { conditions, trimResults } from "./fields.ts";
+import { perCent } from "../../stage/shown.ts";
 
 const leastShare = 0.4;
 const leastDegrees = 100;
@@ -33,6 +34,7 @@ export const limits: readonly TrimLimit[] = [
     code: "too-sensitive",
     severity: "caution",
     unit: "",
+    shown: perCent,
     source: "practice",
     template:
       "A degree moves the value by {value} of itself at the centre of the window; above {limit} it cannot be set by hand.",
@@ -45,6 +47,7 @@ export const limits: readonly TrimLimit[] = [
     code: "window-not-covered",
     severity: "caution",
     unit: "",
+    shown: perCent,
     source: "trim-derivation",
     template:
       "The worst unit misses an end of the window: its margin is {value}, and {limit} is the least. Take a larger pot, or less padding.",
@@ -57,6 +60,7 @@ export const limits: readonly TrimLimit[] = [
     code: "centre-off",
     severity: "caution",
     unit: "",
+    shown: perCent,
     source: "practice",
     template:
       "The centre of the window lies at {value} of the travel, beyond {limit}: most of the knob is on one side of what is wanted.",

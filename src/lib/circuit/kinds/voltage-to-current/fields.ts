@@ -1,5 +1,6 @@
 import { common } from "../../stage/commonConditions.ts";
 import { choice, condition, target, type ResultField } from "../../stage/fields.ts";
+import { perCent, perMillion } from "../../stage/shown.ts";
 
 export const targets = {
   outputCurrent: target({
@@ -125,7 +126,7 @@ export const results = {
 
 export const driverResults = {
   ...results,
-  baseCurrentError: { label: "Lost to the base", symbol: "ε_β", unit: "", formula: "current" },
+  baseCurrentError: { label: "Lost to the base", symbol: "ε_β", unit: "", shown: perCent, formula: "current" },
   reach: {
     label: "Control voltage followed up to",
     symbol: "V_reach",
@@ -157,11 +158,12 @@ export const driverResults = {
 export const resistorResults = {
   ...results,
   pinVoltage: { label: "Bias pin", symbol: "V_p", unit: "V", formula: "current" },
-  temperatureCoefficient: { label: "Drift", symbol: "α", unit: "1/K", formula: "drift" },
+  temperatureCoefficient: { label: "Drift", symbol: "α", unit: "1/K", shown: perMillion, formula: "drift" },
   pinSpreadError: {
     label: "Spread from pin to pin",
     symbol: "ε_p",
     unit: "",
+    shown: perCent,
     formula: "drift",
     help: "The pin's own voltage varies by 0.1 V either way.",
   },

@@ -26,7 +26,7 @@ export const driverFormulas: readonly Formula[] = [
     id: "headroom",
     name: "Voltage to spare",
     tex: String.raw`V_{CE} = V_+ - V_{BE} - I R_{deg} - V_{env},\quad V_{reach} = \min\!\left(\frac{V_{swing} - V_{BE}}{1 + R_b/(R_E(\beta + 1))},\ \frac{V_+ - V_{BE} - V_{CEsat}}{1 + \frac{\beta}{\beta+1}\,R_{deg}/R_E}\right)`,
-    holds: "VBE of the mirror and of the transistor taken as 0.65 V, saturation as 0.2 V.",
+    holds: "V_BE of the mirror and of the transistor taken as 0.65 V, saturation as 0.2 V.",
     sources: ["converter-derivation", "memory"],
   },
   {

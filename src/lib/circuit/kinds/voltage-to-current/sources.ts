@@ -17,7 +17,7 @@ export const sources = [
   {
     id: "memory",
     title: "Data-sheet knowledge of the class, not re-read",
-    place: "bias pin 1.2 to 1.4 V above the rail, VBE, saturation, 5 V reverse base-emitter limit",
+    place: "bias pin 1.2 to 1.4 V above the rail, V_BE, saturation, 5 V reverse base-emitter limit",
     provenance: "from memory",
   },
   {

@@ -98,9 +98,9 @@ export const degenerated = defineTopology({
     { label: "Transistors", text: "2, and one for each further output" },
     { label: "Base-current error", text: "2/β" },
     { label: "Early effect", text: "small at the peak, full at the tail" },
-    { label: "Mismatch", text: "divided by 1 + I·R/VT" },
+    { label: "Mismatch", text: "divided by 1 + I·R/V_T" },
     { label: "Voltage needed", text: "0.2 V and the drop of R2" },
-    { label: "Ratio set by", text: "R1/R2, where I·R is far above VT" },
+    { label: "Ratio set by", text: "R_1/R_2, where I·R is far above V_T" },
   ],
   leavesOut: [
     "series resistance of base and emitter",

@@ -75,7 +75,7 @@ export function pairNetwork(degenerated: boolean): Network {
           [6, 9],
         ],
       },
-      { draw: "source", name: "Iref", sort: "current", from: [6, 9], to: [6, 13], nodes: ["b", "0"] },
+      { draw: "source", name: "I_ref", sort: "current", from: [6, 9], to: [6, 13], nodes: ["b", "0"] },
       { draw: "ground", at: [6, 13] },
       {
         draw: "wire",

@@ -89,7 +89,7 @@ const network: Network = {
     },
     { draw: "dot", at: [6, 10] },
     { draw: "node", at: [6, 10], label: "r" },
-    { draw: "source", name: "Iref", sort: "current", from: [6, 13], to: [6, 17], nodes: ["r", "0"] },
+    { draw: "source", name: "I_ref", sort: "current", from: [6, 13], to: [6, 17], nodes: ["r", "0"] },
     { draw: "ground", at: [6, 17] },
     {
       draw: "wire",
@@ -132,7 +132,7 @@ export const wilson = defineTopology({
   traits: [
     { label: "Transistors", text: "3" },
     { label: "Base-current error", text: "2/β²" },
-    { label: "Early effect", text: "one VBE over VA, about 1 %" },
+    { label: "Early effect", text: "one V_BE over V_A, about 1 %" },
     { label: "Mismatch", text: "full: 4 % per millivolt" },
     { label: "Voltage needed", text: "0.85 V" },
     { label: "Ratio set by", text: "the pair, 1" },

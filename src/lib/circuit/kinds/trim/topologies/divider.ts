@@ -13,6 +13,7 @@ import { limits as knobLimits } from "../limits.ts";
 import { dividerSetting, wiperResistance, type Window } from "../model.ts";
 import { dividerNetwork } from "../networks.ts";
 import { sources } from "../sources.ts";
+import { perCent } from "../../../stage/shown.ts";
 
 const parts = {
   rTop: resistor({
@@ -128,6 +129,7 @@ const limits: readonly Limit<P, C, R>[] = [
     code: "wiper-loaded",
     severity: "caution",
     unit: "",
+    shown: perCent,
     source: "trim-derivation",
     template:
       "The wiper's own resistance is up to {value} of the load, above {limit}: the load bends the law. The figures include it; buffer it, or take a smaller pot.",

@@ -3,6 +3,7 @@ import type { Limit } from "../../../../stage/topology.ts";
 import { capacitorLimits, outputLimits, retuneLimit, sourceLimit } from "../../limits.ts";
 import { withRheostat } from "../../model.ts";
 import type { C, P, R } from "./analyse.ts";
+import { perCent } from "../../../../stage/shown.ts";
 
 const source = "bridged-t-derivation";
 
@@ -54,6 +55,7 @@ export const limits: readonly Limit<P, C, R>[] = [
     code: "strike-too-long",
     severity: "caution",
     unit: "",
+    shown: perCent,
     source,
     template:
       "The strike lasts {value} of a period, longer than {limit}: its end kills the ring or doubles it, as the pitch falls. Strike shorter.",
@@ -66,9 +68,10 @@ export const limits: readonly Limit<P, C, R>[] = [
     code: "slow-op-amp",
     severity: "caution",
     unit: "",
+    shown: perCent,
     source,
     template:
-      "Q·f0/ft is {value}, above {limit}: the op amp lowers the pitch by about this share. The figures here include it; another op amp will differ.",
+      "Q·f_0/f_t is {value}, above {limit}: the op amp lowers the pitch by about this share. The figures here include it; another op amp will differ.",
     check: ({ conditions, results: { centreFrequency, qualityFactor } }) => {
       if (conditions.gainBandwidth === null || centreFrequency === undefined) return undefined;
       const share = (qualityFactor! * centreFrequency) / conditions.gainBandwidth;

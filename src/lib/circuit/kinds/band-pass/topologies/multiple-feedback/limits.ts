@@ -1,6 +1,7 @@
 import type { Limit } from "../../../../stage/topology.ts";
 import { capacitorLimits, oscillationLimit, outputLimits } from "../../limits.ts";
 import { networkAt, type C, type P, type R } from "./analyse.ts";
+import { perCent } from "../../../../stage/shown.ts";
 
 /** What the trade warns of in this network (trade brief 2.7). */
 export const limits: readonly Limit<P, C, R>[] = [
@@ -26,6 +27,7 @@ export const limits: readonly Limit<P, C, R>[] = [
     code: "slow-op-amp",
     severity: "caution",
     unit: "",
+    shown: perCent,
     source: "mfb-derivation",
     template:
       "Q·f_0/f_t is {value}, above {limit}: the op amp lowers the centre and raises the Q by about this share. The figures here include it, but op amps of one type differ: take a faster one, or trim the centre.",
@@ -70,6 +72,7 @@ export const limits: readonly Limit<P, C, R>[] = [
     code: "source-loads-input",
     severity: "caution",
     unit: "",
+    shown: perCent,
     source: "mfb-derivation",
     template:
       "The source resistance is {value} of R_A, above {limit}: it lowers the gain and moves the centre. The figures here include it; a pot in front changes it as it turns. Buffer the source.",

@@ -2,6 +2,7 @@ import type { Limit } from "../../../../stage/topology.ts";
 import { capacitorLimits, oscillationLimit, outputLimits, retuneLimit, sourceLimit } from "../../limits.ts";
 import type { C, P, R } from "./analyse.ts";
 import { amplifierGain, centreShift } from "./model.ts";
+import { perCent } from "../../../../stage/shown.ts";
 
 /** What the trade warns of in this network (trade brief 2.8). */
 export const limits: readonly Limit<P, C, R>[] = [
@@ -67,6 +68,7 @@ export const limits: readonly Limit<P, C, R>[] = [
     code: "slow-op-amp",
     severity: "caution",
     unit: "",
+    shown: perCent,
     source: "sallen-key-derivation",
     template:
       "The op amp lowers the centre and raises Q by about {value}, above {limit}. The figures here include it; another op amp will differ.",

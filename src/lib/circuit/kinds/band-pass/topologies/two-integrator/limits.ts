@@ -3,6 +3,7 @@ import { crestOf } from "../../../../stage/signal.ts";
 import type { Limit } from "../../../../stage/topology.ts";
 import { capacitorLimits, oscillationLimit, outputLimits, retuneLimit, sourceLimit } from "../../limits.ts";
 import type { C, P, R } from "./analyse.ts";
+import { perCent } from "../../../../stage/shown.ts";
 
 const source = "two-integrator-derivation";
 
@@ -16,6 +17,7 @@ export const limits: readonly Limit<P, C, R>[] = [
     code: "op-amps-too-slow",
     severity: "fault",
     unit: "",
+    shown: perCent,
     source,
     template:
       "The op amps take {value} of the damping, above {limit}: Q is more than doubled and a slightly slower op amp oscillates. Take faster op amps or a lower Q.",
@@ -26,6 +28,7 @@ export const limits: readonly Limit<P, C, R>[] = [
     code: "slow-op-amps",
     severity: "caution",
     unit: "",
+    shown: perCent,
     source,
     template:
       "The op amps take {value} of the damping, above {limit}: they raise Q by this share. The figures here include it; other op amps will differ.",
