@@ -51,7 +51,8 @@ describe("spread and yield on a stage's sheet", () => {
     const parts: Record<string, string> = {};
     for (const input of await page.locator(".parts-table input").all()) {
       const name = (await input.getAttribute("name"))!.replace("parts.", "");
-      parts[name] = await input.inputValue();
+      const text = await input.inputValue();
+      parts[name] = text === "none" ? "0" : text;
     }
     const window = {
       centreFrequency: { least: 950, most: 1050 },
