@@ -50,6 +50,13 @@ const multipleFeedback: readonly LimitCase[] = [
     raised: { conditions: { dielectric: "class-2" } },
     quiet: { conditions: { dielectric: "film-or-class-1" } },
   },
+  // With next to nothing left of R_B the peak would lie far above what so slow an op amp follows.
+  {
+    topology,
+    code: "no-centre-at-pot-end",
+    raised: { parts: { rb: 10, rbPot: 50e3 }, conditions: { gainBandwidth: 100e3, outputResistance: 1e3 } },
+    quiet: { parts: { rb: 1e3, rbPot: 50e3 }, conditions: { gainBandwidth: 3e6, outputResistance: 1e3 } },
+  },
   {
     topology,
     code: "retune-misses-target",
@@ -163,6 +170,13 @@ const sallenKey: readonly LimitCase[] = [
     raised: { parts: { r2Pot: 1e3 }, targets: { centreFrequency: 1030 } },
     quiet: { parts: { r2Pot: 1e3 }, targets: { centreFrequency: 1015 } },
   },
+  // Far from the other resistors the pot takes the damping away.
+  {
+    topology: "sallen-key",
+    code: "no-centre-at-pot-end",
+    raised: { parts: { r2: 4.7e3, r2Pot: 50e3 }, conditions: { rotation: 0.4 } },
+    quiet: { parts: { r2: 4.7e3, r2Pot: 10e3 }, conditions: { rotation: 0.4 } },
+  },
   ...shared("sallen-key", "r1", 22e3),
 ];
 
@@ -173,6 +187,13 @@ const twoIntegrator: readonly LimitCase[] = [
     code: "oscillates",
     raised: { parts: { rq1: 10e6 }, conditions: { gainBandwidth: 500e3 } },
     quiet: { parts: { rq1: 82e3 }, conditions: { gainBandwidth: 500e3 } },
+  },
+  // At the end of the pot the centre lies near 16 kHz: five times that over 200 kHz is more damping than there is.
+  {
+    topology: "two-integrator",
+    code: "no-centre-at-pot-end",
+    raised: { parts: { r1: 1e3, r2: 1e3, r1Pot: 50e3, r2Pot: 50e3 }, conditions: { gainBandwidth: 200e3 } },
+    quiet: { parts: { r1: 1e3, r2: 1e3, r1Pot: 50e3, r2Pot: 50e3 }, conditions: { gainBandwidth: 500e3 } },
   },
   // 5·Q·f0 of the parts it starts with is 15.25 kHz.
   {

@@ -1,3 +1,4 @@
+import { electricalAngle } from "../../parts/electricalAngle.ts";
 import { swingOn } from "../../device/opAmp.ts";
 import { crestOf } from "../../stage/signal.ts";
 import type { Limit } from "../../stage/topology.ts";
@@ -101,6 +102,29 @@ export function oscillationLimit(
     template,
     check: ({ conditions, results }) =>
       results.centreFrequency === undefined ? { value: conditions.gainBandwidth ?? 0, limit: 0 } : undefined,
+  };
+}
+
+/** At an end of the pot's travel the network has no centre, though it has one as it stands: that end's figures are left out. */
+export function retuneEndLimit(
+  pots: readonly string[],
+): Limit<Parts, Pick<typeof potConditions, "rotation">, SharedResults> {
+  return {
+    code: "no-centre-at-pot-end",
+    severity: "fault",
+    unit: "°",
+    source: "practice",
+    template:
+      "With the pot at {value} there is no centre, though there is one at the {limit} where it stands: the circuit oscillates there, or its op amp is too slow. Put a fixed resistor in series with the pot, or take a smaller pot.",
+    check({ parts, conditions, results: { centreFrequency, retuneLow, retuneHigh } }) {
+      const fitted = pots.some((pot) => parts[pot]! > 0);
+      if (!fitted || centreFrequency === undefined) return undefined;
+      if (retuneLow !== undefined && retuneHigh !== undefined) return undefined;
+      return {
+        value: retuneHigh === undefined ? 0 : electricalAngle,
+        limit: conditions.rotation * electricalAngle,
+      };
+    },
   };
 }
 

@@ -22,8 +22,9 @@ export function retuneFigures(centreAt: (rotation: number) => number, rotation: 
   });
 }
 
-function existing<K extends string>(figures: Record<K, number>): Partial<Record<K, number>> {
-  return Object.fromEntries(Object.entries<number>(figures).filter(([, value]) => Number.isFinite(value))) as Partial<
+/** Only the figures that are numbers. */
+export function existing<K extends string>(figures: Partial<Record<K, number>>): Partial<Record<K, number>> {
+  return Object.fromEntries(Object.entries(figures).filter(([, value]) => Number.isFinite(value))) as Partial<
     Record<K, number>
   >;
 }

@@ -1,3 +1,4 @@
+import { existing } from "../../retune.ts";
 import { readCentre } from "../../../../network/resonance.ts";
 import { isStable } from "../../../../network/transfer.ts";
 import { electricalAngle } from "../../../../parts/electricalAngle.ts";
@@ -70,7 +71,7 @@ function retune(state: MultipleFeedbackState): ResultValues<R> {
   const x = Math.min(Math.max(conditions.rotation, 1e-6), 1 - 1e-6);
   const slope = (potFraction(conditions.potLaw, x + 1e-6) - potFraction(conditions.potLaw, x - 1e-6)) / 2e-6;
   const perTurn = (-0.5 * (ra / (ra + network.rb)) * parts.rbPot * slope) / network.rb;
-  return {
+  return existing({
     retuneHigh,
     retuneLow,
     retuneSpan: semitonesBetween(retuneLow, retuneHigh),
@@ -80,7 +81,7 @@ function retune(state: MultipleFeedbackState): ResultValues<R> {
       retuneLow / idealCentre({ ...networkAt(parts, conditions, 1), ra }),
       retuneHigh / idealCentre({ ...networkAt(parts, conditions, 0), ra }),
     ),
-  };
+  });
 }
 
 /**

@@ -1,5 +1,5 @@
 import type { Limit } from "../../../../stage/topology.ts";
-import { capacitorLimits, oscillationLimit, outputLimits } from "../../limits.ts";
+import { capacitorLimits, oscillationLimit, outputLimits, retuneEndLimit } from "../../limits.ts";
 import { networkAt, type C, type P, type R } from "./analyse.ts";
 import { perCent } from "../../../../stage/shown.ts";
 
@@ -93,7 +93,9 @@ export const limits: readonly Limit<P, C, R>[] = [
       if (parts.rbPot === 0 || wanted === undefined) return undefined;
       const { reachLow, reachHigh, centreFrequency } = results;
       if (reachLow === undefined || reachHigh === undefined) {
-        return centreFrequency === undefined
+        // Without a centre at either end there is nothing to reach, which is said by itself.
+        const ends = results.retuneLow !== undefined && results.retuneHigh !== undefined;
+        return centreFrequency === undefined || !ends
           ? undefined
           : { value: wanted, limit: centreFrequency, detail: "the tolerances are wider than the pot's range" };
       }
@@ -104,6 +106,7 @@ export const limits: readonly Limit<P, C, R>[] = [
         : undefined;
     },
   },
+  retuneEndLimit(["rbPot"]),
   ...capacitorLimits,
   ...outputLimits,
 ];

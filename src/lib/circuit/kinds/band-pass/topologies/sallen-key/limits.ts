@@ -1,5 +1,12 @@
 import type { Limit } from "../../../../stage/topology.ts";
-import { capacitorLimits, oscillationLimit, outputLimits, retuneLimit, sourceLimit } from "../../limits.ts";
+import {
+  capacitorLimits,
+  oscillationLimit,
+  outputLimits,
+  retuneEndLimit,
+  retuneLimit,
+  sourceLimit,
+} from "../../limits.ts";
 import type { C, P, R } from "./analyse.ts";
 import { amplifierGain, centreShift } from "./model.ts";
 import { perCent } from "../../../../stage/shown.ts";
@@ -81,5 +88,6 @@ export const limits: readonly Limit<P, C, R>[] = [
   sourceLimit("r1", "R_1", "sallen-key-derivation"),
   ...capacitorLimits,
   retuneLimit,
+  retuneEndLimit(["r2Pot"]),
   ...outputLimits,
 ];

@@ -1,7 +1,14 @@
 import { swingOn } from "../../../../device/opAmp.ts";
 import { crestOf } from "../../../../stage/signal.ts";
 import type { Limit } from "../../../../stage/topology.ts";
-import { capacitorLimits, oscillationLimit, outputLimits, retuneLimit, sourceLimit } from "../../limits.ts";
+import {
+  capacitorLimits,
+  oscillationLimit,
+  outputLimits,
+  retuneEndLimit,
+  retuneLimit,
+  sourceLimit,
+} from "../../limits.ts";
 import type { C, P, R } from "./analyse.ts";
 import { perCent } from "../../../../stage/shown.ts";
 
@@ -80,5 +87,6 @@ export const limits: readonly Limit<P, C, R>[] = [
   sourceLimit("ri", "R_i", source),
   ...capacitorLimits,
   retuneLimit,
+  retuneEndLimit(["r1Pot", "r2Pot"]),
   ...outputLimits,
 ];
