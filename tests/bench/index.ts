@@ -1,10 +1,11 @@
 /** `npm run bench`: what the calculations cost, in the library and over HTTP. All ratios come from one run. */
 import { bandPass } from "#lib/circuit/kinds/band-pass/index.ts";
-import { rate, subject, work } from "./library.ts";
+import { stageKinds } from "#lib/circuit/kinds/index.ts";
+import { analysisCosts, rate, subject, work } from "./library.ts";
 import { send } from "./load.ts";
 import { startServer, type BenchServer } from "./server.ts";
 
-const aims = { analyseToIdle: 0.8, memoryGrowth: 1.3 };
+const aims = { analyseToIdle: 0.8, memoryGrowth: 1.3, secondsPerAnalysis: 5e-3 };
 const rounds = 9;
 const perRound = 1000;
 const connections = 16;
@@ -20,6 +21,21 @@ function benchLibrary(): void {
   for (const [name, perSecond] of Object.entries(rates)) line(name, `${round(perSecond)} /s`);
   for (const name of ["analyse", "400-point curve"])
     line(`${name}, library to mathjs`, `${round(rates[name]! / rates[`${name} through mathjs`]!)} times`);
+}
+
+/** Every topology of every kind. */
+function benchKinds(): boolean {
+  let dearest = { name: "", seconds: 0 };
+  for (const cost of analysisCosts(stageKinds)) {
+    line(`analyse ${cost.name}`, `${round(1 / cost.seconds)} /s`);
+    if (cost.seconds > dearest.seconds) dearest = cost;
+  }
+  const milliseconds = (seconds: number) => `${round(seconds * 1000)} ms`;
+  line(
+    "dearest analysis",
+    `${milliseconds(dearest.seconds)}, ${dearest.name} (aim: at most ${milliseconds(aims.secondsPerAnalysis)})`,
+  );
+  return dearest.seconds <= aims.secondsPerAnalysis;
 }
 
 async function benchServer(server: BenchServer): Promise<boolean> {
@@ -65,6 +81,7 @@ async function benchServer(server: BenchServer): Promise<boolean> {
 }
 
 benchLibrary();
+if (!benchKinds()) process.exitCode = 1;
 const server = await startServer();
 try {
   if (!(await benchServer(server))) process.exitCode = 1;

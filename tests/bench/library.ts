@@ -1,4 +1,13 @@
-import { analyseStage, plotStage, spacedValues, type PlainConditions } from "#lib/circuit/index.ts";
+import {
+  analyseStage,
+  defaultParts,
+  defaultTargets,
+  plotStage,
+  spacedValues,
+  type AnyTopology,
+  type PlainConditions,
+  type StageKind,
+} from "#lib/circuit/index.ts";
 import { multipleFeedback } from "#lib/circuit/kinds/band-pass/topologies/multiple-feedback/index.ts";
 import { nodalResponse } from "../kinds/band-pass/networks.ts";
 
@@ -39,6 +48,45 @@ export const work: Record<string, (turn: number) => unknown> = {
     return [peak, edge(10, peak), edge(peak, 100e3)];
   },
 };
+
+const longestPerKind = 0.3;
+
+/** Processor time of one analysis in seconds, each time with parts that differ, so that a busy machine does not decide it. */
+function analysisCost(topology: AnyTopology, conditions: PlainConditions): number {
+  const parts = defaultParts(topology);
+  const [first] = Object.keys(parts);
+  const job = (turn: number) =>
+    analyseStage(topology, {
+      parts: first === undefined ? parts : { ...parts, [first]: parts[first]! * (1 + (turn % 1000) * 1e-6) },
+      conditions,
+      targets: defaultTargets(topology),
+    });
+  for (let turn = 0; turn < 20; turn++) job(turn);
+  const before = process.cpuUsage();
+  const start = performance.now();
+  let turns = 0;
+  while (performance.now() - start < longestPerKind * 1000) job(turns++);
+  const { user, system } = process.cpuUsage(before);
+  return (user + system) / 1e6 / turns;
+}
+
+/** Every optional part of the surroundings switched on. */
+const everythingOn = (topology: AnyTopology): PlainConditions =>
+  Object.fromEntries(
+    Object.entries(topology.conditions).map(([key, field]) => [
+      key,
+      field.type === "number" ? (field.suggestion ?? field.default) : field.default,
+    ]),
+  );
+
+/** What an analysis of each topology costs, in an ideal world and in a real one; the dearer of the two counts. */
+export function* analysisCosts(kinds: readonly StageKind[]): Generator<{ name: string; seconds: number }> {
+  for (const kind of kinds)
+    for (const topology of kind.topologies) {
+      const seconds = Math.max(analysisCost(topology, {}), analysisCost(topology, everythingOn(topology)));
+      yield { name: `${kind.id}/${topology.id}`, seconds };
+    }
+}
 
 function halve(f: (x: number) => number, from: number, to: number): number {
   let [low, high] = [from, to];

@@ -27,25 +27,30 @@ function cellOf({ parts, conditions }: CellState, supply: number, collector: num
   };
 }
 
+/** Share of the envelope, and of a tenth of a volt, to which the collector's mean is found: far below what any figure shows. */
+const settled = 1e-9;
+
 /**
  * Averages with the output loading the collector: above the output's corner C_o stands at the collector's mean, so the
- * collector sees R_c to the envelope and R_o to that mean. The mean is found by the secant method.
+ * collector sees R_c to the envelope and R_o to that mean. The mean is found by the secant method, whose first step takes
+ * the mean to follow the supply in proportion.
  */
 export function loadedAverage(state: CellState, control: number): Average & { cell: Cell } {
   const { rc, ro } = state.parts;
   const collector = 1 / (1 / rc + 1 / ro);
+  const share = rc / (ro + rc);
   const at = (mean: number) => {
-    const cell = cellOf(state, (control * ro + mean * rc) / (ro + rc), collector);
+    const cell = cellOf(state, control + share * (mean - control), collector);
     return { ...averageOf(cell, state.conditions.sourceRms), cell };
   };
-  let [x0, x1] = [control, control];
+  let x0 = control;
   let got = at(x0);
   let f0 = got.mean - x0;
-  x1 = got.mean;
-  for (let step = 0; step < 20; step++) {
+  let x1 = control > 0 ? Math.max(0, x0 + f0 / (1 - share * (got.mean / control))) : got.mean;
+  for (let step = 0; step < 20 && Math.abs(f0) > settled * (control + 0.1); step++) {
     got = at(x1);
     const f1 = got.mean - x1;
-    if (Math.abs(f1) <= 1e-11 * (control + 0.1) || f1 === f0) break;
+    if (Math.abs(f1) <= settled * (control + 0.1) || f1 === f0) break;
     // The collector's mean never lies below ground, whatever the secant says.
     const next = Math.max(0, x1 - (f1 * (x1 - x0)) / (f1 - f0));
     [x0, f0, x1] = [x1, f1, next];
