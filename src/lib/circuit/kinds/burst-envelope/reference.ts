@@ -37,4 +37,16 @@ export const reference: readonly ReferenceCase[] = [
     tolerance: 1e-7,
     source: scipy,
   },
+  {
+    id: "relaxation-oscillator-fraction-0.9",
+    topology: "gated-oscillator",
+    given: { parts: { rt: 1e3, ct: 100e-9, r1: 18e3, r2: 2e3 } },
+    expect: { spacing: 589e-6 },
+    tolerance: 1e-3,
+    source: {
+      title: "Electronics textbook, problem 36.8 with its solution (holooly.com)",
+      place: "feedback fraction 0.9, 1 kΩ and 0.1 µF: 589 µs",
+      howKnown: "read",
+    },
+  },
 ];

@@ -62,4 +62,17 @@ export const reference: readonly ReferenceCase[] = [
     tolerance: 1e-7,
     source: computed,
   },
+  {
+    id: "transconductance-at-room-temperature",
+    topology: "resistor-load",
+    given: { conditions: { biasCurrent: 1e-3 } },
+    expect: { transconductance: 19.2e-3 },
+    tolerance: 0.015,
+    source: {
+      title: "R. M. Marston, Op-Amp Circuits Manual, including OTA circuits",
+      place: "gm ≈ 19.2·I_abc at room temperature, as quoted",
+      howKnown: "read",
+    },
+    note: "19.2 rounds the thermal voltage to 26 mV; at 25 °C it is 19.46.",
+  },
 ];

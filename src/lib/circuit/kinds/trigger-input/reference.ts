@@ -47,4 +47,37 @@ export const reference: readonly ReferenceCase[] = [
     tolerance: 1e-9,
     source: arithmetic,
   },
+  {
+    id: "thresholds-of-a-3-v-supply",
+    topology: "comparator",
+    given: {
+      parts: { rin: 100e3, rh: 750e3, rr1: 100e3, rr2: 100e3 },
+      conditions: { outputHigh: 3, outputLow: 0, railPositive: 3 },
+    },
+    expect: { threshold: 1.7, fallingThreshold: 1.3, hysteresis: 0.4 },
+    tolerance: 1e-9,
+    source: {
+      title: "Texas Instruments, CIRCUIT060078, non-inverting comparator with hysteresis",
+      place: "design goals: 1.7 V and 1.3 V on a supply of 3 V",
+      howKnown: "read",
+    },
+    note: "The thresholds are printed; the resistors follow from the equations of the next case's source.",
+  },
+  {
+    id: "resistor-ratio-for-thresholds",
+    topology: "comparator",
+    given: {
+      parts: { rin: 10e3, rr1: 100e3 },
+      targets: { threshold: 1.7, hysteresis: 0.4 },
+      conditions: { outputHigh: 3, outputLow: 0, railPositive: 3 },
+    },
+    expect: { rh: 75e3, rr2: 100e3 },
+    tolerance: 1e-9,
+    source: {
+      title: "All About Circuits, comparator with hysteresis calculator",
+      place: "R = (VP − VN)/(VTH − VTL) and VREF = VN + R/(1 + R)·(VTH − VN)",
+      howKnown: "read",
+    },
+    note: "With those figures R is 7.5 and the reference half the supply.",
+  },
 ];

@@ -40,4 +40,36 @@ export const reference: readonly ReferenceCase[] = [
     tolerance: 1e-7,
     source: computed,
   },
+  {
+    id: "loaded-divider",
+    topology: "divider",
+    given: {
+      parts: { rTop: 1e3, rPot: 2e3, rBottom: 0 },
+      conditions: { rotation: 1, referenceVoltage: 10, loadResistance: 100e3 },
+    },
+    expect: { value: 6.623 },
+    tolerance: 1e-4,
+    source: {
+      title: "Open encyclopedia, Potentiometer",
+      place: "theory of operation: 6.623 V with a load, 6.667 V without",
+      howKnown: "read",
+    },
+    note: "The printed result was read; the resistors of 1 kΩ and 2 kΩ, the load of 100 kΩ and the 10 V are from memory.",
+  },
+  {
+    id: "heavily-loaded-pot",
+    topology: "divider",
+    given: {
+      parts: { rTop: 0, rPot: 1e6, rBottom: 0 },
+      conditions: { rotation: 0.5, referenceVoltage: 10, loadResistance: 100 },
+    },
+    expect: { value: 2e-3 },
+    tolerance: 1e-3,
+    source: {
+      title: "RealNfo, Electrical Circuit Analysis",
+      place: "Potentiometer Loading, 1 MΩ at mid-travel into 100 Ω: 2 mV of 10 V",
+      howKnown: "read",
+    },
+    note: "Exactly 1.9992 mV.",
+  },
 ];

@@ -40,4 +40,29 @@ export const reference: readonly ReferenceCase[] = [
     tolerance: 1e-9,
     source: computed,
   },
+  {
+    id: "ten-ohms-of-sense",
+    topology: "op-amp-transistor",
+    given: { parts: { re: 10 }, conditions: { controlVoltage: 1 } },
+    expect: { outputCurrent: 100e-3 },
+    tolerance: 1e-9,
+    source: {
+      title: "Simulation tutorial of an op-amp current source (mull-overthing.com)",
+      place: "1 V across 10 Ω: 100 mA",
+      howKnown: "read",
+    },
+  },
+  {
+    id: "nine-milliamperes",
+    topology: "op-amp-transistor",
+    given: { parts: { re: 150 }, conditions: { controlVoltage: 1.36 } },
+    expect: { outputCurrent: 9.1e-3 },
+    tolerance: 5e-3,
+    source: {
+      title: "Workshop article on a constant-current source with an op amp (askix.com)",
+      place: "1.36 V across 150 Ω: 9.1 mA",
+      howKnown: "read",
+    },
+    note: "Exactly 9.067 mA; there the current is drawn from the positive rail.",
+  },
 ];
