@@ -2,6 +2,7 @@
 import { bandPass } from "#lib/circuit/kinds/band-pass/index.ts";
 import { stageKinds } from "#lib/circuit/kinds/index.ts";
 import { analysisCosts, rate, subject, work } from "./library.ts";
+import { benchLists } from "./lists.ts";
 import { send } from "./load.ts";
 import { startServer, type BenchServer } from "./server.ts";
 
@@ -80,11 +81,15 @@ async function benchServer(server: BenchServer): Promise<boolean> {
   return ratio >= aims.analyseToIdle && late / early <= aims.memoryGrowth;
 }
 
-benchLibrary();
-if (!benchKinds()) process.exitCode = 1;
-const server = await startServer();
-try {
-  if (!(await benchServer(server))) process.exitCode = 1;
-} finally {
-  await server.stop();
+// `npm run bench -- lists` measures the lists alone.
+if (!process.argv.includes("lists")) {
+  benchLibrary();
+  if (!benchKinds()) process.exitCode = 1;
+  const server = await startServer();
+  try {
+    if (!(await benchServer(server))) process.exitCode = 1;
+  } finally {
+    await server.stop();
+  }
 }
+if (!(await benchLists())) process.exitCode = 1;

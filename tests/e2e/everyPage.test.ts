@@ -49,6 +49,7 @@ const open = [
   "/calculators/band-pass?voice=unknown",
   "/docs/api",
   "/mail",
+  "/unsubscribe?token=not-whole",
 ];
 
 describe("wide and narrow, light and dark", () => {
@@ -75,7 +76,7 @@ describe("wide and narrow, light and dark", () => {
     expect(visitor.consoleErrors.splice(0).filter((line) => !line.includes("404"))).toEqual([]);
   });
 
-  test.each(["/voices", "/team", "/account"])("%s, signed in, is accessible and fits", async (path) => {
+  test.each(["/voices", "/team", "/team/activity", "/account"])("%s, signed in, is accessible and fits", async (path) => {
     await visit(member.page, app.url + path);
     expect(await faultsOf(member.page)).toEqual([]);
     expect(member.consoleErrors.splice(0)).toEqual([]);
@@ -126,6 +127,18 @@ describe("wide and narrow, light and dark", () => {
     await page.getByRole("heading", { level: 1, name: "Revision 1 compared with revision 2" }).waitFor();
     await hydrated(page);
     expect(await faultsOf(page)).toEqual([]);
+    await page.getByRole("link", { name: "Activity" }).click();
+    await page.getByRole("heading", { level: 1, name: "Activity" }).waitFor();
+    expect(await faultsOf(page)).toEqual([]);
     expect(member.consoleErrors.splice(0)).toEqual([]);
+  });
+
+  test("the team as its owner sees it is accessible and fits", async () => {
+    const owner = await openMemberPage(browser, app.url, "owner");
+    await visit(owner.page, `${app.url}/team`);
+    await owner.page.getByRole("button", { name: "Invite" }).waitFor();
+    expect(await faultsOf(owner.page)).toEqual([]);
+    expect(owner.consoleErrors).toEqual([]);
+    await owner.close();
   });
 });
