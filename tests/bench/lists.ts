@@ -128,7 +128,9 @@ export async function benchLists(): Promise<boolean> {
     for (const [what, query] of Object.entries(plans)) {
       const whole = await scannedWhole(sql, query);
       kept &&= whole.length === 0;
-      console.log(`${`plan: ${what}`.padEnd(44)} ${whole.length === 0 ? "by index" : `reads all of ${whole.join(", ")}`}`);
+      console.log(
+        `${`plan: ${what}`.padEnd(44)} ${whole.length === 0 ? "by index" : `reads all of ${whole.join(", ")}`}`,
+      );
     }
     return kept;
   } finally {

@@ -76,11 +76,14 @@ describe("wide and narrow, light and dark", () => {
     expect(visitor.consoleErrors.splice(0).filter((line) => !line.includes("404"))).toEqual([]);
   });
 
-  test.each(["/voices", "/team", "/team/activity", "/account"])("%s, signed in, is accessible and fits", async (path) => {
-    await visit(member.page, app.url + path);
-    expect(await faultsOf(member.page)).toEqual([]);
-    expect(member.consoleErrors.splice(0)).toEqual([]);
-  });
+  test.each(["/voices", "/team", "/team/activity", "/account"])(
+    "%s, signed in, is accessible and fits",
+    async (path) => {
+      await visit(member.page, app.url + path);
+      expect(await faultsOf(member.page)).toEqual([]);
+      expect(member.consoleErrors.splice(0)).toEqual([]);
+    },
+  );
 
   test.each(["Levels", "Supply", "Parts", "Checks"])("the %s of a voice are accessible and fit", async (view) => {
     const { page } = member;

@@ -48,7 +48,8 @@ describe("the address of a guest link", () => {
     const { status, headers, body } = await guest().request("GET", path, { headers: { accept: "application/json" } });
     expect([status, headers.get("content-type")]).toEqual([200, "application/json"]);
     expect(body).toMatchObject({ voice: "Shingle", revision: 1, status: "released", preparedBy: "Dario Westerby" });
-    const deeds = await sql`select action, actor_id from audit_events where detail ->> 'link' = ${id} and action <> 'shareLink.make'`;
+    const deeds =
+      await sql`select action, actor_id from audit_events where detail ->> 'link' = ${id} and action <> 'shareLink.make'`;
     expect(deeds).toMatchObject([{ action: "shareLink.download", actor_id: null }]);
   });
 
@@ -67,7 +68,9 @@ describe("the address of a guest link", () => {
     expect((await owner.request("DELETE", `/api/voices/${shingle}/share-links/${id}`)).status).toBe(204);
     for (const address of [path, `/share/${"a".repeat(43)}`, "/share/x"]) {
       for (const accept of ["text/html", "application/json"]) {
-        expect((await guest().request("GET", address, { headers: { accept } })).status, `${address} ${accept}`).toBe(404);
+        expect((await guest().request("GET", address, { headers: { accept } })).status, `${address} ${accept}`).toBe(
+          404,
+        );
       }
     }
   });
