@@ -69,6 +69,14 @@ const axis = z.object({
     .meta({ description: "How a person reads it: a rotation of 0 to 1 as degrees" }),
 });
 
+const levelSide = z.object({ rms: z.number(), peak: z.number(), headroomDb: z.number().optional() });
+const railChange = z.object({
+  from: z.number(),
+  to: z.number(),
+  windowLow: z.number().meta({ description: "Of the older side's first-power window" }),
+  windowHigh: z.number(),
+});
+
 export const compareAnswer = z.object({
   from: sideAnswer,
   to: sideAnswer,
@@ -132,6 +140,21 @@ export const compareAnswer = z.object({
       }),
     )
     .meta({ description: "Lines of the parts list whose quantity differs" }),
+  levels: z
+    .array(
+      z.object({
+        node: z.string(),
+        stage: z.string(),
+        label: z.string(),
+        from: levelSide.optional(),
+        to: levelSide.optional(),
+      }),
+    )
+    .meta({ description: "Points of the chain whose level differs" }),
+  supply: z
+    .object({ positive: railChange, negative: railChange })
+    .optional()
+    .meta({ description: "Typical current of each rail, A; absent where a side has none" }),
   curves: z.array(
     z.object({
       stage: z.string(),

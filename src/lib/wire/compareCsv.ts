@@ -55,6 +55,14 @@ export function compareCsv(found: CompareAnswer): string {
       "",
       w.severity,
     ]),
+    ...found.levels.map((l) => [
+      ...["level, V RMS", name(l.stage), "", l.label, cell(l.from?.rms), cell(l.to?.rms), "V", "", ""],
+    ]),
+    ...(["positive", "negative"] as const).flatMap((rail) =>
+      found.supply
+        ? [["supply", "", "", `${rail} rail`, found.supply[rail].from, found.supply[rail].to, "A", "", ""] as Cell[]]
+        : [],
+    ),
     ...found.quantities.map((q) => [
       ...["parts list", "", "", `${q.partClass} ${q.value}`, q.from, q.to, q.unit, q.to - q.from],
       q.newUnique ? "used once" : "",

@@ -94,6 +94,14 @@ describe("the checklist of a review", () => {
     });
   });
 
+  test("finds the supply where the bench expects it, or says where it went", () => {
+    expect(check([base], [base]).supply?.state).toBe("checked");
+    const many = Array.from({ length: 8 }, (_, i) => ({ ...base, id: `s${i}`, name: `s${i}` }));
+    const found = check([base], [base, ...many]).supply;
+    expect(found?.state).toBe("look");
+    expect(found?.details[0]).toMatch(/^positive rail: .*, window so far /);
+  });
+
   test("leaves to the person what no data can say", () => {
     const found = check([base], [base]);
     expect([found.measurements?.state, found.geometry?.state]).toEqual(["by hand", "by hand"]);

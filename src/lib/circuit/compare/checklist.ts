@@ -36,6 +36,8 @@ export function reviewChecklist(reviewed: Reviewed): CheckItem[] {
     netUnchanged(reviewed),
     newUniqueValues(reviewed),
     seriesKept(reviewed),
+    supplyInWindow(reviewed),
+    nothingClips(reviewed),
     discussionClosed(reviewed),
     {
       ...{
@@ -144,6 +146,35 @@ function seriesKept(reviewed: Reviewed): CheckItem {
   );
   const title = "No value left the ordinary series without need";
   return { id: "series", state: left.length === 0 ? "checked" : "look", title, details };
+}
+
+/** The window is that of the older side: it is what the bench still expects. */
+function supplyInWindow({ comparison: { supply } }: Reviewed): CheckItem {
+  const title = "Supply stays inside the first-power window";
+  if (!supply)
+    return { id: "supply", state: "by hand", title, details: ["There is no earlier budget to compare with."] };
+  const outside = (["positive", "negative"] as const).filter((rail) => {
+    const { to, windowLow, windowHigh } = supply[rail];
+    return to < windowLow || to > windowHigh;
+  });
+  const details = outside.map((rail) => {
+    const { to, windowLow, windowHigh } = supply[rail];
+    const window = `${formatQuantity(windowLow, "A")} to ${formatQuantity(windowHigh, "A")}`;
+    return `${rail} rail: ${formatQuantity(to, "A")}, window so far ${window}`;
+  });
+  return { id: "supply", state: outside.length === 0 ? "checked" : "look", title, details };
+}
+
+function nothingClips(reviewed: Reviewed): CheckItem {
+  const clipping = reviewed.comparison.levels.filter(({ to }) => to !== undefined && (to.headroomDb ?? 0) < 0);
+  const details = clipping.map(
+    ({ stage, label, from, to }) =>
+      `${name(reviewed, stage)}, ${label}: headroom ${formatQuantity(to!.headroomDb!, "dB")}${
+        from?.headroomDb === undefined ? "" : `, before ${formatQuantity(from.headroomDb, "dB")}`
+      }`,
+  );
+  const title = "No level that changed clips";
+  return { id: "levels", state: clipping.length === 0 ? "checked" : "open", title, details };
 }
 
 function discussionClosed({ openThreads }: Reviewed): CheckItem {

@@ -2,9 +2,11 @@ import type { StageKind } from "../stage/kind.ts";
 import type { VoiceAnalysis } from "../voice/analyseStages.ts";
 import { topologyOf, type DocumentLink, type DocumentStage, type VoiceDocument } from "../voice/document.ts";
 import { differs, overlaidCurves, type CurvePair } from "./curves.ts";
+import { changedLevels, type LevelChange } from "./levels.ts";
 import { pairStages } from "./pairStages.ts";
 import { changedQuantities, type QuantityChange } from "./quantities.ts";
 import { changedResults, type ResultChange } from "./results.ts";
+import { changedSupply, type SupplyChange } from "./supply.ts";
 import { changedConditions, changedParts, changedTargets, type PartChange, type SettingChange } from "./values.ts";
 import { changedWarnings, type WarningChanges } from "./warnings.ts";
 
@@ -40,6 +42,9 @@ export interface Comparison {
   warnings: WarningChanges;
   links: { added: DocumentLink[]; removed: DocumentLink[] };
   quantities: QuantityChange[];
+  levels: LevelChange[];
+  /** Absent where a side was kept without it, or is nothing. */
+  supply?: SupplyChange;
   curves: CurvePair[];
 }
 
@@ -84,6 +89,8 @@ export function compareVoices(from: ComparedSide, to: ComparedSide, options: Com
     warnings: changedWarnings(oldWarnings, to.analysis.warnings),
     links: changedLinks(from.document.links, to.document.links, renamed),
     quantities: changedQuantities(from.document, to.document, kinds),
+    levels: changedLevels(from.analysis.levels, to.analysis.levels, renamed),
+    ...changedSupply(from.analysis.supply, to.analysis.supply),
     curves: pairs.flatMap((pair) => curvesOf(pair, curves)),
   };
 }

@@ -8,6 +8,8 @@ export {
   type StageName,
 } from "./compareVoices.ts";
 export type { CurvePair } from "./curves.ts";
+export type { LevelChange } from "./levels.ts";
+export type { SupplyChange } from "./supply.ts";
 export type { QuantityChange } from "./quantities.ts";
 export { recompute, type FigureDifference, type Recomputation } from "./recompute.ts";
 export type { ResultChange, Verdict } from "./results.ts";

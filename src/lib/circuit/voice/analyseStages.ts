@@ -5,6 +5,8 @@ import type { TargetState } from "../stage/targets.ts";
 import type { Warning } from "../stage/warning.ts";
 import { findIn } from "./chain.ts";
 import { computeChain } from "./compute.ts";
+import { levelsOf, type Level } from "./levels.ts";
+import { supplyOf, type SupplyBudget } from "./supply.ts";
 import type { VoiceDocument } from "./document.ts";
 
 export type StageWarning = Warning & { stage: string };
@@ -17,6 +19,10 @@ export interface VoiceAnalysis {
   /** Complete, with what the neighbours and the voice decide. */
   conditions: Record<string, PlainConditions>;
   warnings: StageWarning[];
+  /** At each point of the chain; empty in what was kept before levels were computed. */
+  levels: Level[];
+  /** Absent in what was kept before it was computed. */
+  supply?: SupplyBudget;
 }
 
 /**
@@ -24,18 +30,22 @@ export interface VoiceAnalysis {
  * figures, and a fault says so.
  */
 export function analyseStages(document: VoiceDocument, kinds: readonly StageKind[]): VoiceAnalysis {
-  const { stages, unsettled } = computeChain(document, findIn(kinds));
-  const analysis: VoiceAnalysis = { results: {}, states: {}, conditions: {}, warnings: [] };
+  const computed = computeChain(document, findIn(kinds));
+  const { stages, unsettled } = computed;
+  const analysis: VoiceAnalysis = {
+    ...{ results: {}, states: {}, conditions: {}, warnings: [] },
+    ...{ levels: levelsOf(computed), supply: supplyOf(computed) },
+  };
   for (const { id } of document.stages) {
-    const computed = stages.get(id);
-    if (!computed) {
+    const stage = stages.get(id);
+    if (!stage) {
       analysis.warnings.push({ ...unknownNetwork, stage: id });
       continue;
     }
-    const { results, state, warnings } = computed.analysis;
+    const { results, state, warnings } = stage.analysis;
     analysis.results[id] = results;
     analysis.states[id] = state;
-    analysis.conditions[id] = computed.conditions;
+    analysis.conditions[id] = stage.conditions;
     analysis.warnings.push(...warnings.map((warning) => ({ stage: id, ...warning })));
     if (unsettled.includes(id)) analysis.warnings.push({ ...restless, stage: id });
   }

@@ -29,7 +29,7 @@ export async function readSide(db: Queryable, ctx: Context, voice: VoiceRow, ref
     return {
       about: common,
       document: { stages: [], links: [], conditions: {} },
-      analysis: { results: {}, states: {}, conditions: {}, warnings: [] },
+      analysis: { results: {}, states: {}, conditions: {}, warnings: [], levels: [] },
       warnings: [],
     };
   }
@@ -39,7 +39,12 @@ export async function readSide(db: Queryable, ctx: Context, voice: VoiceRow, ref
     // Only what passed the schema is ever stored.
     const document = copy.document as VoiceDocument;
     const analysis = analyseStages(document, stageKinds);
-    return { about: common, document, analysis, warnings: analysis.warnings.map((w) => ({ ...w, accepted: false })) };
+    return {
+      about: common,
+      document,
+      analysis,
+      warnings: analysis.warnings.map((warning) => ({ ...warning, accepted: isAccepted(document, warning) })),
+    };
   }
   const { revision: row } = await loadRevision(db, ctx, { voiceId: voice.id, number: ref });
   const { status, reason, createdBy, createdAt } = presentSummary(row, voice, ctx.actor);
@@ -67,3 +72,6 @@ export async function releaseBefore(db: Queryable, voiceId: string, to: SideRef)
     .limit(1);
   return found?.number ?? "nothing";
 }
+
+const isAccepted = (document: VoiceDocument, warning: { stage: string; code: string }): boolean =>
+  document.accepted?.some(({ stage, code }) => stage === warning.stage && code === warning.code) ?? false;

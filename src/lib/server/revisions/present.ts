@@ -39,14 +39,14 @@ export function presentSummary(row: SummaryRow, voice: { teamId: string }, actor
 // Only what this server computed or checked is ever kept, and the database refuses every change of it.
 export const keptInputsOf = (row: RevisionRow) => row.inputs as RevisionAnswer["inputs"];
 export function keptAnalysisOf(row: RevisionRow): VoiceAnalysis {
-  // Early revisions were kept without the conditions that neighbours decide.
-  return { conditions: {}, ...(row.analysis as Omit<VoiceAnalysis, "conditions">) };
+  // Early revisions were kept without what the chain decides.
+  return { conditions: {}, levels: [], ...(row.analysis as Omit<VoiceAnalysis, "conditions" | "levels">) };
 }
 const acceptedOf = (row: RevisionRow) => row.acceptedWarnings as AcceptedWarning[];
 
 /** Its warnings, and which of them the author meant to stay. */
 export function keptWarningsOf(row: RevisionRow): (StageWarning & { accepted: boolean })[] {
-  const accepted = acceptedOf(row);
+  const accepted = [...acceptedOf(row), ...(keptInputsOf(row).accepted ?? [])];
   return keptAnalysisOf(row).warnings.map((warning) => ({
     ...warning,
     accepted: accepted.some(({ stage, code }) => stage === warning.stage && code === warning.code),
