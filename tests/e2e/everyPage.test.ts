@@ -49,7 +49,6 @@ const open = [
   "/calculators/band-pass?voice=unknown",
   "/docs/api",
   "/mail",
-  "/unsubscribe?token=not-whole",
 ];
 
 describe("wide and narrow, light and dark", () => {

@@ -237,7 +237,7 @@ describe("the database itself", () => {
     const { id, make } = await makeVoice(db);
     await make();
     await expect(db.delete(revisions).where(eq(revisions.voiceId, id))).rejects.toMatchObject(frozen);
-    await expect(db.execute(sql`truncate revisions`)).rejects.toMatchObject(frozen);
+    await expect(db.execute(sql`truncate revisions cascade`)).rejects.toMatchObject(frozen);
     expect(await rowsOf(id)).toHaveLength(1);
   });
 
