@@ -65,9 +65,13 @@ export async function savePng(model: PlotModel, name: string): Promise<void> {
   canvas.toBlob((blob) => blob && save(`${name}.png`, blob), "image/png");
 }
 
-/** Every point of every line, with quantity and unit in the head. */
 export function saveCsv(model: PlotModel, name: string): void {
+  takeAwayCsv(`${name}.csv`, rowsOf(model));
+}
+
+/** Every point of every line, with quantity and unit in the head. */
+export function rowsOf(model: PlotModel): (string | number)[][] {
   const head = [model.x.plainTitle, ...model.lines.map((line) => `${model.y.plainTitle} (${line.label})`)];
   const rows = model.xs.map((x, i) => [x, ...model.lines.map((line) => line.ys[i] ?? "")]);
-  takeAwayCsv(`${name}.csv`, [head, ...rows]);
+  return [head, ...rows];
 }

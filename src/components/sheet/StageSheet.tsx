@@ -12,6 +12,7 @@ import { deviceName } from "./deviceName.ts";
 import { PartChoosers } from "./PartChoosers.tsx";
 import { PartsTable, type PartMarks } from "./PartsTable.tsx";
 import { ResultsTable } from "./ResultsTable.tsx";
+import { SpokenResults } from "./SpokenResults.tsx";
 import { StagePanels } from "./StagePanels.tsx";
 import { stagePanels } from "./stagePanels.ts";
 import { Targets } from "./Targets.tsx";
@@ -134,6 +135,7 @@ export function StageSheet({ kind, topology, initial, onChange, ...props }: Stag
           <h3 id={`${id}-results`}>Results</h3>
           <ResultsTable stage={stage} />
           <Warnings warnings={stage.analysis.warnings} />
+          <SpokenResults stage={stage} />
         </section>
         {mainCurves.length > 0 && (
           <section className="stage-first-curve" aria-label="Main curves">

@@ -3,10 +3,10 @@ import { TextWithSymbols } from "./TextWithSymbols.tsx";
 
 const words = { note: "Note.", caution: "Caution.", fault: "Fault." } as const;
 
-/** What the stage has to say about its own figures; announced when it changes. */
+/** What the stage has to say about its own figures; read out by `SpokenResults`, once they have settled. */
 export function Warnings({ warnings }: { warnings: readonly Warning[] }) {
   return (
-    <div className="warnings" aria-live="polite">
+    <div className="warnings">
       {warnings.map((warning) => (
         <p key={warning.code + warning.message} className={warning.severity}>
           <strong>{words[warning.severity]}</strong> <TextWithSymbols text={warning.message} />
