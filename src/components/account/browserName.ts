@@ -2,7 +2,7 @@ const browsers: readonly [RegExp, string][] = [
   [/\bFirefox\//, "Firefox"],
   [/\bEdg\//, "Edge"],
   [/\bOPR\//, "Opera"],
-  [/\bChrom(e|ium)\//, "Chromium"],
+  [/\b(Headless)?Chrom(e|ium)\//, "Chromium"],
   [/\bSafari\//, "Safari"],
   [/^curl\//, "curl"],
 ];
