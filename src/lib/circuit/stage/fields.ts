@@ -36,6 +36,8 @@ export interface PartField extends NumberField {
   partClass: PartClass;
   /** Relative tolerance that such a part usually has. */
   tolerance: number;
+  /** Of a pot: the fixed parts in series with it, which bound its travel. */
+  padding?: readonly string[];
 }
 
 /** What is wanted of a result. */
@@ -90,6 +92,7 @@ type Defaults = { type: "number"; scale: "logarithmic" };
 const logarithmic: Defaults = { type: "number", scale: "logarithmic" };
 
 type PartInput = Named & { default: number; least?: number; most?: number; tolerance?: number; suggestion?: number };
+type PotInput = PartInput & Pick<PartField, "padding">;
 
 /** A fixed resistor; sane range 10 Ω to 10 MΩ unless said. Tolerance 1 % film. */
 export const resistor = (field: PartInput): PartField => ({
@@ -114,7 +117,7 @@ export const capacitor = (field: PartInput): PartField => ({
 });
 
 /** A pot; zero means "not fitted" where the range allows it. Tolerance 20 % carbon. */
-export const pot = (field: PartInput): PartField => ({
+export const pot = (field: PotInput): PartField => ({
   ...logarithmic,
   unit: "Ω",
   least: 0,

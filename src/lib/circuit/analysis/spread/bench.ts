@@ -1,6 +1,6 @@
 import { completeConditions, type PlainConditions, type PlainValues } from "../../stage/defaults.ts";
 import type { AnyTopology } from "../../stage/topology.ts";
-import type { SpreadRequest } from "./request.ts";
+import type { BoardsRequest } from "./request.ts";
 
 type RawResults = Readonly<Record<string, number | readonly number[] | undefined>>;
 
@@ -14,7 +14,7 @@ export interface Bench {
   measure(temperature: number): RawResults;
 }
 
-export function benchOf(topology: AnyTopology, request: SpreadRequest): Bench {
+export function benchOf(topology: AnyTopology, request: BoardsRequest): Bench {
   const parts = { ...request.parts };
   const conditions = completeConditions(topology, request.conditions);
   const warms = request.temperature !== undefined && topology.conditions["temperature"]?.type === "number";

@@ -2,7 +2,7 @@ import { uniformAt } from "../../numeric/counterRandom.ts";
 import { normalQuantile } from "../../numeric/normalQuantile.ts";
 import type { PlainValues } from "../../stage/defaults.ts";
 import { setParts, type Factor } from "./factors.ts";
-import { referenceTemperature, type SpreadRequest } from "./request.ts";
+import { referenceTemperature, type BoardsRequest } from "./request.ts";
 
 /** Above any that parts take, two each. */
 const temperatureStream = 0xffffffff;
@@ -13,7 +13,7 @@ const temperatureStream = 0xffffffff;
  *
  * @returns sets the varied parts of board n in `values` and gives its temperature, K
  */
-export function boardsOf(request: SpreadRequest, factors: readonly Factor[]) {
+export function boardsOf(request: BoardsRequest, factors: readonly Factor[]) {
   const { seed, temperature } = request;
   const unit = request.distribution === "uniform" ? (u: number) => 2 * u - 1 : (u: number) => normalQuantile(u) / 3;
   return (board: number, values: PlainValues): number => {

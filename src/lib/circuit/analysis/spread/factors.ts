@@ -1,6 +1,6 @@
 import type { PlainValues } from "../../stage/defaults.ts";
 import type { AnyTopology } from "../../stage/topology.ts";
-import { referenceTemperature, type Distribution, type Range, type SpreadRequest } from "./request.ts";
+import { referenceTemperature, type Distribution, type Range, type BoardsRequest } from "./request.ts";
 
 /** A part that varies, with its own tolerance and drift. */
 export interface VariedPart {
@@ -20,7 +20,7 @@ export interface Factor {
 const still: Range = { least: 0, most: 0 };
 
 /** Everything that varies independently, in the order of the parts. A part that is not fitted does not vary. */
-export function factorsOf(topology: AnyTopology, request: SpreadRequest): Factor[] {
+export function factorsOf(topology: AnyTopology, request: BoardsRequest): Factor[] {
   const keys = Object.keys(topology.parts);
   const lots = request.lots ?? [];
   const factors = new Map<number, VariedPart[]>();

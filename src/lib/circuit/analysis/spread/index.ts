@@ -2,6 +2,7 @@
 export {
   mostBoards,
   referenceTemperature,
+  type BoardsRequest,
   type Distribution,
   type Range,
   type ResultWindows,

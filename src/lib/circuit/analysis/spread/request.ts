@@ -11,7 +11,8 @@ export interface Range {
 /** What a result may be; a side left out is open. */
 export type ResultWindows = Record<string, Partial<Range>>;
 
-export interface SpreadRequest {
+/** Boards to be drawn: how parts vary, and how many there are. */
+export interface BoardsRequest {
   parts: PlainValues;
   conditions?: PlainConditions;
   /** Relative, to either side; a part that is left out is taken as exact. */
@@ -20,13 +21,16 @@ export interface SpreadRequest {
   drifts?: Record<string, Range>;
   /** Boards are at any temperature of this range, K, with equal likelihood. Left out: all at the one of the conditions. */
   temperature?: Range;
-  window?: ResultWindows;
   boards: number;
   /** A whole number of 32 bits. */
   seed: number;
   distribution: Distribution;
   /** Parts of one lot err together. */
   lots?: readonly (readonly string[])[];
+}
+
+export interface SpreadRequest extends BoardsRequest {
+  window?: ResultWindows;
   /** The curve whose band is wanted, at these x or at a number over its usual stretch. */
   band?: { curve: string; at?: readonly number[] };
 }

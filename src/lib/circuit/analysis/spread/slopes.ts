@@ -2,7 +2,7 @@ import type { PlainValues } from "../../stage/defaults.ts";
 import type { Bench } from "./bench.ts";
 import { figureOf } from "./bench.ts";
 import { unitDeviation, type Factor } from "./factors.ts";
-import { referenceTemperature, type SpreadRequest } from "./request.ts";
+import { referenceTemperature, type BoardsRequest } from "./request.ts";
 
 /** Step of ln(part): the error of the central difference is of its square, about 10⁻⁸, and rounding of 10⁻¹². */
 const step = 1e-4;
@@ -15,7 +15,7 @@ export interface Slopes {
 }
 
 /** Slopes of every result at the nominal board, by central differences of the exact analysis. */
-export function slopesOf(bench: Bench, names: readonly string[], request: SpreadRequest): Slopes {
+export function slopesOf(bench: Bench, names: readonly string[], request: BoardsRequest): Slopes {
   const at = (temperature: number) => {
     const results = bench.measure(temperature);
     return (name: string) => figureOf(results, name);
@@ -61,7 +61,7 @@ export function relativeSlopes(slopes: Slopes, nominal: PlainValues): Record<str
 export function rootSumSquare(
   slopes: Slopes,
   factors: readonly Factor[],
-  request: SpreadRequest,
+  request: BoardsRequest,
   names: readonly string[],
 ): PlainValues {
   const unit = unitDeviation[request.distribution];

@@ -1,7 +1,7 @@
 import type { Bench } from "./bench.ts";
 import { figureOf } from "./bench.ts";
 import { setParts, type Factor } from "./factors.ts";
-import { referenceTemperature, type Range, type SpreadRequest } from "./request.ts";
+import { referenceTemperature, type Range, type BoardsRequest } from "./request.ts";
 
 /** Combinations analysed at most; where the corners are more, the sign of each slope picks them. */
 const mostCombinations = 2048;
@@ -30,7 +30,7 @@ type Corner = readonly number[];
 export function* worstCaseOf(
   bench: Bench,
   factors: readonly Factor[],
-  request: SpreadRequest,
+  request: BoardsRequest,
   names: readonly string[],
 ): Generator<void, WorstCase> {
   const temperatures = endsOf(request.temperature);

@@ -28,6 +28,7 @@ export const parts = {
   }),
   rPot: pot({
     label: "decay pot",
+    padding: ["rMin"],
     symbol: "R_V",
     default: 500e3,
     least: 10e3,

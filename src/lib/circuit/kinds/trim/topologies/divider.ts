@@ -23,7 +23,14 @@ const parts = {
     least: 0,
     help: "From the reference to the pot; 0 where none is fitted.",
   }),
-  rPot: pot({ label: "pot", symbol: "R_pot", default: 10e3, least: 100, help: "Between the two." }),
+  rPot: pot({
+    label: "pot",
+    symbol: "R_pot",
+    default: 10e3,
+    least: 100,
+    help: "Between the two.",
+    padding: ["rTop", "rBottom"],
+  }),
   rBottom: resistor({
     label: "below",
     symbol: "R_b",

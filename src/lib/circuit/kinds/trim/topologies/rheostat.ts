@@ -13,7 +13,14 @@ import { sources } from "../sources.ts";
 
 const parts = {
   rFixed: resistor({ label: "padding", symbol: "R_fix", default: 8.2e3, help: "In series; sets the low end." }),
-  rPot: pot({ label: "pot", symbol: "R_pot", default: 25e3, least: 100, help: "Sets the span." }),
+  rPot: pot({
+    label: "pot",
+    symbol: "R_pot",
+    default: 25e3,
+    least: 100,
+    help: "Sets the span.",
+    padding: ["rFixed"],
+  }),
 } as const;
 
 const side = { unit: "Ω", least: 100, most: 1e6, window: 0.1 } as const;

@@ -21,6 +21,7 @@ export const parts = {
   r1Pot: pot({
     label: "pitch pot",
     symbol: "R_V",
+    padding: ["r1"],
     default: 0,
     most: 100e3,
     help: "Rheostat in series with R_1; 0 where none is fitted.",

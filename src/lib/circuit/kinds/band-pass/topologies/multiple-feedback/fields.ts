@@ -27,6 +27,7 @@ export const parts = {
   rbPot: pot({
     label: "retune pot",
     symbol: "R_V",
+    padding: ["rb"],
     default: 0,
     most: 100e3,
     help: "Rheostat in series with R_B; 0 where none is fitted.",

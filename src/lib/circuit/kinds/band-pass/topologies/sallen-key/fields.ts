@@ -21,6 +21,7 @@ export const parts = {
   r2Pot: pot({
     label: "retune pot",
     symbol: "R_V",
+    padding: ["r2"],
     default: 0,
     most: 100e3,
     help: "Rheostat in series with R_2; 0 where none is fitted. It moves the quality factor too.",

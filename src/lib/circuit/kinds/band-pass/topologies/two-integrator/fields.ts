@@ -29,12 +29,14 @@ export const parts = {
     ...gang,
     label: "retune, first gang",
     symbol: "R_V1",
+    padding: ["r1"],
     help: "In series with R_1; 0 where none is fitted.",
   }),
   r2Pot: pot({
     ...gang,
     label: "retune, second gang",
     symbol: "R_V2",
+    padding: ["r2"],
     help: "The other gang of the same pot, in series with R_2.",
   }),
   rq1: resistor({
