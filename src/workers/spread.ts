@@ -9,6 +9,7 @@ import {
   type SpreadView,
 } from "#lib/circuit/analysis/spread/index.ts";
 import { loadTopology } from "#lib/circuit/kinds/load.ts";
+import { inSlices } from "./slices.ts";
 
 export type SpreadAsk =
   | { ask: "run"; id: number; kind: string; topology: string; request: SpreadRequest; look: SpreadLook }
@@ -20,8 +21,6 @@ export type SpreadAsk =
 export type SpreadReply =
   { id: number; view: SpreadView; ended: boolean } | { id: number; remedy: Remedy } | { id: number; failed: true };
 
-/** Between slices the worker hears what is asked. */
-const slice = 25;
 const betweenReports = 150;
 
 interface Job {
@@ -36,11 +35,6 @@ interface Job {
 let job: Job | undefined;
 
 const send = (reply: SpreadReply) => self.postMessage(reply);
-const pause = () =>
-  new Promise<void>((resolve) => {
-    setTimeout(resolve);
-  });
-
 self.addEventListener("message", ({ data }: MessageEvent<SpreadAsk>) => {
   if (data.ask === "run") void drawBoards(data);
   else if (data.ask === "remedy") void findRemedy(data.wanted);
@@ -91,21 +85,4 @@ async function findRemedy(wanted: number) {
   } catch {
     send({ id: own.id, failed: true });
   }
-}
-
-/** Runs steps as long as it is wanted, and gives way between slices. */
-async function inSlices<S, R>(
-  steps: Generator<S, R>,
-  wanted: () => boolean,
-  after?: (last: S) => void,
-): Promise<R | undefined> {
-  while (wanted()) {
-    const until = performance.now() + slice;
-    let step = steps.next();
-    while (!step.done && performance.now() < until) step = steps.next();
-    if (step.done) return step.value;
-    after?.(step.value);
-    await pause();
-  }
-  return undefined;
 }

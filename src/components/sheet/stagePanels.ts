@@ -38,4 +38,14 @@ export const stagePanels: readonly StagePanel[] = [
       waiting: "Loading the spread…",
     }),
   },
+  {
+    id: "travel",
+    name: "Trim",
+    says: "Whether the pot reaches what it must on every board, with how much of its travel, and values that make more of it.",
+    fits: ({ parts, conditions }) =>
+      "rotation" in conditions && Object.values(parts).some(({ partClass }) => partClass === "pot"),
+    View: later(() => import("../trim/TrimPanel.tsx").then((module) => module.TrimPanel), {
+      waiting: "Loading the trim…",
+    }),
+  },
 ];

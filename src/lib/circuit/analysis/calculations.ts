@@ -1,5 +1,15 @@
 import type { AnyTopology } from "../stage/topology.ts";
 import {
+  runRevalue,
+  trimCoverage,
+  trimFigures,
+  type Revaluation,
+  type RevalueWish,
+  type TrimCoverage,
+  type TrimFigures,
+  type TrimRequest,
+} from "./trim/index.ts";
+import {
   runRemedy,
   runSpread,
   spreadOutcome,
@@ -13,6 +23,13 @@ export interface SpreadTask extends SpreadRequest {
   wantedYield?: number;
 }
 
+export interface TrimTask extends TrimRequest {
+  /** Asks for new values. */
+  revalue?: RevalueWish;
+}
+
+export type TrimAnswer = TrimFigures & { coverage: TrimCoverage; revalue?: Revaluation };
+
 export type SpreadAnswer = SpreadOutcome & { remedy?: Remedy };
 
 /**
@@ -25,6 +42,12 @@ export const calculations = {
     const outcome = spreadOutcome(run);
     if (wantedYield === undefined) return outcome;
     return { ...outcome, remedy: yield* runRemedy(topology, request, wantedYield, run.nominal, run.slopes) };
+  },
+  *trimming(topology: AnyTopology, { revalue, ...request }: TrimTask): Generator<unknown, TrimAnswer> {
+    const figures = yield* trimFigures(topology, request);
+    const coverage = yield* trimCoverage(topology, request);
+    if (revalue === undefined) return { ...figures, coverage };
+    return { ...figures, coverage, revalue: yield* runRevalue(topology, request, revalue) };
   },
 } as const;
 

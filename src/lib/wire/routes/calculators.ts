@@ -3,6 +3,7 @@ import { stageKinds } from "#lib/circuit/kinds/index.ts";
 import { z } from "zod";
 import { analyseAnswer, curvesAnswer, kindsAnswer, solveAnswer, topologySchemas } from "../calculator.ts";
 import { spreadAnswer, spreadSchema } from "../spread.ts";
+import { trimAnswer, trimSchema } from "../trim.ts";
 import { kindAnswer } from "../kindDescription.ts";
 import type { Route } from "./route.ts";
 
@@ -81,6 +82,15 @@ export const calculatorRoutes: readonly Route[] = [
     answers: {
       200: { description: "Corners, first order, random boards, and the band of a curve", body: spreadAnswer },
     },
+    problems: [404, 429, 503],
+  },
+  {
+    ...calculation,
+    path: "/api/kinds/{kind}/{topology}/trim",
+    operationId: "trimStage",
+    summary: "What a pot reaches, on how many boards, and values that would serve better",
+    body: bodyOf(trimSchema),
+    answers: { 200: { description: "Travel, ends, worst case, coverage over random boards", body: trimAnswer } },
     problems: [404, 429, 503],
   },
 ];

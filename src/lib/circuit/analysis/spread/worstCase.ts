@@ -5,6 +5,8 @@ import { referenceTemperature, type Range, type BoardsRequest } from "./request.
 
 /** Combinations analysed at most; where the corners are more, the sign of each slope picks them. */
 const mostCombinations = 2048;
+/** With middles besides: they grow as powers of three, and the corners alone are nearly always enough. */
+const mostWithMiddles = 300;
 
 export interface WorstCase {
   results: Record<string, Range>;
@@ -68,7 +70,9 @@ export function* worstCaseOf(
 
   const levels = bent.map((turns) => (turns ? [-1, 0, 1] : [-1, 1]));
   const plain = levels.map(() => [-1, 1]);
-  const every = [levels, plain].find((choices) => sizeOf(choices) * temperatures.length <= mostCombinations);
+  const fits = (choices: typeof levels, most: number) => sizeOf(choices) * temperatures.length <= most;
+  const withMiddles = bent.some(Boolean) && fits(levels, mostWithMiddles);
+  const every = withMiddles ? levels : fits(plain, mostCombinations) ? plain : undefined;
   for (const temperature of temperatures) {
     if (every) {
       for (const corner of corners(every)) {
@@ -80,11 +84,7 @@ export function* worstCaseOf(
     }
   }
   bench.clear();
-  const method = !every
-    ? "corners by sign"
-    : every === levels && bent.some(Boolean)
-      ? "every corner and middle"
-      : "every corner";
+  const method = !every ? "corners by sign" : withMiddles ? "every corner and middle" : "every corner";
   return { results, method, turning: [...turning] };
 }
 

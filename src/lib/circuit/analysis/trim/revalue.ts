@@ -1,4 +1,5 @@
 import { seriesBetween } from "../../parts/series.ts";
+import { formatQuantity } from "../../quantity/format.ts";
 import type { PlainValues } from "../../stage/defaults.ts";
 import { analyseStage } from "../../stage/analyse.ts";
 import { acceptedRange } from "../../stage/fields.ts";
@@ -33,6 +34,8 @@ export interface Revaluation {
   tried: number;
   /** Where it is not reached: the pot tolerance with which it would be, if one is sold. */
   wouldTake?: { potTolerance: number; choice: Revalued };
+  /** The answer in a sentence: that there are values, or why there are none and what would make them possible. */
+  says: string;
 }
 
 export const revalueStatement =
@@ -50,8 +53,19 @@ export function* runRevalue(
   wish: RevalueWish,
 ): Generator<void, Revaluation> {
   const found = yield* search(topology, request, wish);
-  const reached = (found.choices[0]?.usefulRotation ?? -1) >= wish.useful;
-  if (reached) return { ...found, reached };
+  const best = found.choices[0]?.usefulRotation;
+  const reached = best !== undefined && best >= wish.useful;
+  const window = windowText(topology, request);
+  if (reached)
+    return {
+      ...found,
+      reached,
+      says: `These cover ${window} on every board; the first uses ${percent(best)} of the travel.`,
+    };
+  const why =
+    best === undefined
+      ? `No pot that is sold, with any padding, covers ${window} on every board.`
+      : `On every board ${window} can be covered with at most ${percent(best)} of the travel; ${percent(wish.useful)} was asked for.`;
   const pots = turnedPots(topology, request.parts).map(({ pot }) => pot);
   for (const potTolerance of tighterPots) {
     const tolerances = { ...request.tolerances };
@@ -59,9 +73,25 @@ export function* runRevalue(
     for (const pot of pots) tolerances[pot] = potTolerance;
     const choice = (yield* search(topology, { ...request, tolerances }, wish)).choices[0];
     if (choice && choice.usefulRotation >= wish.useful)
-      return { ...found, reached, wouldTake: { potTolerance, choice } };
+      return {
+        ...found,
+        reached,
+        wouldTake: { potTolerance, choice },
+        says: `${why} A pot of ± ${percent(potTolerance)} would make it possible.`,
+      };
   }
-  return { ...found, reached };
+  return {
+    ...found,
+    reached,
+    says: `${why} No tighter pot would change that: ask for less, or change the parts that the pot does not stand beside.`,
+  };
+}
+
+const percent = (share: number) => `${Number((100 * share).toPrecision(3))} %`;
+
+function windowText(topology: AnyTopology, { window, result }: TrimRequest): string {
+  const { unit } = topology.results[result]!;
+  return `${formatQuantity(window.least, unit)} to ${formatQuantity(window.most, unit)}`;
 }
 
 function* search(
@@ -97,8 +127,14 @@ function* search(
     if (margin >= 0 && endsAreSafe(topology, request, parts))
       choices.push({ parts: changed(request.parts, parts), usefulRotation: useful, worstCaseMargin: margin });
   }
-  return { choices: choices.sort((a, b) => b.usefulRotation - a.usefulRotation), tried: tried.size };
+  return { choices: choices.sort(bestFirst), tried: tried.size };
 }
+
+/** Alike in travel, the one with more to spare. */
+const bestFirst = (a: Revalued, b: Revalued) =>
+  Math.abs(b.usefulRotation - a.usefulRotation) > 1e-3
+    ? b.usefulRotation - a.usefulRotation
+    : b.worstCaseMargin - a.worstCaseMargin;
 
 interface Judged {
   parts: PlainValues;

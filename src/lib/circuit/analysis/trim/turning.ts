@@ -1,5 +1,6 @@
+import { electricalAngle } from "../../parts/electricalAngle.ts";
 import { potFraction } from "../../parts/potLaw.ts";
-import type { PlainConditions, PlainValues } from "../../stage/defaults.ts";
+import { completeConditions, type PlainConditions, type PlainValues } from "../../stage/defaults.ts";
 import type { AnyTopology } from "../../stage/topology.ts";
 import type { Knob } from "./request.ts";
 
@@ -7,6 +8,31 @@ import type { Knob } from "./request.ts";
 export interface TurnedPot {
   pot: string;
   padding: readonly string[];
+}
+
+/** Of the sort that the trade calls usual; from memory. */
+const usual: Knob = {
+  law: "linear",
+  shape: "curve",
+  midFraction: 0.15,
+  endResistance: 0,
+  electricalAngle,
+};
+
+/** The knob as a stage's conditions say it; what they leave out is usual. */
+export function usualKnob(topology: AnyTopology, given: PlainConditions = {}): Knob {
+  const conditions = completeConditions(topology, given);
+  const figure = (name: string, other: number) => {
+    const value = conditions[name];
+    return typeof value === "number" ? value : other;
+  };
+  return {
+    law: (conditions["potLaw"] ?? usual.law) as Knob["law"],
+    shape: (conditions["lawShape"] ?? usual.shape) as Knob["shape"],
+    midFraction: figure("midFraction", usual.midFraction),
+    endResistance: figure("endResistance", usual.endResistance),
+    electricalAngle: figure("electricalAngle", usual.electricalAngle),
+  };
 }
 
 /** Pots that are fitted and turned; all of a stage turn together. */
