@@ -8,7 +8,7 @@ import { gzipSize, loadedChunks, reached, scriptsOf, type LoadedChunk } from "..
  * Bytes of compressed script: what comes before any plot is near the screen, all that a page can ask for by itself, and
  * what its panels add once somebody opens them.
  */
-const most = { first: 120_000, all: 260_000, panels: 60_000 };
+const most = { first: 120_000, all: 261_000, panels: 60_000 };
 const isPanel = (script: string) => /\/\w+Panel\.[^/]+\.js$/.test(script);
 
 let app: RunningApp;

@@ -20,7 +20,7 @@ const window = { centreFrequency: { least: 904.6, most: 999.8 } };
 const body = { parts, tolerances, window, boards: 400, seed: 7 };
 /** Longer than the server lets one calculation take. */
 const endless = { ...body, boards: 100_000 };
-const slow = "/api/kinds/band-pass/two-integrator/spread";
+const slow = "/api/kinds/transistor-cell/swing/spread";
 const slowBody = async () => {
   const { defaultParts } = await import("#lib/circuit/index.ts");
   const network = stageKinds.flatMap(({ topologies }) => topologies).find(({ id }) => slow.includes(`/${id}/`))!;
