@@ -103,7 +103,9 @@ test("removing a stage keeps what somebody else saved meanwhile", async () => {
     .getByRole("button", { name: "Remove" })
     .click();
   await page.getByRole("button", { name: "Remove it" }).click();
-  await page.getByText("Band first was removed. Somebody else saved this voice meanwhile").waitFor();
+  await page
+    .getByText("Band first was removed. All changes are saved. Somebody else saved this voice meanwhile")
+    .waitFor();
   await visit(page, app.url + path);
   await page.getByRole("link", { name: "Band second" }).waitFor();
   expect(await page.getByRole("link", { name: "Band first" }).count()).toBe(0);
@@ -139,7 +141,7 @@ test("stages are moved by the keyboard, renamed, and stay so", async () => {
   await page.getByText("Give the stage a name, such as Body or Snap.").waitFor();
   await field.fill("Tail");
   await field.press("Enter");
-  await page.getByText("Band two is now Tail.").waitFor();
+  await page.getByText("Band two is now Tail. All changes are saved.").waitFor();
 
   await visit(page, app.url + path);
   expect(await names()).toEqual(["Band three", "Band one", "Tail"]);

@@ -7,7 +7,8 @@ const shapes: Record<FigureState, string> = {
   unknown: "M1 5H9",
 };
 
-const words: Record<FigureState, string> = {
+/** Each state in a word. */
+export const stateWords: Record<FigureState, string> = {
   within: "within",
   close: "close",
   outside: "outside",
@@ -15,7 +16,7 @@ const words: Record<FigureState, string> = {
 };
 
 /** The state of a figure against its window: shape, word and colour, so that none has to be seen alone. */
-export function StateMark({ state, word = words[state] }: { state: FigureState; word?: string }) {
+export function StateMark({ state, word = stateWords[state] }: { state: FigureState; word?: string }) {
   return (
     <span className={`state-mark ${state}`}>
       <svg viewBox="0 0 10 10" aria-hidden="true">

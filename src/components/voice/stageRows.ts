@@ -1,36 +1,40 @@
-import { stageKinds } from "#lib/circuit/kinds/index.ts";
-import { analyseStage, printQuantity, type TargetState } from "#lib/circuit/index.ts";
-import type { StoredStage } from "#lib/client/workingCopy.ts";
+import { printQuantity, type TargetState } from "#lib/circuit/index.ts";
+import type { ChainStage, ComputedChain, ComputedStage } from "#lib/circuit/voice/index.ts";
 import type { FigureState } from "../page/StateMark.tsx";
 import type { StageRow } from "./StageList.tsx";
 
 const severity: Record<TargetState, number> = { within: 0, close: 1, outside: 2 };
 
-/** The worst of the targets' states speaks for the stage. */
-function stateOf(states: Record<string, TargetState>): FigureState {
-  const worst = Object.values(states).sort((a, b) => severity[b] - severity[a])[0];
-  return worst ?? "unknown";
+/** The worst of the targets' states speaks for the stage; a fault goes before them all. */
+function stateOf({ analysis: { state, warnings } }: ComputedStage): FigureState {
+  if (warnings.some((warning) => warning.severity === "fault")) return "outside";
+  return Object.values(state).sort((a, b) => severity[b] - severity[a])[0] ?? "unknown";
 }
 
 const designatorOrder = new Intl.Collator("en", { numeric: true }).compare;
 
-/** One stage as a list shows it: its two most telling figures, its state, its designators. */
-export function stageRow(stage: StoredStage): StageRow {
-  const designators = Object.values(stage.designators).sort(designatorOrder);
-  const kind = stageKinds.find(({ id }) => id === stage.kind);
-  const topology = kind?.topologies.find(({ id }) => id === stage.topology);
-  if (!kind || !topology) {
+/** The stages of a voice as a list shows them: two most telling figures, state, designators. */
+export function rowsOfChain(computed: ComputedChain): StageRow[] {
+  return computed.chain.stages.map((stage) => rowOf(stage, computed.stages.get(stage.id)));
+}
+
+function rowOf(stage: ChainStage, found: ComputedStage | undefined): StageRow {
+  const common = {
+    ...{ id: stage.id, name: stage.name },
+    designators: Object.values(stage.designators).sort(designatorOrder),
+  };
+  if (!found) {
     const network = `${stage.kind}, ${stage.topology}: this version does not know it`;
-    return { id: stage.id, name: stage.name, network, figures: [], state: "unknown", designators };
+    return { ...common, network, figures: [], state: "unknown" };
   }
-  const { results, state } = analyseStage(topology, stage);
+  const { kind, topology } = found.found;
   const figures = kind.telling.flatMap((key) => {
     const field = topology.results[key];
-    const value = results[key];
+    const value = found.analysis.results[key];
     if (!field || typeof value !== "number") return [];
     const { figure, unit } = printQuantity(value, field.unit);
     return [{ label: field.label, value: figure, unit }];
   });
   const network = stage.name === kind.name ? topology.name : `${kind.name}, ${topology.name.toLocaleLowerCase("en")}`;
-  return { id: stage.id, name: stage.name, network, figures, state: stateOf(state), designators };
+  return { ...common, network, figures, state: stateOf(found) };
 }

@@ -13,11 +13,3 @@ export function withStageMoved(document: WorkingCopyDocument, stageId: string, b
 export function withStageRenamed(document: WorkingCopyDocument, stageId: string, name: string): WorkingCopyDocument {
   return { ...document, stages: document.stages.map((stage) => (stage.id === stageId ? { ...stage, name } : stage)) };
 }
-
-/** Whether both hold the same stages with the same values, whatever their names and order. */
-export function sameStages(one: WorkingCopyDocument, other: WorkingCopyDocument): boolean {
-  const values = ({ stages }: WorkingCopyDocument) =>
-    new Map(stages.map(({ id, name: _, ...rest }): [string, string] => [id, JSON.stringify(rest)]));
-  const [left, right] = [values(one), values(other)];
-  return left.size === right.size && [...left].every(([id, text]) => right.get(id) === text);
-}

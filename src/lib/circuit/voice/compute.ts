@@ -2,9 +2,10 @@ import type { Analysis } from "../stage/analyse.ts";
 import type { PlainConditions } from "../stage/defaults.ts";
 import { joinedDemand, type Demand, type Signal } from "../stage/signal.ts";
 import { alike } from "./alike.ts";
-import type { Chain, ChainStage, FindTopology, FoundTopology } from "./chain.ts";
+import type { Chain, ChainStage, FindTopology, FoundTopology, LinkEnd } from "./chain.ts";
 import { asksOf, computeStage, ownConditions } from "./computeStage.ts";
 import { signalOrder } from "./graph.ts";
+import { behindLoad, loadOf } from "./sharedOutput.ts";
 import { wiringOf, type Wiring } from "./wiring.ts";
 
 /** One stage with all that its neighbours decide. */
@@ -64,7 +65,10 @@ export function computeChain(chain: Chain, find: FindTopology, before?: Computed
     const next = computeStage(work.byId.get(id)!, found.get(id)!, chain.conditions, known, {
       input(port) {
         const source = wiring.sourceOf(id, port);
-        return source && stages.get(source.stage)?.gives[source.port];
+        if (!source) return undefined;
+        const others = wiring.fedBy(source.stage, source.port).filter((end) => end.stage !== id || end.port !== port);
+        const load = loadOf(others.map((end) => asks.get(end.stage)?.[end.port] ?? {}));
+        return behindLoad(stages.get(source.stage)?.gives[source.port], load);
       },
       demand(port) {
         const ends = wiring.fedBy(id, port);
@@ -79,7 +83,7 @@ export function computeChain(chain: Chain, find: FindTopology, before?: Computed
     }
     for (const [port, demand] of Object.entries(next.asks)) {
       const source = wiring.sourceOf(id, port);
-      if (source && found.has(source.stage) && !alike(asks.get(id)?.[port], demand)) dirty.add(source.stage);
+      if (source && !alike(asks.get(id)?.[port], demand)) tell(source, id, wiring, found, dirty);
     }
     stages.set(id, next);
     asks.set(id, next.asks);
@@ -119,11 +123,23 @@ function begin(chain: Chain, find: FindTopology, wiring: Wiring, before: Compute
     // What feeds it is told at once, so that it need not be computed twice.
     for (const [port, demand] of Object.entries(asked)) {
       const source = wiring.sourceOf(stage.id, port);
-      if (source && found.has(source.stage) && !alike(known?.asks[port], demand)) dirty.add(source.stage);
+      if (source && !alike(known?.asks[port], demand)) tell(source, stage.id, wiring, found, dirty);
     }
   }
   for (const id of dirty) stages.delete(id);
   return { stages, asks, found, dirty, byId };
+}
+
+/** A load that changed concerns the output it is on, and whatever else is on that output. */
+function tell(
+  source: LinkEnd,
+  by: string,
+  wiring: Wiring,
+  found: ReadonlyMap<string, FoundTopology>,
+  dirty: Set<string>,
+): void {
+  const concerned = [source, ...wiring.fedBy(source.stage, source.port).filter(({ stage }) => stage !== by)];
+  for (const { stage } of concerned) if (found.has(stage)) dirty.add(stage);
 }
 
 function firstOf(dirty: ReadonlySet<string>, rank: ReadonlyMap<string, number>): string {

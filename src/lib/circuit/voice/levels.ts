@@ -1,5 +1,6 @@
 import { correlationOf, crestOf, type AudioSignal } from "../stage/signal.ts";
 import type { ComputedChain } from "./compute.ts";
+import { loadOf, underLoad } from "./sharedOutput.ts";
 
 /** The level at one point of a voice, at the peak of a hit. */
 export interface Level {
@@ -43,7 +44,10 @@ export function levelsOf(computed: ComputedChain): Level[] {
         ...{ node: `${node}: ${label}`, stage: id, label: `${found.stage.name}, ${label}`, signal: signal.signal },
         ...{ rms, peak: rms * crest, floor: 0, sign: 1, most, jack: false },
       }));
-      return [...inner, { ...levelOf(signal), node, stage: id, label: found.stage.name, jack }];
+      const load = loadOf(
+        computed.wiring.fedBy(id, port).map((end) => computed.stages.get(end.stage)?.asks[end.port] ?? {}),
+      );
+      return [...inner, { ...levelOf(underLoad(signal, load)), node, stage: id, label: found.stage.name, jack }];
     });
   });
 }

@@ -4,6 +4,7 @@ import type { StageState } from "#lib/wire/stageState.ts";
 import { failureText, request } from "../request.ts";
 import { changeWorkingCopy, withStage, type StoredStage, type WorkingCopyDocument } from "../workingCopy.ts";
 import { assignDesignators } from "./designators.ts";
+import { newStageId } from "./newStageId.ts";
 
 interface NewStage {
   kind: KindBrief;
@@ -18,7 +19,7 @@ export type Appended = { kind: "saved"; stage: StoredStage } | { kind: "failed";
 export async function appendStage(voiceId: string, { kind, topology, state, name }: NewStage): Promise<Appended> {
   const copy = await request<WorkingCopyDocument>(`/api/voices/${encodeURIComponent(voiceId)}/working-copy`);
   if (copy.kind !== "done") return { kind: "failed", message: failureText(copy) };
-  const id = newId();
+  const id = newStageId();
   const stageIn = (document: WorkingCopyDocument): StoredStage => ({
     id,
     kind: kind.id,
@@ -57,10 +58,4 @@ export async function appendStage(voiceId: string, { kind, topology, state, name
       return { kind: "failed", message: `${[outcome.detail, ...faults].join(" ")} Your values stay here.` };
     }
   }
-}
-
-/** Unlike randomUUID, this also works where the page is not served over TLS. */
-function newId(): string {
-  const bytes = crypto.getRandomValues(new Uint8Array(12));
-  return `s-${[...bytes].map((byte) => byte.toString(16).padStart(2, "0")).join("")}`;
 }

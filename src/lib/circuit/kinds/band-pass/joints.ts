@@ -5,8 +5,6 @@ import { ownMix, type AudioSignal, type TriggerSignal } from "../../stage/signal
 interface Shape {
   /** Ω that the source sees, near the centre. */
   input: (parts: JointState["parts"]) => number;
-  /** Ω of the output; 0 for an op amp. */
-  output?: (parts: JointState["parts"]) => number;
   /** No op amp that could clip. */
   passive?: true;
   /** Rings when a pulse strikes it. */
@@ -19,7 +17,7 @@ const strike = {
 };
 
 /** Sound in, its band out: a wave of its own, for what the filter leaves has little in common with what it is fed. */
-export const filterJoints = ({ input, output, passive, struck }: Shape): Joints => ({
+export const filterJoints = ({ input, passive, struck }: Shape): Joints => ({
   in: {
     takes: ({ rms, signal, resistance, bandwidth }: AudioSignal) => ({
       sourceResistance: resistance,
@@ -30,7 +28,7 @@ export const filterJoints = ({ input, output, passive, struck }: Shape): Joints 
   },
   ...(struck && { strike }),
   out: {
-    gives({ parts, conditions, results, inputs }): AudioSignal | undefined {
+    gives({ conditions, results, inputs }): AudioSignal | undefined {
       const source = inputs.in as AudioSignal | undefined;
       const { outputRms, ringPeak } = results;
       const rings = inputs.strike !== undefined && typeof ringPeak === "number";
@@ -42,7 +40,8 @@ export const filterJoints = ({ input, output, passive, struck }: Shape): Joints 
         sort: "audio",
         rms,
         signal: rings ? "sine" : "noise",
-        resistance: output?.(parts) ?? 0,
+        // An op amp's, or counted with its load already.
+        resistance: 0,
         floor: source && !rings && source.rms > 0 ? source.floor * (rms / source.rms) : 0,
         ...(!passive && { clip: swingOn(conditions as unknown as Rails) }),
         mix: ownMix(rms),

@@ -11,6 +11,8 @@ export const driverJoints = (inputResistance: (state: JointState) => number | un
     },
   },
   out: {
+    // Linked to another stage it is no jack: that stage counts R_o as its source's resistance.
+    bears: () => ({ loadResistance: null, cableCapacitance: 0 }),
     gives({ parts, results, inputs }): AudioSignal | undefined {
       const source = inputs.in as AudioSignal | undefined;
       const { outputRms, inverting, swing, noiseFloor, loadLossDb } = results;

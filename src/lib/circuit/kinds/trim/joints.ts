@@ -30,8 +30,11 @@ export const dividerJoints: Joints = {
   soundOut: {
     gives(state): AudioSignal | undefined {
       const source = state.inputs.soundIn as AudioSignal | undefined;
-      const share = shareOf(state);
-      if (!source || share === undefined) return undefined;
+      const loaded = shareOf(state);
+      if (!source || loaded === undefined) return undefined;
+      // Without the load: what takes the sound counts the wiper's resistance as that of its source.
+      const { loadResistance } = state.conditions;
+      const share = typeof loadResistance === "number" ? loaded * (1 + resistanceOf(state) / loadResistance) : loaded;
       const { clip: _, inside: __, ...passed } = source;
       return {
         ...passed,

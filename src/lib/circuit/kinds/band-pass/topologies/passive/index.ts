@@ -41,7 +41,7 @@ export const passive = defineTopology({
   formulas,
   sources: sourcesOf(formulas, limits),
   network,
-  joints: filterJoints({ input: ({ r1 }) => r1!, output: ({ r2 }) => r2!, passive: true }),
+  joints: filterJoints({ input: ({ r1 }) => r1!, passive: true }),
   devices: [],
   traits: [
     { label: "Op amps", text: "0" },
