@@ -36,7 +36,7 @@ async function openChain(name: string) {
 test("the chain is drawn, walked by keyboard, and shows what it decides", async () => {
   const { page, consoleErrors, close } = await openChain("Walked");
   expect(await page.locator(".chain-box").count()).toBe(14);
-  expect(await page.locator("path.chain-link").count()).toBe(14);
+  expect(await page.locator("path.chain-link").count()).toBe(15);
   await page.getByRole("button", { name: /^Noise, / }).focus();
   await page.keyboard.press("ArrowRight");
   await page.waitForFunction(() => document.activeElement?.textContent?.includes("Noise amount"));

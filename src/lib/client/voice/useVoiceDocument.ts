@@ -54,6 +54,7 @@ export function useVoiceDocument(voiceId: string, start: WorkingCopy): VoiceDocu
       saved.current = current;
       // Taking back a step would take back what others did meanwhile.
       setHistory(begin(merged));
+      joined.current = true;
       setState({ kind: "saved", joined: true });
       setTurn((count) => count + 1);
     },
