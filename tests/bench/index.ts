@@ -39,6 +39,14 @@ function benchKinds(): boolean {
   return dearest.seconds <= aims.secondsPerAnalysis;
 }
 
+function benchChain(): void {
+  for (const stages of [14, 60]) {
+    const { whole, change } = chainTimes(stages);
+    line(`voice of ${stages} stages, whole`, `${round(whole)} ms`);
+    line(`voice of ${stages} stages, one value changed`, `${round(change)} ms`);
+  }
+}
+
 async function benchServer(server: BenchServer): Promise<boolean> {
   const { host, port } = server;
   const topology = bandPass.topologies[0]!.id;
@@ -84,6 +92,7 @@ async function benchServer(server: BenchServer): Promise<boolean> {
 // `npm run bench -- lists` measures the lists alone.
 if (!process.argv.includes("lists")) {
   benchLibrary();
+  benchChain();
   if (!benchKinds()) process.exitCode = 1;
   const server = await startServer();
   try {
