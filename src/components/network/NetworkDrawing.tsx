@@ -13,8 +13,9 @@ interface NetworkDrawingProps {
   lit?: string | undefined;
 }
 
-/** A drawing wider than this has a row for itself. */
+/** A drawing wider or higher than a plot has a row for itself. */
 const halfWidth = 560;
+const plotHeight = 400;
 
 /** The topology's network as a schematic in our own hand: IEC bodies, thin wires, values beside the parts. */
 export function NetworkDrawing({ topology, parts, designators = {}, lit }: NetworkDrawingProps) {
@@ -29,7 +30,10 @@ export function NetworkDrawing({ topology, parts, designators = {}, lit }: Netwo
   );
   const view = viewOf(topology.network, markings);
   return (
-    <figure className={view.width > halfWidth ? "plot network-wide" : "plot"} aria-labelledby={`${id}-head`}>
+    <figure
+      className={view.width > halfWidth || view.height > plotHeight ? "plot network-wide" : "plot"}
+      aria-labelledby={`${id}-head`}
+    >
       <figcaption className="plot-head">
         <h3 id={`${id}-head`}>Network</h3>
       </figcaption>
