@@ -1,6 +1,7 @@
 /** `npm run bench`: what the calculations cost, in the library and over HTTP. All ratios come from one run. */
 import { bandPass } from "#lib/circuit/kinds/band-pass/index.ts";
 import { stageKinds } from "#lib/circuit/kinds/index.ts";
+import { chainTimes } from "./chain.ts";
 import { analysisCosts, rate, subject, work } from "./library.ts";
 import { benchLists } from "./lists.ts";
 import { send } from "./load.ts";
