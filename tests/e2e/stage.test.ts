@@ -172,6 +172,7 @@ test("designators and the name are edited, refused at the field, taken back, and
 test("a voice asks for a stage, and signing in on the way keeps the voice and the values", async () => {
   const member = await openMemberPage(browser, app.url, "designer");
   await member.page.getByRole("link", { name: "Woodpeck" }).click();
+  await member.page.getByText("Size a stage in its calculator").click();
   await member.page.getByRole("link", { name: "Band-pass", exact: true }).click();
   await member.page.waitForURL(/\/calculators\/band-pass\?voice=/);
   const address = member.page.url();

@@ -71,13 +71,14 @@ function Box({ data, isConnectable }: NodeProps<BoxNode>) {
         className={`chain-box ${chosen ? "chosen" : ""} ${apart ? "apart" : ""}`}
         style={{ width: boxSize.width, height: boxSize.height }}
         aria-pressed={chosen}
-        aria-label={`${row.name}, ${figures}, ${stateWords[row.state]}`}
         onClick={() => onChoose(row.id)}
         onKeyDown={onKey}
       >
         <span className="chain-name">{row.name}</span>
+        <span className="sr-only">, </span>
         <StateMark state={row.state} word="" />
         <span className="chain-figures fig">{figures}</span>
+        <span className="sr-only">, {stateWords[row.state]}</span>
       </button>
       {outputs.map(({ id, label, sort }, index) => (
         <Handle
