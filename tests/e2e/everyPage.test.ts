@@ -1,3 +1,4 @@
+import { stageKinds } from "#lib/circuit/kinds/index.ts";
 import type { Browser, Page } from "playwright-core";
 import { afterAll, beforeAll, describe, expect, test } from "vitest";
 import { startApp, type RunningApp } from "../support/app.ts";
@@ -45,7 +46,7 @@ const open = [
   "/verify?confirmed=1",
   "/verify?error=token_expired",
   "/calculators",
-  "/calculators/band-pass",
+  ...stageKinds.map(({ id }) => `/calculators/${id}`),
   "/calculators/band-pass?voice=unknown",
   "/docs/api",
   "/mail",
