@@ -34,7 +34,7 @@ export function RevaluePart(props: RevalueProps) {
           onChange={(event) => change({ useful: event.target.value })}
         />
         <span>% of the travel are of use</span>
-        <button type="submit" className="btn" disabled={!trim.request || revaluation === "working"}>
+        <button type="submit" className="btn" disabled={!trim.request || trim.pending || revaluation === "working"}>
           Find values
         </button>
       </form>

@@ -14,6 +14,7 @@ export function useTrim({ kind, topology, state }: StagePanelProps) {
   const [coverage, setCoverage] = useState<TrimCoverage | null>(null);
   const [revaluation, setRevaluation] = useState<Revaluation | "working" | null>(null);
   const [failed, setFailed] = useState(false);
+  const [asked, setAsked] = useState<string>();
   const runner = useRef<TrimRunner | null>(null);
   const read = useMemo(() => readTrim(topology, state, settings), [topology, state, settings]);
   const question = read.request && JSON.stringify(read.request);
@@ -33,9 +34,13 @@ export function useTrim({ kind, topology, state }: StagePanelProps) {
     const timer = setTimeout(() => {
       setFailed(false);
       setRevaluation(null);
+      setAsked(question);
       runner.current?.run(kind.id, topology.id, JSON.parse(question) as never);
     }, pause);
-    return () => clearTimeout(timer);
+    return () => {
+      clearTimeout(timer);
+      setAsked(undefined);
+    };
   }, [question, kind.id, topology.id]);
 
   return {
@@ -47,6 +52,8 @@ export function useTrim({ kind, topology, state }: StagePanelProps) {
     coverage,
     revaluation,
     failed,
+    // A search begun before the question has been asked would be ended by it.
+    pending: asked !== question,
     revalue: () => {
       if (!read.request || read.useful === undefined) return;
       setRevaluation("working");
